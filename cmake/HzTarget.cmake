@@ -1,0 +1,9 @@
+# What every target of ours shares: C++20, warnings, and arithmetic that prints the same digits on every machine.
+function(hz_target target)
+  target_compile_features(${target} PUBLIC cxx_std_20)
+  set_target_properties(${target} PROPERTIES CXX_EXTENSIONS OFF)
+  target_compile_options(${target} PRIVATE
+    -ffp-contract=off
+    -Wall -Wextra -Wpedantic -Wshadow -Wconversion -Wsign-conversion -Wold-style-cast -Wnon-virtual-dtor
+    $<$<BOOL:${HZ_WERROR}>:-Werror>)
+endfunction()
