@@ -2,6 +2,7 @@
 #pragma once
 #include <optional>
 #include <string>
+#include <string_view>
 #include <vector>
 
 #include "hz/placement.hpp"
@@ -78,10 +79,14 @@ struct Answer {
   std::string note;
 };
 
-/// Answers a row; a pure function of the row and the settings. Rows whose planet cannot be answered are set aside.
+/// Whether a row speaks of a planet: it names one or states something of an orbit. Otherwise it is a star.
+[[nodiscard]] bool is_planet(const ListRow& row);
+
+/// Answers a row; a pure function of the row and the settings. Rows whose planet cannot be answered are set
+/// aside; the distances of the limits come without half-widths.
 [[nodiscard]] Answer answer(const ListRow& row, const Settings& settings);
 
-/// The star's part alone, for `bounds`.
+/// The star's part alone, for `bounds`: limits for a planet of 1 Earth mass, with half-widths of their distances.
 [[nodiscard]] Answer answer_star(const ListRow& row, const Settings& settings);
 
 }  // namespace hz
