@@ -80,14 +80,25 @@ std::optional<Derived> stated(const RowInputs& row, Quantity quantity, const Fie
   return input ? std::optional(Derived{input->used, "stated"}) : std::nullopt;
 }
 
+std::vector<ZoneEdge> edges_of(const LimitSet& set, std::size_t limit) {
+  std::vector<ZoneEdge> edges;
+  if (set.optimistic && set.optimistic->inner == limit) edges.push_back(ZoneEdge::optimistic_inner);
+  if (set.conservative && set.conservative->inner == limit) edges.push_back(ZoneEdge::conservative_inner);
+  if (set.conservative && set.conservative->outer == limit) edges.push_back(ZoneEdge::conservative_outer);
+  if (set.optimistic && set.optimistic->outer == limit) edges.push_back(ZoneEdge::optimistic_outer);
+  return edges;
+}
+
 /// Central distances of every limit of the set, and what follows from them.
 std::vector<LimitAtStar> limits_at(const StarAnswer& star, double teff, double planet_mass, const Settings& settings) {
   std::vector<LimitAtStar> found;
-  for (const FluxLimit& limit : settings.limits->limits) {
+  for (std::size_t index = 0; index < settings.limits->limits.size(); ++index) {
+    const FluxLimit& limit = settings.limits->limits[index];
     const Result<HeldValue> insolation = limit.insolation(teff, planet_mass, settings.beyond);
     if (!insolation) continue;
     LimitAtStar at;
     at.limit = &limit;
+    at.edges = edges_of(*settings.limits, index);
     at.insolation = insolation->value;
     at.held = insolation->held;
     if (star.luminosity) {
@@ -339,6 +350,13 @@ Verdict verdict_of(double probability, const VerdictThresholds& thresholds) {
   if (probability <= thresholds.outside) return Verdict::outside;
   if (probability <= thresholds.likely_outside) return Verdict::likely_outside;
   return Verdict::open;
+}
+
+const LimitAtStar* find_edge(const Answer& answer, ZoneEdge edge) {
+  for (const LimitAtStar& at : answer.limits) {
+    if (std::find(at.edges.begin(), at.edges.end(), edge) != at.edges.end()) return &at;
+  }
+  return nullptr;
 }
 
 bool is_planet(const ListRow& row) { return !row.planet.name.empty() || states_an_orbit(row.planet); }
