@@ -5,6 +5,7 @@
 #include <variant>
 #include <vector>
 
+#include "hz/limit_curve.hpp"
 #include "hz/result.hpp"
 
 namespace hz {
@@ -24,14 +25,7 @@ struct HeldValue {
   bool held = false;
 };
 
-/// A closed interval.
-struct Range {
-  double low = 0;
-  double high = 0;
-  [[nodiscard]] bool contains(double x) const { return low <= x && x <= high; }
-};
-
-/// S = s0 + a t + b t^2 + c t^3 + d t^4, t = teff - teff_reference; one row a planet mass (Kopparapu et al. 2013, eq. 2).
+/// S = s0 + a t + b t^2 + c t^3 + d t^4, t = teff - teff_reference (Kopparapu et al. 2013, eq. 2).
 struct FluxQuartic {
   double s0 = 0, a = 0, b = 0, c = 0, d = 0;
 };
@@ -64,13 +58,14 @@ struct EquilibriumForm {
   double temperature = 0;  // K
   double bond_albedo = 0;
 };
-using LimitForm =
-    std::variant<QuarticForm, DistanceQuadraticForm, FluxQuadraticForm, FluxPointForm, DistancePointForm, EquilibriumForm>;
+using LimitForm = std::variant<QuarticForm, DistanceQuadraticForm, FluxQuadraticForm, FluxPointForm, DistancePointForm,
+                               EquilibriumForm>;
 
 /// One limit as published, read from catalogs/limits.toml or a user's file of the same form.
 class FluxLimit {
 public:
   /// `teff_range` is empty where the source states none (equilibrium temperature).
+  /// Requires low <= high, and in a QuarticForm at least one row, by rising planet mass above 0.
   FluxLimit(std::string key, std::string title, std::optional<Range> teff_range, LimitForm form);
 
   [[nodiscard]] const std::string& key() const { return key_; }      // "runaway_greenhouse"
@@ -87,18 +82,30 @@ public:
   /// Units     teff in K; planet_mass in Earth masses; the result in solar constants (1 = the flux of one nominal
   ///           luminosity at 1 au).
   /// Validity  teff_range(), both ends in; planet_mass is held at the ends of planet_mass_range().
-  /// Outside   up to hold_reach outside: held at the end, and says so, under BeyondRange::hold; otherwise
-  ///           Problem::out_of_range. Never extrapolated.
+  /// Outside   up to and with hold_reach outside: held at the end, and says so, under BeyondRange::hold; otherwise, and
+  ///           for arguments that are not finite or a planet_mass <= 0, Problem::out_of_range. Never extrapolated.
   [[nodiscard]] Result<HeldValue> insolation(double teff, double planet_mass, BeyondRange beyond) const;
 
   /// The same inside the range only, for integrals that have cut their domain already: teff is clamped to teff_range().
+  /// Requires finite arguments and planet_mass > 0.
   [[nodiscard]] double clamped_insolation(double teff, double planet_mass) const;
 
+  /// The limit at this planet mass, for loops over Teff: clamped_insolation without the search for the mass.
+  /// Requires planet_mass > 0.
+  [[nodiscard]] LimitCurve at_planet_mass(double planet_mass) const;
+
 private:
+  struct MassCurve {
+    double planet_mass = 1;
+    double ln_planet_mass = 0;
+    LimitCurve curve;
+  };
+
   std::string key_;
   std::string title_;
   std::optional<Range> teff_range_;
   LimitForm form_;
+  std::vector<MassCurve> curves_;  // by rising planet mass; one for a form without planet mass
 };
 
 }  // namespace hz

@@ -31,9 +31,10 @@ struct LimitSet {
 
   [[nodiscard]] bool bounds_a_zone() const { return conservative || optimistic; }
 
-  /// The common fitted range of the limits that bound its zones; empty when they have none.
+  /// The fitted range that the limits bounding its zones share (all its limits, in a set without a zone); empty when
+  /// they have none.
   [[nodiscard]] std::optional<Range> teff_range() const;
-  /// The fitted planet masses of the limits that bound its zones; empty when none depends on it.
+  /// The fitted planet masses that those limits share; empty when none depends on it.
   [[nodiscard]] std::optional<Range> planet_mass_range() const;
 };
 
@@ -43,8 +44,11 @@ public:
   /// The published sets of catalogs/limits.toml, embedded at build time.
   [[nodiscard]] static const LimitCatalog& published();
 
-  /// These sets and those of a user's TOML text; `file` names it in messages.
-  /// Throws hz::Error (input) as "file:line:column: what is wrong; what to do", also for a key that exists already.
+  /// These sets and those of a user's TOML text in the form of catalogs/limits.toml; `file` names it in messages.
+  ///
+  /// Throws hz::Error (input) as "file:line:column: what was found; what to do" at the first mistake. Beside wrong keys
+  /// and types these are: a key that exists already; S not above 0, an inner limit not hotter than its outer one, or a
+  /// conservative zone not within the optimistic one (touching is allowed) anywhere on a grid over the Teff range.
   [[nodiscard]] LimitCatalog with(std::string_view toml_text, const std::string& file) const;
 
   /// nullptr when there is none; keys are compared without regard to case.
