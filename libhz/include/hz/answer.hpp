@@ -2,6 +2,7 @@
 #pragma once
 #include <optional>
 #include <string>
+#include <string_view>
 #include <vector>
 
 #include "hz/placement.hpp"
@@ -24,9 +25,13 @@ struct StarAnswer {
   std::optional<Derived> distance;
 };
 
+/// What a limit bounds.
+enum class ZoneEdge { optimistic_inner, conservative_inner, conservative_outer, optimistic_outer };
+
 /// One limit at one star.
 struct LimitAtStar {
   const FluxLimit* limit = nullptr;
+  std::vector<ZoneEdge> edges;                 // empty for a further limit of the set
   double insolation = 0;                       // Earth = 1
   bool held = false;
   std::optional<Measured> distance;            // au, when the luminosity is known
@@ -78,10 +83,17 @@ struct Answer {
   std::string note;
 };
 
-/// Answers a row; a pure function of the row and the settings. Rows whose planet cannot be answered are set aside.
+/// Whether a row speaks of a planet: it names one or states something of an orbit. Otherwise it is a star.
+[[nodiscard]] bool is_planet(const ListRow& row);
+
+/// Answers a row; a pure function of the row and the settings. Rows whose planet cannot be answered are set
+/// aside; the distances of the limits come without half-widths.
 [[nodiscard]] Answer answer(const ListRow& row, const Settings& settings);
 
-/// The star's part alone, for `bounds`.
+/// The star's part alone, for `bounds`: limits for a planet of 1 Earth mass, with half-widths of their distances.
 [[nodiscard]] Answer answer_star(const ListRow& row, const Settings& settings);
+
+/// The limit that bounds a zone at the answer's star; nullptr when the set has no such zone or the row no such answer.
+[[nodiscard]] const LimitAtStar* find_edge(const Answer& answer, ZoneEdge edge);
 
 }  // namespace hz

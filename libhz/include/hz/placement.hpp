@@ -26,6 +26,7 @@ struct PlacementInput {
   Distribution teff = Distribution::exact(0);          // K
   Distribution eccentricity = Distribution::exact(0);  // 0 where the insolation is averaged already
   Distribution planet_mass = Distribution::exact(1);   // Earth masses, for limits that depend on it
+  bool planet_mass_decadic = false;                    // planet_mass is a decadic logarithm of Earth masses
 };
 
 /// Orbit-averaged insolation at the central values.
@@ -51,11 +52,12 @@ struct Probabilities {
 [[nodiscard]] Probabilities place_by_sampling(const PlacementInput& input, const LimitSet& set, BeyondRange beyond,
                                               std::uint64_t draws, std::uint64_t seed);
 
-/// Half-widths (68 per cent) of ln S - ln S_limit about its central value, for one limit of the set; the lower one first.
-struct LogWidths {
-  double minus = 0;
-  double plus = 0;
-};
-[[nodiscard]] LogWidths log_margin_widths(const PlacementInput& input, const FluxLimit& limit, BeyondRange beyond);
+/// Which side of the central value.
+enum class Towards { colder, hotter };
+
+/// The 68 per cent half-width of ln S - ln S_limit on one side of its central value, to about 1 per cent of itself.
+///
+/// With all insolation terms but the luminosity's left out it is twice the relative half-width of the limit's distance.
+[[nodiscard]] double log_margin_width(const PlacementInput& input, const FluxLimit& limit, BeyondRange beyond, Towards towards);
 
 }  // namespace hz

@@ -1,0 +1,127 @@
+#include "inputs.hpp"
+
+#include <fmt/format.h>
+
+#include <cmath>
+#include <limits>
+
+namespace hz {
+namespace {
+
+constexpr double infinity = std::numeric_limits<double>::infinity();
+constexpr double ln10 = 2.302585092994045684;
+
+bool is_logarithm(Quantity quantity) { return quantity == Quantity::log_luminosity || quantity == Quantity::log_g; }
+
+/// Whose assumed error a quantity shares.
+Quantity error_source(Quantity quantity) {
+  if (quantity == Quantity::log_luminosity) return Quantity::luminosity;
+  if (quantity == Quantity::min_mass) return Quantity::planet_mass;
+  return quantity;
+}
+
+/// The assumed half-width on the quantity's own scale.
+std::optional<double> assumed_half_width(Quantity quantity, double value, const AssumedErrors& errors) {
+  const auto found = errors.find(error_source(quantity));
+  if (found == errors.end() || !(found->second > 0)) return std::nullopt;
+  if (is_logarithm(quantity)) return found->second / ln10;
+  return quantity == Quantity::eccentricity ? found->second : found->second * value;
+}
+
+bool gives_no_error(const Measured& measured) {
+  return !(measured.minus.value_or(0) > 0) && !(measured.plus.value_or(0) > 0);
+}
+
+}  // namespace
+
+AssumedErrors default_assumed_errors() {
+  // Medians of a public composite list of 2023 (luminosity from radius and Teff). For a/R the errors of a and R together.
+  return {{Quantity::teff, 0.016},          {Quantity::stellar_radius, 0.06},          {Quantity::stellar_mass, 0.056},
+          {Quantity::semi_major_axis, 0.023}, {Quantity::scaled_semi_major_axis, 0.064}, {Quantity::planet_radius, 0.09},
+          {Quantity::planet_mass, 0.13},    {Quantity::insolation, 0.06},              {Quantity::luminosity, 0.14},
+          {Quantity::distance, 0.012},      {Quantity::eccentricity, 0.05}};
+}
+
+Domain domain_of(Quantity quantity) {
+  if (is_logarithm(quantity)) return {-infinity, infinity};
+  if (quantity == Quantity::eccentricity) return {0, 1};
+  return {0, infinity};
+}
+
+std::optional<Problem> Inputs::refusal(Quantity quantity, const Measured& measured) const {
+  const auto out_of_range = [&](std::string_view wanted) {
+    return Problem{ProblemCode::out_of_range, std::string(name(quantity)),
+                   fmt::format("{} is {}, but {}", name(quantity), measured.value, wanted)};
+  };
+  if (quantity == Quantity::eccentricity) {
+    if (measured.value >= 0 && measured.value < 1) return std::nullopt;
+    return out_of_range("a bound orbit has 0 <= eccentricity < 1");
+  }
+  if (is_logarithm(quantity) || measured.value > 0) return std::nullopt;
+  return out_of_range("it must be above 0");
+}
+
+Input Inputs::settle(Quantity quantity, const Measured& measured) const {
+  Input input;
+  input.used = measured;
+  if (measured.exact) {
+    input.used.minus = input.used.plus = 0;
+    input.x = Distribution::exact(measured.value);
+    return input;
+  }
+  if (gives_no_error(measured)) {
+    const std::optional<double> assumed = assumed_half_width(quantity, measured.value, settings_.assumed_errors);
+    if (assumed) flags_.raise(flag::assumed_error, quantity);
+    input.used.minus = input.used.plus = assumed.value_or(0);
+  } else {
+    // One half-width given serves both sides; a zero beside a positive one stays a zero.
+    input.used.minus = measured.minus ? measured.minus : measured.plus;
+    input.used.plus = measured.plus ? measured.plus : measured.minus;
+  }
+  if (*input.used.minus + *input.used.plus > 0) {
+    input.x = Distribution::two_piece(measured.value, *input.used.minus, *input.used.plus, settings_.asymmetry,
+                                      domain_of(quantity));
+  } else {
+    input.x = Distribution::exact(measured.value);
+  }
+  return input;
+}
+
+Result<std::optional<Input>> Inputs::take(Quantity quantity, const Field& field) const {
+  if (field.problem) return *field.problem;
+  if (!field.stated) return std::optional<Input>();
+  if (field.stated->limit != LimitMark::none) {
+    flags_.raise(flag::limit_ignored, quantity);
+    return std::optional<Input>();
+  }
+  if (const std::optional<Problem> problem = refusal(quantity, *field.stated)) return *problem;
+  return std::optional<Input>(settle(quantity, *field.stated));
+}
+
+std::optional<Input> Inputs::peek(Quantity quantity, const Field& field) const {
+  if (!field.stated || field.stated->limit != LimitMark::none || refusal(quantity, *field.stated)) return std::nullopt;
+  Flags unheard;
+  return Inputs(settings_, unheard).settle(quantity, *field.stated);
+}
+
+Result<Input> Inputs::eccentricity(const Field& field) const {
+  Input circular;
+  circular.used.minus = circular.used.plus = 0;
+  if (field.problem) return *field.problem;
+  const bool upper = field.stated && field.stated->limit == LimitMark::upper;
+  if (!field.stated || field.stated->limit == LimitMark::lower) {
+    if (field.stated) flags_.raise(flag::limit_ignored, Quantity::eccentricity);
+    flags_.raise(flag::circular_assumed);
+    return circular;
+  }
+  if (const std::optional<Problem> problem = refusal(Quantity::eccentricity, *field.stated)) return *problem;
+  if (!upper) return settle(Quantity::eccentricity, *field.stated);
+  flags_.raise(flag::eccentricity_limit);
+  if (!(field.stated->value > 0)) return circular;
+  Input input = circular;
+  input.x = Distribution::below(field.stated->value, domain_of(Quantity::eccentricity));
+  input.used.plus = input.x.plus();
+  return input;
+}
+
+}  // namespace hz
