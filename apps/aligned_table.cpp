@@ -24,7 +24,7 @@ std::vector<std::size_t> AlignedTable::filled_columns() const {
 }
 
 std::size_t AlignedTable::width_of(std::size_t column) const {
-  std::size_t width = text_width(columns_[column].heading);
+  std::size_t width = std::max(text_width(columns_[column].heading), text_width(gap_));
   for (const Row& row : rows_) width = std::max(width, text_width(row.cells[column]));
   return width;
 }
@@ -32,7 +32,7 @@ std::size_t AlignedTable::width_of(std::size_t column) const {
 std::string AlignedTable::line(const std::vector<std::string>& cells, const std::vector<std::size_t>& shown) const {
   std::string result;
   for (const std::size_t column : shown) {
-    const std::string cell = cells[column].empty() ? "-" : cells[column];
+    const std::string cell = cells[column].empty() ? gap_ : cells[column];
     const std::string padding(width_of(column) - text_width(cell), ' ');
     if (!result.empty()) result += "  ";
     result += columns_[column].align == Align::left ? cell + padding : padding + cell;

@@ -18,7 +18,8 @@ public:
     Align align = Align::left;
   };
 
-  explicit AlignedTable(std::vector<Column> columns) : columns_(std::move(columns)) {}
+  explicit AlignedTable(std::vector<Column> columns, std::string gap = "-")
+      : columns_(std::move(columns)), gap_(std::move(gap)) {}
 
   /// One cell a column.
   void add(std::vector<std::string> cells, Style style = Style::plain);
@@ -38,6 +39,7 @@ private:
   [[nodiscard]] std::string line(const std::vector<std::string>& cells, const std::vector<std::size_t>& shown) const;
 
   std::vector<Column> columns_;
+  std::string gap_;
   std::vector<Row> rows_;
 };
 

@@ -3,9 +3,11 @@
 #include <fmt/format.h>
 
 #include <algorithm>
-#include <cmath>
+#include <array>
+#include <limits>
 
 #include "aligned_table.hpp"
+#include "flag_text.hpp"
 #include "hz/require.hpp"
 #include "numbers.hpp"
 #include "text_layout.hpp"
@@ -32,14 +34,26 @@ std::string role(const LimitSet& set, const FluxLimit& limit) {
   return result + (result.empty() || wider.empty() ? "" : "; ") + wider;
 }
 
-/// Decimals that suit every number of a column.
-template <class Number>
-int common_decimals(const Answer& answer, std::optional<Number> LimitAtStar::*value) {
+/// Decimals that suit every number of a column: three digits of the smallest.
+int common_decimals(const Answer& answer, std::optional<double> LimitAtStar::*value) {
   int decimals = 0;
   for (const LimitAtStar& each : answer.limits) {
     if (each.*value) decimals = std::max(decimals, decimals_for(*(each.*value), 3));
   }
   return decimals;
+}
+
+/// The same for distances: as many as the least precise of them deserves, if they have half-widths.
+int distance_decimals(const Answer& answer) {
+  int fewest = std::numeric_limits<int>::max(), most = 0;
+  for (const LimitAtStar& each : answer.limits) {
+    if (!each.distance) continue;
+    const bool exact = each.distance->minus.value_or(0) == 0 && each.distance->plus.value_or(0) == 0;
+    const int decimals = decimals_for(*each.distance, 3);
+    if (exact) most = std::max(most, decimals);
+    if (!exact) fewest = std::min(fewest, decimals);
+  }
+  return std::max(fewest == std::numeric_limits<int>::max() ? 0 : fewest, most);
 }
 
 std::string cell(const std::optional<double>& value, int decimals) { return value ? fixed(*value, decimals) : ""; }
@@ -52,7 +66,7 @@ AlignedTable limit_table(const Answer& answer, const LimitSet& set) {
                       {"on the sky (mas)", Align::right},
                       {"bounds the zone"},
                       {"held"}});
-  const int distance = common_decimals(answer, &LimitAtStar::distance);
+  const int distance = distance_decimals(answer);
   const int period = common_decimals(answer, &LimitAtStar::period);
   const int angle = common_decimals(answer, &LimitAtStar::angular_separation);
   std::vector<LimitAtStar> limits = answer.limits;
@@ -73,7 +87,7 @@ std::string zone_phrase(const Answer& answer, const LimitSet& set, const std::op
   const LimitAtStar* const inner = at_star(answer, set.limits[zone->inner]);
   const LimitAtStar* const outer = at_star(answer, set.limits[zone->outer]);
   if (inner == nullptr || outer == nullptr || !inner->distance || !outer->distance) return "";
-  const int decimals = std::max(decimals_for(inner->distance->value, 3), decimals_for(outer->distance->value, 3));
+  const int decimals = decimals_for(inner->distance->value, 3);
   return fmt::format("{} to {} au ({} zone)", fixed(inner->distance->value, decimals),
                      fixed(outer->distance->value, decimals), name);
 }
@@ -98,21 +112,6 @@ std::string star_line(const ListRow& row, const Answer& answer) {
   add_value(values, "distance", answer.star.distance, "pc");
   const std::string name = row.star.name.empty() ? "Star" : printable(row.star.name);
   return name + ": " + values;
-}
-
-std::string flag_list(const Answer& answer) {
-  std::string result;
-  for (const std::string& flag : answer.flags) result += (result.empty() ? "" : ", ") + flag;
-  return result;
-}
-
-std::string held_sentence(const Answer& answer, const LimitSet& set) {
-  const bool held = std::any_of(answer.limits.begin(), answer.limits.end(), [](const auto& each) { return each.held; });
-  const std::optional<Range> range = set.teff_range();
-  if (!held || !range) return "";
-  return fmt::format(
-      "Held: this Teff is outside the fitted {}\u2013{} K, so limits are those at the end of that range.",
-      short_number(range->low), short_number(range->high));
 }
 
 std::string source_sentence(const LimitSet& set) {
@@ -142,13 +141,13 @@ std::string bounds_page(const ListRow& row, const Answer& answer, const Settings
   HZ_REQUIRE(settings.limits != nullptr && answer.status == Status::answered);
   const LimitSet& set = *settings.limits;
   const auto paragraph = [&](const std::string& text) { return text.empty() ? "" : wrapped(text, width) + "\n"; };
-  const std::string exact = exact_values(row), flags = flag_list(answer);
+  const std::string exact = exact_values(row);
   std::string result = console.styled(wrapped(first_sentence(answer, set), width), Style::strong) + "\n";
   result += paragraph(star_line(row, answer)) + "\n" + limit_table(answer, set).text(console) + "\n";
   result += paragraph(source_sentence(set)) + paragraph(set.warning.empty() ? "" : "Warning: " + set.warning);
-  result += paragraph(held_sentence(answer, set));
   result += paragraph(exact.empty() ? "" : "Taken as exact, being typed without half-widths: " + exact + ".");
-  return result + paragraph(flags.empty() ? "" : "Flags: " + flags + ".");
+  for (const std::string& flag : answer.flags) result += paragraph(flag_sentence(flag));
+  return result;
 }
 
 }  // namespace hz::app

@@ -77,7 +77,7 @@ int answer_list(const Arguments& arguments, const Settings& settings, Console& c
   OpenList list = open_list(arguments.words().front(), arguments, star_inputs());
   const Tally tally = write_list(list, settings, arguments, console);
   for (const std::string& line : tally.lines()) console.say(line);
-  console.say("limits: " + settings.limits->key + ", " + settings.limits->citation);
+  console.say(settings_line(settings));
   return arguments.has("strict") && tally.set_aside() > 0 ? exit_code::rows_set_aside : exit_code::done;
 }
 

@@ -4,6 +4,7 @@
 #include "aligned_table.hpp"
 #include "column_map_text.hpp"
 #include "commands.hpp"
+#include "files.hpp"
 #include "hz/atomic_file.hpp"
 #include "hz/measured_text.hpp"
 #include "job_needs.hpp"
@@ -14,6 +15,7 @@ namespace hz::app {
 namespace {
 
 constexpr std::size_t shown_values = 3;
+constexpr std::size_t widest_value = 24;
 
 /// The first few cells that hold something, as the file has them.
 std::string first_values(const std::optional<Chunk>& chunk, std::size_t column) {
@@ -23,7 +25,7 @@ std::string first_values(const std::optional<Chunk>& chunk, std::size_t column) 
     if (chunk->row_problems[row]) continue;
     const std::string text = chunk->text(column, row);
     if (is_missing(text)) continue;
-    result += (result.empty() ? "" : "; ") + text;
+    result += (result.empty() ? "" : "; ") + shortened(printable(text), widest_value);
     ++shown;
   }
   return result;
@@ -33,24 +35,30 @@ std::string unit_text(const UnderstoodColumn& column) {
   return column.unit.empty() ? "" : column.unit + (column.unit_assumed ? " (assumed)" : "");
 }
 
+std::string shown_name(const ColumnHead& column) { return column.name.empty() ? "(no name)" : column.name; }
+
 AlignedTable column_table(const TableHead& head, const Understanding& understanding,
                           const std::optional<Chunk>& chunk) {
-  AlignedTable table({{"column"}, {"taken for"}, {"unit"}, {"known by"}, {"first values"}});
+  AlignedTable table({{"column"}, {"taken for"}, {"unit"}, {"known by"}, {"first values"}}, "");
   for (const UnderstoodColumn& column : understanding.columns())
-    table.add({head.columns[column.column].name, canonical_name(column.quantity, column.part), unit_text(column),
+    table.add({shown_name(head.columns[column.column]), canonical_name(column.quantity, column.part), unit_text(column),
                std::string(text(column.known_by)), first_values(chunk, column.column)});
   for (const std::size_t column : understanding.others())
-    table.add({head.columns[column].name, "", "", "", first_values(chunk, column)}, Style::faint);
+    table.add({shown_name(head.columns[column]), "", "", "", first_values(chunk, column)}, Style::faint);
   return table;
 }
 
-std::string doubt_text(const TableHead& head, const Doubt& doubt, std::size_t width) {
-  std::string result =
-      wrapped(fmt::format("In doubt: {}: {}. A map line settles it:", head.columns[doubt.column].name, doubt.what),
-              width) +
-      "\n";
-  for (const std::string& line : doubt.map_lines) result += "  " + line + "\n";
+std::string doubt_text(const Doubt& doubt, std::size_t width) {
+  const char* const tail =
+      doubt.map_lines.size() == 1 ? "this map line settles it" : "one of these map lines settles it";
+  std::string result = wrapped(fmt::format("In doubt: {}; {}:", printable(doubt.what), tail), width) + "\n";
+  for (const std::string& line : doubt.map_lines) result += "  " + printable(line) + "\n";
   return result;
+}
+
+void write_map(const std::string& path, const TableHead& head, const Understanding& understanding) {
+  refuse_to_replace(path);
+  write_file(path, column_map_text(head, understanding));
 }
 
 }  // namespace
@@ -60,12 +68,14 @@ int run_columns(const Arguments& arguments, Console& console) {
   const TableHead& head = list.reader->head();
   const std::optional<Chunk> chunk = list.reader->next();
   const std::size_t width = terminal_width();
-  if (const auto map = arguments.value("write")) write_file(*map, column_map_text(head, list.understanding));
+  if (const auto map = arguments.value("write")) write_map(*map, head, list.understanding);
   console.print(fmt::format("{}: {} of {} columns understood\n\n", head.source, list.understanding.columns().size(),
                             head.columns.size()));
   console.print(column_table(head, list.understanding, chunk).text(console) + "\n");
-  for (const Doubt& doubt : list.understanding.doubts()) console.print(doubt_text(head, doubt, width) + "\n");
-  for (const std::string& line : what_is_missing(list.understanding)) console.print(wrapped(line, width) + "\n");
+  for (const Doubt& doubt : list.understanding.doubts()) console.print(doubt_text(doubt, width) + "\n");
+  const Understanding for_stars = Understanding::draft(head, list.map, star_inputs());
+  console.print(wrapped(missing_for_stars(for_stars), width) + "\n");
+  console.print(wrapped(missing_for_planets(list.understanding), width) + "\n");
   return exit_code::done;
 }
 

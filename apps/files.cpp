@@ -40,4 +40,10 @@ void refuse_to_overwrite(const std::string& input, const std::string& output) {
   throw Error(Fault::usage, fmt::format("{} is the input; name another file after -o, or it would be lost", output));
 }
 
+void refuse_to_replace(const std::string& path) {
+  std::error_code no_such_file;
+  if (!std::filesystem::is_regular_file(path, no_such_file)) return;
+  throw Error(Fault::output, fmt::format("{} exists already and may have been edited; name a new file", path));
+}
+
 }  // namespace hz::app

@@ -10,4 +10,7 @@ namespace hz::app {
 /// Throws hz::Error (usage) when `output` is the very file that `input` names: it would be lost.
 void refuse_to_overwrite(const std::string& input, const std::string& output);
 
+/// Throws hz::Error (output) when a plain file stands at `path`: it may hold work done by hand.
+void refuse_to_replace(const std::string& path);
+
 }  // namespace hz::app

@@ -5,6 +5,7 @@
 #include <algorithm>
 #include <array>
 #include <span>
+#include <vector>
 
 namespace hz::app {
 namespace {
@@ -51,12 +52,16 @@ std::string words(const Need& need) {
   return fmt::format("{} ({})", need.what, result);
 }
 
-std::string missing_for(const char* commands, std::span<const Need> needs, const Understanding& understanding) {
+std::string missing_for(const char* commands, std::span<const Need> needs, const Understanding& draft) {
   std::string missing;
   for (const Need& need : needs) {
-    if (!met(need, understanding)) missing += (missing.empty() ? " misses " : "; ") + words(need);
+    if (!met(need, draft)) missing += (missing.empty() ? " misses " : "; ") + words(need);
   }
-  return fmt::format("{}{}.", commands, missing.empty() ? " has all it needs" : missing);
+  const auto& doubts = draft.doubts();
+  const bool stops = std::any_of(doubts.begin(), doubts.end(), [](const Doubt& doubt) { return doubt.blocks; });
+  if (missing.empty() && !stops) missing = " has all it needs";
+  const std::string stop = stops ? " stops until the columns in doubt are settled" : "";
+  return commands + missing + (missing.empty() || stop.empty() ? "" : ", and") + stop + ".";
 }
 
 /// Insolation, or a scaled axis with Teff, places a planet without the star's luminosity.
@@ -66,11 +71,14 @@ bool luminosity_is_spared(const Understanding& understanding) {
 
 }  // namespace
 
-std::vector<std::string> what_is_missing(const Understanding& understanding) {
-  std::vector<Need> for_planets = {planet_need, teff_need, orbit_need};
-  if (!luminosity_is_spared(understanding)) for_planets.push_back(luminosity_need);
-  return {missing_for("`bounds`", std::array{teff_need, luminosity_need}, understanding),
-          missing_for("`rank` (also `check`, `draw`)", for_planets, understanding)};
+std::string missing_for_stars(const Understanding& draft) {
+  return missing_for("`bounds`", std::array{teff_need, luminosity_need}, draft);
+}
+
+std::string missing_for_planets(const Understanding& draft) {
+  std::vector<Need> needs = {planet_need, teff_need, orbit_need};
+  if (!luminosity_is_spared(draft)) needs.push_back(luminosity_need);
+  return missing_for("`rank` (also `check`, `draw`)", needs, draft);
 }
 
 }  // namespace hz::app

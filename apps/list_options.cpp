@@ -70,16 +70,14 @@ std::span<const Option> writing_options() { return writing_table; }
 OpenList open_list(const std::string& path, const Arguments& arguments, std::span<const Quantity> needed) {
   const std::optional<std::string> output = arguments.value("output");
   if (output && *output != "-" && path != "-") refuse_to_overwrite(path, *output);
-  const ColumnMap map = column_map(arguments);
-  OpenList list{open_table(path), {}};
-  list.understanding = Understanding::of(list.reader->head(), map, needed);
+  OpenList list{column_map(arguments), open_table(path), {}};
+  list.understanding = Understanding::of(list.reader->head(), list.map, needed);
   return list;
 }
 
 OpenList open_draft(const std::string& path, const Arguments& arguments) {
-  const ColumnMap map = column_map(arguments);
-  OpenList list{open_table(path), {}};
-  list.understanding = Understanding::draft(list.reader->head(), map);
+  OpenList list{column_map(arguments), open_table(path), {}};
+  list.understanding = Understanding::draft(list.reader->head(), list.map);
   return list;
 }
 

@@ -17,6 +17,7 @@ namespace hz::app {
 
 /// A list, opened and understood.
 struct OpenList {
+  ColumnMap map;
   std::unique_ptr<TableReader> reader;
   Understanding understanding;
 };

@@ -173,4 +173,11 @@ Choices read_choices(const Arguments& arguments) {
   return choices;
 }
 
+std::string settings_line(const Settings& settings) {
+  return fmt::format("limits: {}, {}; {} beyond the fitted range; asymmetric values: the number is the {}",
+                     settings.limits->key, settings.limits->citation,
+                     settings.beyond == BeyondRange::hold ? "held up to 300 K" : "refused",
+                     settings.asymmetry == Asymmetry::median ? "median" : "mode");
+}
+
 }  // namespace hz::app

@@ -31,6 +31,9 @@ struct Choices {
 /// Throws hz::Error: usage for a value that makes no sense, input for a bad --limits file.
 [[nodiscard]] Choices read_choices(const Arguments& arguments);
 
+/// What the answers rest on, in a line for the summary of a run: limit set, policy beyond its range, asymmetric values.
+[[nodiscard]] std::string settings_line(const Settings& settings);
+
 /// The parts of read_choices that read a whole phrase; for tests.
 [[nodiscard]] AssumedErrors read_assumed_errors(const std::string& text);
 [[nodiscard]] VerdictThresholds read_thresholds(const std::string& text);

@@ -83,6 +83,17 @@ std::string printable(std::string_view text) {
   return result;
 }
 
+std::string shortened(std::string_view text, std::size_t width) {
+  if (text_width(text) <= width) return std::string(text);
+  std::string result;
+  while (true) {
+    const std::string_view letter = text.substr(0, first_code_point(text).bytes);
+    if (text_width(result) + text_width(letter) + 1 > width) return result + "\u2026";
+    result += letter;
+    text.remove_prefix(letter.size());
+  }
+}
+
 std::string wrapped(std::string_view text, std::size_t width, std::size_t indent) {
   std::string result;
   std::size_t column = indent;

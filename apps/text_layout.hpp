@@ -12,6 +12,9 @@ namespace hz::app {
 /// `text` with control characters (which could steer a terminal) and broken UTF-8 replaced by U+FFFD.
 [[nodiscard]] std::string printable(std::string_view text);
 
+/// `text` cut to `width` columns, with "…" at its end where something was cut off.
+[[nodiscard]] std::string shortened(std::string_view text, std::size_t width);
+
 /// `text` in lines of at most `width` columns, broken at blanks; every line but the first starts with `indent` blanks,
 /// and the first is taken to start there too. A longer word has a line to itself. No newline at the end.
 [[nodiscard]] std::string wrapped(std::string_view text, std::size_t width, std::size_t indent = 0);

@@ -53,7 +53,8 @@ TEST(Commands, OptionNamesAndLettersAreUnique) {
     std::set<char> letters;
     for (const Option& option : command.options) {
       EXPECT_TRUE(names.insert(option.name).second) << command.name << " --" << option.name;
-      EXPECT_TRUE(option.letter == '\0' || letters.insert(option.letter).second) << command.name << " -" << option.letter;
+      EXPECT_TRUE(option.letter == '\0' || letters.insert(option.letter).second)
+          << command.name << " -" << option.letter;
       EXPECT_EQ(option.placeholder.empty(), option.kind == OptionKind::flag) << option.name;
     }
   }

@@ -27,7 +27,8 @@ TEST(TypedValue, WithHalfWidthsOrAsLimitIsNot) {
 }
 
 TEST(TypedValue, UnitWordIsConverted) {
-  EXPECT_DOUBLE_EQ(typed_value("planet-radius", Quantity::planet_radius, "1 RJ").value, constants::jupiter_in_earth_radii);
+  EXPECT_DOUBLE_EQ(typed_value("planet-radius", Quantity::planet_radius, "1 RJ").value,
+                   constants::jupiter_in_earth_radii);
 }
 
 TEST(TypedValue, TroubleNamesTheOption) {

@@ -80,13 +80,15 @@ TEST(Arguments, AskingForAnUnknownOptionIsABug) { EXPECT_THROW((void)read({"a"})
 TEST(OptionNumber, RefusesWhatIsNotAFiniteNumber) {
   EXPECT_EQ(option_number("albedo", "0.3"), 0.3);
   for (const char* const text : {"", "x", "nan", "inf", "1e999", "0.3x"})
-    EXPECT_THAT(usage_error([&] { (void)option_number("albedo", text); }), HasSubstr("--albedo needs a number")) << text;
+    EXPECT_THAT(usage_error([&] { (void)option_number("albedo", text); }), HasSubstr("--albedo needs a number"))
+        << text;
 }
 
 TEST(OptionCount, RefusesWhatIsNotAWholeNumber) {
   EXPECT_EQ(option_count("draws", "1000", 1), 1000U);
   for (const char* const text : {"0", "-5", "1.5", "1e3", "", "99999999999999999999999"})
-    EXPECT_THAT(usage_error([&] { (void)option_count("draws", text, 1); }), HasSubstr("--draws needs a whole number")) << text;
+    EXPECT_THAT(usage_error([&] { (void)option_count("draws", text, 1); }), HasSubstr("--draws needs a whole number"))
+        << text;
 }
 
 TEST(OptionWord, ListsWhatIsAllowed) {

@@ -94,7 +94,8 @@ TEST(AssumedErrors, RefusesSenselessWidths) {
 
 TEST(Thresholds, MustFall) {
   EXPECT_EQ(read_thresholds("0.9,0.6,0.4,0.1").inside, 0.9);
-  for (const char* const text : {"0.9,0.6,0.4", "0.9,0.6,0.4,0.1,0", "0.6,0.9,0.4,0.1", "1.2,0.6,0.4,0.1", "0.9,0.5,0.5,0.1"})
+  for (const char* const text :
+       {"0.9,0.6,0.4", "0.9,0.6,0.4,0.1,0", "0.6,0.9,0.4,0.1", "1.2,0.6,0.4,0.1", "0.9,0.5,0.5,0.1"})
     EXPECT_THAT(usage_error([&] { (void)read_thresholds(text); }), HasSubstr("four falling probabilities")) << text;
 }
 

@@ -15,9 +15,9 @@ TEST(TextWidth, CountsWhatIsSeen) {
 
 TEST(Printable, ReplacesWhatCouldSteerATerminal) {
   EXPECT_EQ(printable("a\x1b[31mb\n"), "a\uFFFD[31mb\uFFFD");
-  EXPECT_EQ(printable("\xC0\xAF"), "\uFFFD\uFFFD");      // an over-long slash
+  EXPECT_EQ(printable("\xC0\xAF"), "\uFFFD\uFFFD");            // an over-long slash
   EXPECT_EQ(printable("\xED\xA0\x80"), "\uFFFD\uFFFD\uFFFD");  // half of a surrogate pair
-  EXPECT_EQ(printable("a\u202Eb"), "a\uFFFDb");          // turns the direction of writing
+  EXPECT_EQ(printable("a\u202Eb"), "a\uFFFDb");                // turns the direction of writing
   EXPECT_EQ(printable("Kepler-22 b ±"), "Kepler-22 b ±");
 }
 
