@@ -1,0 +1,104 @@
+#include "list_options.hpp"
+
+#include <fmt/format.h>
+
+#include <algorithm>
+#include <array>
+
+#include "closest.hpp"
+#include "files.hpp"
+#include "hz/error.hpp"
+
+namespace hz::app {
+namespace {
+
+constexpr auto reading_table = std::to_array<Option>({
+    {"columns", '\0', OptionKind::value, "MAP.toml", OptionGroup::input,
+     "how the columns are to be understood; `hzmap columns LIST --write MAP.toml` writes one to edit"},
+});
+
+constexpr auto writing_table = std::to_array<Option>({
+    {"output", 'o', OptionKind::value, "FILE", OptionGroup::output,
+     "write the whole table to a file; - is standard output"},
+    {"keep", '\0', OptionKind::value, "COL,...", OptionGroup::output,
+     "columns of the list that travel along: their names, all or none (default none)"},
+    {"strict", '\0', OptionKind::flag, "", OptionGroup::output, "exit with 1 when any row was set aside"},
+});
+
+bool has_name(std::span<const std::string> names, const std::string& name) {
+  return std::find(names.begin(), names.end(), name) != names.end();
+}
+
+std::vector<std::string> names_of(const TableHead& head) {
+  std::vector<std::string> names;
+  for (const ColumnHead& column : head.columns) names.push_back(column.name);
+  return names;
+}
+
+KeptColumn keep_column(const TableHead& input, std::size_t column, std::span<const std::string> written) {
+  KeptColumn kept{column, input.columns[column]};
+  if (has_name(written, kept.head.name)) kept.head.name = "input_" + kept.head.name;
+  return kept;
+}
+
+std::vector<KeptColumn> keep_all(const TableHead& input, std::span<const std::string> written) {
+  std::vector<KeptColumn> result;
+  for (std::size_t column = 0; column < input.columns.size(); ++column) {
+    if (!has_name(written, input.columns[column].name)) result.push_back(keep_column(input, column, written));
+  }
+  return result;
+}
+
+std::size_t column_named(const std::string& name, const TableHead& input) {
+  const std::vector<std::string> names = names_of(input);
+  const auto found = std::find(names.begin(), names.end(), name);
+  if (found != names.end()) return static_cast<std::size_t>(found - names.begin());
+  throw Error(Fault::usage,
+              fmt::format("--keep: {} has no column {}{}", input.source, name, did_you_mean(name, names)));
+}
+
+ColumnMap column_map(const Arguments& arguments) {
+  const std::optional<std::string> file = arguments.value("columns");
+  return file ? ColumnMap::parse(read_text_file(*file), *file) : ColumnMap{};
+}
+
+}  // namespace
+
+std::span<const Option> reading_options() { return reading_table; }
+std::span<const Option> writing_options() { return writing_table; }
+
+OpenList open_list(const std::string& path, const Arguments& arguments, std::span<const Quantity> needed) {
+  const std::optional<std::string> output = arguments.value("output");
+  if (output && *output != "-" && path != "-") refuse_to_overwrite(path, *output);
+  const ColumnMap map = column_map(arguments);
+  OpenList list{open_table(path), {}};
+  list.understanding = Understanding::of(list.reader->head(), map, needed);
+  return list;
+}
+
+OpenList open_draft(const std::string& path, const Arguments& arguments) {
+  const ColumnMap map = column_map(arguments);
+  OpenList list{open_table(path), {}};
+  list.understanding = Understanding::draft(list.reader->head(), map);
+  return list;
+}
+
+std::vector<KeptColumn> kept_columns(const std::string& keep, const TableHead& input,
+                                     std::span<const std::string> written) {
+  if (keep == "none") return {};
+  if (keep == "all") return keep_all(input, written);
+  std::vector<KeptColumn> result;
+  for (std::size_t start = 0; start <= keep.size();) {
+    const std::size_t comma = std::min(keep.find(',', start), keep.size());
+    result.push_back(keep_column(input, column_named(keep.substr(start, comma - start), input), written));
+    start = comma + 1;
+  }
+  return result;
+}
+
+std::vector<KeptColumn> kept_columns(const Arguments& arguments, const TableHead& input,
+                                     std::span<const std::string> written) {
+  return kept_columns(arguments.value("keep").value_or("none"), input, written);
+}
+
+}  // namespace hz::app

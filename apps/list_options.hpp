@@ -1,0 +1,46 @@
+// The options of commands that read a list: how its columns are understood, what is written and where.
+#pragma once
+#include <memory>
+#include <optional>
+#include <span>
+#include <string>
+#include <vector>
+
+#include "hz/table/table.hpp"
+#include "hz/table/understanding.hpp"
+#include "options.hpp"
+
+namespace hz::app {
+
+[[nodiscard]] std::span<const Option> reading_options();  // --columns
+[[nodiscard]] std::span<const Option> writing_options();  // --output, --keep, --strict
+
+/// A list, opened and understood.
+struct OpenList {
+  std::unique_ptr<TableReader> reader;
+  Understanding understanding;
+};
+
+/// Opens the list at `path` ("-" is standard input) with the user's column map, if one is given. A doubt about a column
+/// of a `needed` quantity stops the work. Throws hz::Error: input, or usage for an -o that names the list itself.
+[[nodiscard]] OpenList open_list(const std::string& path, const Arguments& arguments, std::span<const Quantity> needed);
+
+/// The same, doubtful columns being left unused: for telling how a list is understood.
+[[nodiscard]] OpenList open_draft(const std::string& path, const Arguments& arguments);
+
+/// A column of the input that travels along.
+struct KeptColumn {
+  std::size_t column = 0;  // index in the input's head
+  ColumnHead head;         // its name has "input_" in front where the output has a column of that name already
+};
+
+/// What --keep asks for. `all` leaves out the columns whose name the output has already.
+/// Throws hz::Error (usage) that offers the closest name for a column the input does not have.
+[[nodiscard]] std::vector<KeptColumn> kept_columns(const Arguments& arguments, const TableHead& input,
+                                                   std::span<const std::string> written);
+
+/// The part of kept_columns behind the option's value; for tests.
+[[nodiscard]] std::vector<KeptColumn> kept_columns(const std::string& keep, const TableHead& input,
+                                                   std::span<const std::string> written);
+
+}  // namespace hz::app

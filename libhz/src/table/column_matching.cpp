@@ -1,0 +1,152 @@
+#include "table/column_matching.hpp"
+
+#include <fmt/format.h>
+
+#include <algorithm>
+#include <map>
+#include <set>
+#include <utility>
+
+#include "hz/error.hpp"
+#include "hz/units.hpp"
+#include "table/header_words.hpp"
+#include "words.hpp"
+
+namespace hz {
+namespace {
+
+// The unit a description states: what stands in its first square brackets.
+std::string bracketed_unit(std::string_view description) {
+  const auto open = description.find('[');
+  const auto close = description.find(']', open);
+  if (open == std::string_view::npos || close == std::string_view::npos) return {};
+  return std::string(words::trimmed(description.substr(open + 1, close - open - 1)));
+}
+
+Candidate candidate(std::size_t column, HeaderMatch match, KnownBy known_by) {
+  return {column,   match.quantity, match.part, std::move(match.unit), match.unit_known, known_by, std::move(match.base), std::move(match.meanings)};
+}
+
+class Matching {
+public:
+  Matching(const TableHead& head, const ColumnMap& map) : head_(head), map_(map), descriptions_(descriptions(head)) {}
+
+  std::vector<Candidate> all() {
+    take_mapped();
+    take_ignored();
+    learn_from_values();
+    for (std::size_t i = 0; i < head_.columns.size(); ++i) {
+      if (taken_.contains(i)) continue;
+      if (auto found = match(i)) candidates_.push_back(*std::move(found));
+    }
+    return std::move(candidates_);
+  }
+
+private:
+  std::size_t column_named(const std::string& column, const std::string& place) const {
+    for (std::size_t i = 0; i < head_.columns.size(); ++i) {
+      if (head_.columns[i].name == column) return i;
+    }
+    throw Error(Fault::input, fmt::format("{}: {} has no column named {}; write its header as the file spells it", place, head_.source, words::quoted(column)));
+  }
+
+  void take_mapped() {
+    for (const auto& entry : map_.entries) {
+      const auto column = column_named(entry.column, entry.place);
+      if (!taken_.insert(column).second) {
+        throw Error(Fault::input, fmt::format("{}: column {} stands in the map twice", entry.place, words::quoted(entry.column)));
+      }
+      candidates_.push_back(mapped(entry, column));
+      if (entry.part == ColumnPart::value) words_.learn(entry.column, entry.quantity);
+    }
+  }
+
+  Candidate mapped(const ColumnMap::Entry& entry, std::size_t column) const {
+    Candidate out{column, entry.quantity, entry.part, entry.unit, true, KnownBy::map, words::folded(entry.column), {}};
+    if (!entry.unit.empty() || !is_numeric(entry.quantity)) return out;
+    // The file's own unit counts where the map says none; one that does not fit is an error as elsewhere.
+    out.unit = unit_in_file(column);
+    out.unit_known = conversion(entry.quantity, out.unit).has_value();
+    return out;
+  }
+
+  std::string unit_in_file(std::size_t column) const {
+    if (!head_.columns[column].unit.empty()) return head_.columns[column].unit;
+    const auto in_header = bracketed_unit(head_.columns[column].name);
+    return in_header.empty() ? bracketed_unit(descriptions_[column]) : in_header;
+  }
+
+  void take_ignored() {
+    for (const auto& ignored : map_.ignored) taken_.insert(column_named(ignored.column, ignored.place));
+  }
+
+  // A value told by its unit ("R [Rsun]", "Lum [dex]") lends its words to its half-widths ("R err").
+  void learn_from_values() {
+    std::map<std::string, std::set<Quantity>> meanings;
+    for (std::size_t i = 0; i < head_.columns.size(); ++i) {
+      const auto found = taken_.contains(i) ? std::nullopt : match(i);
+      if (found && found->part == ColumnPart::value && found->meanings.empty()) meanings[found->base].insert(found->quantity);
+    }
+    for (const auto& [base, quantities] : meanings) {
+      if (quantities.size() == 1) words_.learn(base, *quantities.begin());
+    }
+  }
+
+  std::optional<Candidate> match(std::size_t i) const {
+    const auto& column = head_.columns[i];
+    const auto unit = column.unit.empty() ? bracketed_unit(descriptions_[i]) : column.unit;
+    if (auto found = words_.match_canonical(column.name, unit)) return candidate(i, *std::move(found), KnownBy::name);
+    if (auto found = prefixed(column.name, unit)) return candidate(i, *std::move(found), KnownBy::words);
+    auto by_header = words_.match(column.name, unit);
+    if (by_header && by_header->meanings.empty()) return candidate(i, *std::move(by_header), KnownBy::words);
+    if (auto found = words_.match(descriptions_[i], column.unit)) return candidate(i, *std::move(found), KnownBy::comment);
+    if (by_header) return candidate(i, *std::move(by_header), KnownBy::words);
+    return std::nullopt;
+  }
+
+  std::optional<HeaderMatch> prefixed(std::string_view header, std::string_view unit) const {
+    if (!header.starts_with("e_") && !header.starts_with("E_") && !header.starts_with("l_")) return std::nullopt;
+    for (const auto& other : head_.columns) {
+      if (other.name == header.substr(2)) return words_.match_prefixed(header.front(), other.name, unit);
+    }
+    return std::nullopt;
+  }
+
+  const TableHead& head_;
+  const ColumnMap& map_;
+  std::vector<std::string> descriptions_;
+  HeaderWords words_;
+  std::set<std::size_t> taken_;
+  std::vector<Candidate> candidates_;
+};
+
+// "COLUMN pl_rade:  Planet Radius [Earth Radius]" and "pl_rade: Planet Radius" both describe the column pl_rade.
+bool describes(std::string_view before_colon, std::string_view column) {
+  if (column.empty() || !before_colon.ends_with(column)) return false;
+  const auto rest = before_colon.substr(0, before_colon.size() - column.size());
+  return rest.empty() || rest.back() == ' ' || rest.back() == '\t';
+}
+
+std::string described_in_comments(const TableHead& head, std::string_view column) {
+  for (const auto& comment : head.comments) {
+    const auto colon = comment.find(':');
+    if (colon == std::string::npos) continue;
+    const auto text = std::string_view(comment);
+    if (describes(words::trimmed(text.substr(0, colon)), column)) return std::string(words::trimmed(text.substr(colon + 1)));
+  }
+  return {};
+}
+
+}  // namespace
+
+std::vector<Candidate> match_columns(const TableHead& head, const ColumnMap& map) { return Matching(head, map).all(); }
+
+std::vector<std::string> descriptions(const TableHead& head) {
+  std::vector<std::string> out;
+  for (const auto& column : head.columns) {
+    out.push_back(column.description.empty() ? described_in_comments(head, column.name) : column.description);
+  }
+  return out;
+}
+
+}  // namespace hz

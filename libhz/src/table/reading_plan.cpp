@@ -1,0 +1,248 @@
+#include "table/reading_plan.hpp"
+
+#include <fmt/format.h>
+
+#include <algorithm>
+#include <array>
+#include <charconv>
+#include <cmath>
+#include <utility>
+
+#include "hz/measured_text.hpp"
+#include "hz/require.hpp"
+#include "words.hpp"
+
+namespace hz {
+namespace {
+
+constexpr auto star_fields = std::to_array<std::pair<Quantity, Field StarRecord::*>>({
+    {Quantity::teff, &StarRecord::teff},
+    {Quantity::luminosity, &StarRecord::luminosity},
+    {Quantity::log_luminosity, &StarRecord::log_luminosity},
+    {Quantity::stellar_radius, &StarRecord::stellar_radius},
+    {Quantity::stellar_mass, &StarRecord::stellar_mass},
+    {Quantity::log_g, &StarRecord::log_g},
+    {Quantity::distance, &StarRecord::distance},
+});
+
+constexpr auto planet_fields = std::to_array<std::pair<Quantity, Field PlanetRecord::*>>({
+    {Quantity::orbital_period, &PlanetRecord::orbital_period},
+    {Quantity::semi_major_axis, &PlanetRecord::semi_major_axis},
+    {Quantity::scaled_semi_major_axis, &PlanetRecord::scaled_semi_major_axis},
+    {Quantity::eccentricity, &PlanetRecord::eccentricity},
+    {Quantity::insolation, &PlanetRecord::insolation},
+    {Quantity::planet_radius, &PlanetRecord::planet_radius},
+    {Quantity::planet_mass, &PlanetRecord::planet_mass},
+    {Quantity::min_mass, &PlanetRecord::min_mass},
+});
+
+bool holds(std::string_view text, std::string_view word) { return text.find(word) != std::string_view::npos; }
+
+// "Mass", "Msini", "Msin(i)/sin(i)", "M-R relationship" and their like. What is neither stays unsaid.
+PlanetMassKind mass_kind(std::string_view text) {
+  const auto kind = words::folded(text);
+  if (holds(kind, "relation") || holds(kind, "radius") || kind == "mr") return PlanetMassKind::from_radius;
+  if (kind == "msinisini" || kind == "masssinisini") return PlanetMassKind::measured;
+  if (holds(kind, "sini") || holds(kind, "minimum") || kind == "minmass" || kind == "min") return PlanetMassKind::minimum;
+  if (kind == "mass" || kind == "truemass" || holds(kind, "measured") || holds(kind, "dynamical")) return PlanetMassKind::measured;
+  return PlanetMassKind::unsaid;
+}
+
+std::optional<bool> yes_or_no(std::string_view text) {
+  const auto word = words::lower_case(words::trimmed(text));
+  if (word == "1" || word == "true" || word == "yes" || word == "y") return true;
+  if (word == "0" || word == "false" || word == "no" || word == "n") return false;
+  return std::nullopt;
+}
+
+std::optional<int> whole_number(std::string_view text) {
+  const auto number = parse_number(text);
+  if (!number || *number != std::floor(*number) || *number < 0 || *number > 1000) return std::nullopt;
+  return static_cast<int>(*number);
+}
+
+Problem problem(const std::string& column, const std::string& what, ProblemCode code = ProblemCode::unreadable) {
+  return {code, column, column + ' ' + what};
+}
+
+// How many units of the value's column one unit of the half-width's is.
+double ratio(const Conversion& half_width, const Conversion& value) {
+  if (half_width.kind == ConversionKind::offset) return 1;
+  return half_width.kind == ConversionKind::reciprocal ? value.number / half_width.number : half_width.number / value.number;
+}
+
+bool is_finite(const Measured& measured) {
+  return std::isfinite(measured.value) && std::isfinite(measured.minus.value_or(0)) && std::isfinite(measured.plus.value_or(0));
+}
+
+}  // namespace
+
+// A cell as text, or as the number a binary format holds; empty where there is no value.
+struct ReadingPlan::Cell {
+  std::string_view text;
+  std::optional<double> number;
+  [[nodiscard]] bool empty() const { return text.empty() && !number; }
+};
+
+ReadingPlan::ReadingPlan(const TableHead& head, const std::vector<UnderstoodColumn>& columns, const std::vector<std::string>& missing_values) {
+  for (const auto& column : head.columns) headers_.push_back(column.name);
+  for (const auto& text : missing_values) missing_.push_back(words::lower_case(words::trimmed(text)));
+  for (const auto& column : columns) {
+    if (column.part == ColumnPart::value) add(column);
+  }
+  for (const auto& column : columns) {
+    if (column.part != ColumnPart::value) add(column);
+  }
+}
+
+void ReadingPlan::add(const UnderstoodColumn& column) {
+  auto& choices = choices_[static_cast<std::size_t>(column.quantity)];
+  if (choices.size() <= column.choice) choices.resize(column.choice + 1);
+  auto& choice = choices[column.choice];
+  const auto conversion = hz::conversion(column.quantity, column.unit);
+  const Side side{column.column, column.unit_assumed ? std::nullopt : conversion};
+  switch (column.part) {
+    case ColumnPart::value:
+      choice.column = column.column;
+      choice.conversion = conversion.value_or(Conversion{});
+      break;
+    case ColumnPart::half_width: choice.half_width = side; break;
+    case ColumnPart::upper_half_width: choice.upper_half_width = side; break;
+    case ColumnPart::lower_half_width: choice.lower_half_width = side; break;
+    case ColumnPart::lower_bound: choice.lower_bound = side; break;
+    case ColumnPart::upper_bound: choice.upper_bound = side; break;
+    case ColumnPart::limit_mark: choice.limit_mark = column.column; break;
+    case ColumnPart::route: choice.route = column.column; break;
+  }
+}
+
+bool ReadingPlan::is_no_value(std::string_view text) const {
+  if (is_missing(text)) return true;
+  return !missing_.empty() && std::find(missing_.begin(), missing_.end(), words::lower_case(text)) != missing_.end();
+}
+
+ReadingPlan::Cell ReadingPlan::cell(const Chunk& chunk, std::size_t row, std::size_t column) const {
+  const auto& cells = chunk.columns[column];
+  if (const auto* const texts = std::get_if<std::vector<std::string_view>>(&cells)) {
+    const auto text = words::trimmed((*texts)[row]);
+    return is_no_value(text) ? Cell{} : Cell{text, {}};
+  }
+  if (const auto* const numbers = std::get_if<std::vector<double>>(&cells)) {
+    return std::isnan((*numbers)[row]) ? Cell{} : Cell{{}, (*numbers)[row]};
+  }
+  const auto& whole = std::get<std::vector<std::optional<std::int64_t>>>(cells)[row];
+  return whole ? Cell{{}, static_cast<double>(*whole)} : Cell{};
+}
+
+std::string ReadingPlan::text(const Chunk& chunk, std::size_t row, Quantity quantity) const {
+  for (const auto& choice : choices(quantity)) {
+    if (!cell(chunk, row, choice.column).empty()) return std::string(words::trimmed(chunk.text(choice.column, row)));
+  }
+  return {};
+}
+
+Field ReadingPlan::field(const Chunk& chunk, std::size_t row, Quantity quantity) const {
+  for (const auto& choice : choices(quantity)) {
+    if (auto found = chosen(chunk, row, quantity, choice)) return *std::move(found);
+  }
+  return {};
+}
+
+// nullopt when this choice says nothing in this row.
+std::optional<Field> ReadingPlan::chosen(const Chunk& chunk, std::size_t row, Quantity quantity, const Choice& choice) const {
+  const auto value = cell(chunk, row, choice.column);
+  if (value.empty()) return std::nullopt;
+  const auto& header = headers_[choice.column];
+  if (choice.route) {
+    const auto route = cell(chunk, row, *choice.route);
+    if (!route.empty() && route.text != "stated") return Field{};
+  }
+  const auto parsed = value.number ? Result<MeasuredText>(MeasuredText{Measured{*value.number, {}, {}, LimitMark::none, false}, {}}) : parse_measured(value.text, header);
+  if (!parsed) return Field{{}, parsed.error()};
+  auto conversion = std::optional(choice.conversion);
+  if (!parsed->unit.empty()) conversion = hz::conversion(quantity, parsed->unit);
+  if (!conversion) return Field{{}, problem(header, fmt::format("holds {}, whose unit is not one of {}", words::quoted(value.text), name(quantity)))};
+  const auto measured = with_sides(chunk, row, parsed->measured, choice, *conversion);
+  if (!measured) return Field{{}, measured.error()};
+  const auto shown = words::quoted(chunk.text(choice.column, row));
+  if (conversion->kind == ConversionKind::reciprocal && measured->value <= 0) {
+    return Field{{}, problem(header, fmt::format("holds {}, and a parallax that is not above 0 gives no distance", shown), ProblemCode::out_of_range)};
+  }
+  const auto converted = convert(*measured, *conversion);
+  if (!is_finite(converted)) return Field{{}, problem(header, fmt::format("holds {}, which is not a finite value", shown))};
+  return Field{converted, {}};
+}
+
+// Half-widths written in the cell itself win over those of other columns.
+Result<Measured> ReadingPlan::with_sides(const Chunk& chunk, std::size_t row, Measured measured, const Choice& choice,
+                                         const Conversion& conversion) const {
+  if (choice.limit_mark && measured.limit == LimitMark::none) {
+    const auto mark = limit(chunk, row, *choice.limit_mark);
+    if (!mark) return mark.error();
+    measured.limit = *mark;
+  }
+  if (measured.plus) return measured;
+  const auto both = side(chunk, row, choice.half_width, conversion);
+  const auto plus = side(chunk, row, choice.upper_half_width, conversion);
+  const auto minus = side(chunk, row, choice.lower_half_width, conversion);
+  const auto lower = side(chunk, row, choice.lower_bound, conversion);
+  const auto upper = side(chunk, row, choice.upper_bound, conversion);
+  for (const auto* const read : {&both, &plus, &minus, &lower, &upper}) {
+    if (!*read) return read->error();
+  }
+  measured.plus = *plus ? *plus : *both;
+  // A lower half-width is often printed with its sign.
+  measured.minus = *minus ? std::optional(std::abs(**minus)) : *both;
+  if (!measured.plus && *upper) measured.plus = **upper - measured.value;
+  if (!measured.minus && *lower) measured.minus = measured.value - **lower;
+  if (measured.plus.value_or(0) >= 0 && measured.minus.value_or(0) >= 0) return measured;
+  return problem(headers_[choice.column], fmt::format("holds {} with a half-width below 0, or a bound on the wrong side of it",
+                                                      words::quoted(chunk.text(choice.column, row))));
+}
+
+// The number of a half-width or bound column in the unit of its value; empty when there is none.
+Result<std::optional<double>> ReadingPlan::side(const Chunk& chunk, std::size_t row, const std::optional<Side>& side,
+                                                const Conversion& conversion) const {
+  if (!side) return std::optional<double>();
+  const auto content = cell(chunk, row, side->column);
+  if (content.empty()) return std::optional<double>();
+  const auto number = content.number ? content.number : parse_number(content.text);
+  if (!number || !std::isfinite(*number)) {
+    return problem(headers_[side->column], fmt::format("holds {}, which is not a number", words::quoted(content.text)));
+  }
+  return std::optional(*number * (side->own ? ratio(*side->own, conversion) : 1));
+}
+
+Result<LimitMark> ReadingPlan::limit(const Chunk& chunk, std::size_t row, std::size_t column) const {
+  const auto mark = cell(chunk, row, column);
+  if (mark.empty() || mark.text == "=") return LimitMark::none;
+  if (mark.text == "<") return LimitMark::upper;
+  if (mark.text == ">") return LimitMark::lower;
+  const auto code = mark.number ? mark.number : parse_number(mark.text);
+  if (code == 0) return LimitMark::none;
+  if (code == 1) return LimitMark::upper;
+  if (code == -1) return LimitMark::lower;
+  return problem(headers_[column], fmt::format("holds {}, which is not one of 1, 0, -1, < and >", words::quoted(chunk.text(column, row))));
+}
+
+ListRow ReadingPlan::read(const Chunk& chunk, std::size_t row) const {
+  HZ_REQUIRE(row < chunk.rows() && chunk.columns.size() == headers_.size());
+  ListRow out;
+  out.number = chunk.first_row + row;
+  out.line = chunk.lines.empty() ? 0 : chunk.lines[row];
+  out.problem = chunk.row_problems[row];
+  if (out.problem) return out;
+  out.star.name = text(chunk, row, Quantity::star);
+  out.star.id = text(chunk, row, Quantity::star_id);
+  out.star.spectral_type = text(chunk, row, Quantity::spectral_type);
+  out.star.number_of_stars = whole_number(text(chunk, row, Quantity::number_of_stars));
+  for (const auto& [quantity, field] : star_fields) out.star.*field = this->field(chunk, row, quantity);
+  out.planet.name = text(chunk, row, Quantity::planet);
+  for (const auto& [quantity, field] : planet_fields) out.planet.*field = this->field(chunk, row, quantity);
+  out.planet.planet_mass_kind = mass_kind(text(chunk, row, Quantity::planet_mass_kind));
+  out.planet.adopted = yes_or_no(text(chunk, row, Quantity::adopted));
+  out.reference = text(chunk, row, Quantity::reference);
+  return out;
+}
+
+}  // namespace hz

@@ -1,0 +1,55 @@
+// How rows become records: worked out once for a head, used for every row.
+#pragma once
+#include <array>
+#include <cstddef>
+#include <optional>
+#include <string>
+#include <vector>
+
+#include "hz/records.hpp"
+#include "hz/table/understanding.hpp"
+#include "hz/units.hpp"
+
+namespace hz {
+
+class ReadingPlan {
+public:
+  ReadingPlan(const TableHead& head, const std::vector<UnderstoodColumn>& columns, const std::vector<std::string>& missing_values);
+
+  [[nodiscard]] ListRow read(const Chunk& chunk, std::size_t row) const;
+
+private:
+  // A half-width or bound; without a conversion of its own it is in the unit of its value.
+  struct Side {
+    std::size_t column = 0;
+    std::optional<Conversion> own;
+  };
+  // One value column and what belongs to it.
+  struct Choice {
+    std::size_t column = 0;
+    Conversion conversion;
+    std::optional<Side> half_width, upper_half_width, lower_half_width, lower_bound, upper_bound;
+    std::optional<std::size_t> limit_mark, route;
+  };
+  struct Cell;
+
+  void add(const UnderstoodColumn& column);
+  [[nodiscard]] const std::vector<Choice>& choices(Quantity quantity) const { return choices_[static_cast<std::size_t>(quantity)]; }
+
+  [[nodiscard]] Cell cell(const Chunk& chunk, std::size_t row, std::size_t column) const;
+  [[nodiscard]] std::string text(const Chunk& chunk, std::size_t row, Quantity quantity) const;
+  [[nodiscard]] Field field(const Chunk& chunk, std::size_t row, Quantity quantity) const;
+  [[nodiscard]] std::optional<Field> chosen(const Chunk& chunk, std::size_t row, Quantity quantity, const Choice& choice) const;
+  [[nodiscard]] Result<Measured> with_sides(const Chunk& chunk, std::size_t row, Measured measured, const Choice& choice,
+                                            const Conversion& conversion) const;
+  [[nodiscard]] Result<std::optional<double>> side(const Chunk& chunk, std::size_t row, const std::optional<Side>& side,
+                                                   const Conversion& conversion) const;
+  [[nodiscard]] Result<LimitMark> limit(const Chunk& chunk, std::size_t row, std::size_t column) const;
+  [[nodiscard]] bool is_no_value(std::string_view text) const;
+
+  std::vector<std::string> headers_;
+  std::vector<std::string> missing_;  // trimmed, lower case
+  std::array<std::vector<Choice>, static_cast<std::size_t>(Quantity::note) + 1> choices_;
+};
+
+}  // namespace hz
