@@ -35,7 +35,8 @@ std::vector<ListRow> rows_of(const Chunk& chunk, const Understanding& understand
   std::vector<ListRow> rows;
   for (std::size_t i = 0; i < chunk.rows(); ++i) {
     rows.push_back(understanding.row(chunk, i));
-    for (const KeptColumn& column : kept) rows.back().kept.push_back(chunk.text(column.column, i));
+    for (const KeptColumn& column : kept)
+      rows.back().kept.push_back(chunk.row_problems[i] ? "" : chunk.text(column.column, i));
   }
   return rows;
 }
@@ -69,6 +70,7 @@ Tally write_list(OpenList& list, const Settings& settings, const Arguments& argu
     progress.update(tally.read());
   }
   stop_if_asked();
+  if (tally.read() == 0) throw Error(Fault::input, list.reader->head().source + " has a header but no rows");
   writer->finish();
   return tally;
 }

@@ -8,6 +8,7 @@
 #include "hz/error.hpp"
 #include "list_options.hpp"
 #include "one_star_options.hpp"
+#include "planet_list.hpp"
 #include "settings_options.hpp"
 
 namespace hz::app {
@@ -27,11 +28,6 @@ constexpr auto set_file_table = std::to_array<Option>({
 
 constexpr auto write_map_table = std::to_array<Option>({
     {"write", '\0', OptionKind::value, "MAP.toml", OptionGroup::output, "write a column map to edit, for --columns"},
-});
-
-constexpr auto solution_table = std::to_array<Option>({
-    {"prefer", '\0', OptionKind::value, "COLUMN=VALUE", OptionGroup::answer,
-     "of several rows of one planet, take the one with this cell, unless one is marked as adopted"},
 });
 
 constexpr auto rank_table = std::to_array<Option>({
@@ -89,7 +85,7 @@ Command check_command() {
           {{"LIST", false, "a table that has the planet; without it, the planet is typed"},
            {"NAME", false, "the planet's name in the list"}},
           with_common({star_value_options(), planet_value_options(), reading_options(), boundary_options(),
-                       placement_options(), solution_table, format_table}),
+                       placement_options(), preference_options(), format_table}),
           {{{"hzmap check --teff 4410+-70 --luminosity 0.165+-0.009 --semi-major-axis 0.412+-0.012 --planet-radius 1.3",
              "a planet from what its paper says"},
             {"hzmap check planets.csv 'Lantern 27 d'", "a planet of a list"}}},
@@ -101,7 +97,7 @@ Command rank_command() {
   return {"rank",
           "put the planets of a list in order, the surest first",
           {{"LIST", true, "a table of planets; - is standard input"}},
-          with_common({reading_options(), boundary_options(), placement_options(), rank_table, solution_table,
+          with_common({reading_options(), boundary_options(), placement_options(), rank_table, preference_options(),
                        writing_options()}),
           {{{"hzmap rank planets.csv -o ranked.csv", "the first 20 on the terminal, all of them in a file"},
             {"hzmap rank planets.csv --require 'planet_radius<1.8' --top 5", "only small planets, five lines"}}},
@@ -120,7 +116,7 @@ Command draw_command() {
        {"LIST", false, "a table of planets; without it, one system is typed"},
        {"NAME", false, "the star whose wedge is drawn"}},
       with_common({star_value_options(), planet_value_options(), reading_options(), boundary_options(),
-                   placement_options(), solution_table, draw_table}),
+                   placement_options(), preference_options(), draw_table}),
       {{{"hzmap draw wedge planets.csv 'Lantern 27' -o lantern-27.svg", "one system: zones, orbits and their ranges"},
         {"hzmap draw lanes planets.csv -o lanes.pdf --width 180mm", "every star of a list with its zone and planets"}}},
       {typed_note},

@@ -72,6 +72,25 @@ Distribution Distribution::below(double limit, Domain domain) {
   return two_piece(0, 0, limit / sigmas_of_95_percent_inside, Asymmetry::median, domain);
 }
 
+Distribution Distribution::scaled(double factor) const {
+  HZ_REQUIRE(factor >= 0);
+  Distribution result;
+  result.central_ = central_;
+  if (factor == 0 || is_exact()) return result;
+  double total = 0;
+  for (Piece piece : pieces()) {
+    piece.weight /= piece.mass;
+    piece.sigma *= factor;
+    piece.end /= factor;
+    piece.mass = half_normal_mass(piece.end);
+    piece.weight *= piece.mass;
+    total += piece.weight;
+    result.pieces_[result.count_++] = piece;
+  }
+  for (std::size_t i = 0; i < result.count_; ++i) result.pieces_[i].weight /= total;
+  return result;
+}
+
 double Distribution::below(double x) const {
   if (is_exact()) return x > central_ ? 1 : 0;
   double sum = 0;

@@ -182,7 +182,7 @@ Result<MeasuredText> parse_measured(std::string_view text, std::string_view colu
 bool is_missing(std::string_view text) {
   static constexpr std::array<std::string_view, 10> spellings{"", "nan", "null", "none", "n/a", "na", "-", "--", "...", "…"};
   const auto bare = words::trimmed(text);
-  if (bare.size() > 4) return false;
+  if (bare.size() > 4 || (!bare.empty() && bare.front() >= '0' && bare.front() <= '9')) return false;
   return std::find(spellings.begin(), spellings.end(), words::lower_case(bare)) != spellings.end();
 }
 

@@ -133,13 +133,14 @@ private:
       cuts.add(piece.direction * (end - piece.centre) / piece.sigma);
     }
     const auto at = [&](double z) { return over_masses(piece.centre + piece.direction * piece.sigma * z, shift); };
-    const bool whole = cuts.ends().size() == 1 && range_.answered.contains(piece.centre);
-    if (whole && smooth_over(piece)) return over_whole(piece, last, at);
+    const auto is_answered = [&](double low, double high) {
+      return range_.answered.contains(piece.centre + piece.direction * piece.sigma * (low + high) / 2);
+    };
+    if (cuts.ends().size() == 1 && is_answered(0, last) && smooth_over(piece)) return over_whole(piece, last, at);
     double sum = 0;
     double low = 0;
     for (const double high : cuts.ends()) {
-      const double middle = piece.centre + piece.direction * piece.sigma * (low + high) / 2;
-      if (range_.answered.contains(middle)) sum += adaptive(low, high, at, 0);
+      if (is_answered(low, high)) sum += adaptive(low, high, at, 0);
       low = high;
     }
     return sum / half_normal_mass(last);

@@ -130,6 +130,15 @@ void add_edges(std::vector<OutputColumn>& columns) {
   }
 }
 
+/// What the answers hang on beside the row: the limit set and the meaning of asymmetric values.
+void add_basis(std::vector<OutputColumn>& columns, const Settings& settings) {
+  const auto add = [&](const char* name, const char* words, const std::string& value) {
+    columns.push_back({{name, "", "meta.note", words}, [value](const RankedRow&) { return text(value); }});
+  };
+  add("limit_set", "key of the limit set", settings.limits ? settings.limits->key : "");
+  add("asymmetry", "what an asymmetric value is taken for: median or mode", settings.asymmetry == Asymmetry::median ? "median" : "mode");
+}
+
 Getter stated_part(Quantity quantity, std::function<CellValue(const Measured&)> part) {
   return [quantity, part = std::move(part)](const RankedRow& row) {
     const Field* field = stated_field(row.candidate.row, quantity);
@@ -160,14 +169,9 @@ void add_stated(std::vector<OutputColumn>& columns, Quantity quantity) {
   });
 }
 
-void add_kept(std::vector<OutputColumn>& columns, const std::vector<std::string>& kept) {
+void add_kept(std::vector<OutputColumn>& columns, const std::vector<ColumnHead>& kept) {
   for (std::size_t i = 0; i < kept.size(); ++i) {
-    const bool taken = std::any_of(columns.begin(), columns.end(), [&](const OutputColumn& c) { return c.head.name == kept[i]; });
-    if (taken) continue;  // a ranked list ranked again: our own column is written anew
-    columns.push_back({{kept[i], "", "", "from the input"}, [i](const RankedRow& row) {
-                         const std::vector<std::string>& cells = row.candidate.row.kept;
-                         return i < cells.size() ? text(cells[i]) : CellValue();
-                       }});
+    columns.push_back({kept[i], [i](const RankedRow& row) { return text(row.candidate.row.kept.at(i)); }});
   }
 }
 
@@ -213,12 +217,14 @@ Cells cells_of(const OutputColumn& column, const std::vector<RankedRow>& rows, C
 
 }  // namespace
 
-std::vector<OutputColumn> ranked_columns(const std::vector<Quantity>& stated, const std::vector<std::string>& kept) {
+std::vector<OutputColumn> ranked_columns(const Settings& settings, const std::vector<Quantity>& stated,
+                                         const std::vector<ColumnHead>& kept) {
   std::vector<OutputColumn> columns;
   add_names(columns);
   add_decision(columns);
   add_all_used(columns);
   add_edges(columns);
+  add_basis(columns, settings);
   for (const Quantity quantity : stated) {
     if (quantity == Quantity::planet || quantity == Quantity::star || quantity == Quantity::note) continue;
     if (is_numeric(quantity) ? has_stated_field(quantity) : has_stated_text(quantity)) add_stated(columns, quantity);

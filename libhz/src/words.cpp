@@ -8,6 +8,8 @@ namespace {
 constexpr bool is_continuation(char c) { return (static_cast<unsigned char>(c) & 0xC0U) == 0x80U; }
 constexpr bool is_ascii_letter(char c) { return (c >= 'a' && c <= 'z') || (c >= 'A' && c <= 'Z'); }
 constexpr bool is_digit(char c) { return c >= '0' && c <= '9'; }
+constexpr bool is_blank(char c) { return c == ' ' || c == '\t' || c == '\r' || c == '\n'; }
+constexpr bool is_control(char c) { return static_cast<unsigned char>(c) < 0x20U || c == '\x7f'; }
 constexpr bool is_ascii(char c) { return static_cast<unsigned char>(c) < 0x80U; }
 constexpr char lower(char c) { return c >= 'A' && c <= 'Z' ? static_cast<char>(c - 'A' + 'a') : c; }
 
@@ -28,10 +30,9 @@ std::string star_signs_spelled(std::string_view text) {
 }  // namespace
 
 std::string_view trimmed(std::string_view text) {
-  constexpr std::string_view blanks = " \t\r\n";
-  const auto first = text.find_first_not_of(blanks);
-  if (first == std::string_view::npos) return {};
-  return text.substr(first, text.find_last_not_of(blanks) - first + 1);
+  while (!text.empty() && is_blank(text.front())) text.remove_prefix(1);
+  while (!text.empty() && is_blank(text.back())) text.remove_suffix(1);
+  return text;
 }
 
 std::string lower_case(std::string_view text) {
@@ -54,13 +55,13 @@ std::string folded(std::string_view text) {
 
 std::string quoted(std::string_view text) {
   constexpr std::size_t longest = 40;
+  std::string out = "\"";
   std::size_t characters = 0;
-  std::size_t end = 0;
-  while (end < text.size() && (characters < longest || is_continuation(text[end]))) {
-    if (!is_continuation(text[end])) ++characters;
-    ++end;
+  for (const char c : text) {
+    if (!is_continuation(c) && ++characters > longest) return out + "…\"";
+    out += is_control(c) ? ' ' : c;
   }
-  return '"' + std::string(text.substr(0, end)) + (end < text.size() ? "…\"" : "\"");
+  return out + '"';
 }
 
 std::string replaced(std::string_view text, std::string_view from, std::string_view to) {

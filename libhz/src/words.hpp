@@ -16,7 +16,7 @@ namespace hz::words {
 /// "R⋆") reads "star", the signs of Sun and Earth read "sun" and "earth".
 [[nodiscard]] std::string folded(std::string_view text);
 
-/// In quotes, cut to 40 characters: for messages.
+/// In quotes, on one line, cut to 40 characters: for messages.
 [[nodiscard]] std::string quoted(std::string_view text);
 
 /// `text` with every `from` made `to`.

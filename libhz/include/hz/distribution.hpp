@@ -46,6 +46,9 @@ public:
   /// Half-normal from 0 upwards with 95 per cent below `limit`, cut to `domain`: what an upper limit of an eccentricity means.
   [[nodiscard]] static Distribution below(double limit, Domain domain);
 
+  /// The same value with its half-widths times `factor` (0 makes it exact); what a better or worse measurement would say.
+  [[nodiscard]] Distribution scaled(double factor) const;
+
   [[nodiscard]] double central() const { return central_; }  // the quoted value
   [[nodiscard]] bool is_exact() const { return count_ == 0; }
   [[nodiscard]] std::span<const Piece> pieces() const { return {pieces_.data(), count_}; }  // empty when exact

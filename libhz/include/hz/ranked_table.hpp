@@ -8,6 +8,7 @@
 
 #include "hz/quantity.hpp"
 #include "hz/ranking.hpp"
+#include "hz/settings.hpp"
 #include "hz/table/table.hpp"
 
 namespace hz {
@@ -27,9 +28,10 @@ struct OutputColumn {
 };
 
 /// The columns of a ranked list. `stated` are the quantities the input list speaks of: they come back as stated, in
-/// canonical units, with half-widths and limit marks; `kept` are the names of the input's own columns that travel along
+/// canonical units, with half-widths and limit marks; `kept` are the heads of the input's own columns that travel along
 /// (ListRow::kept holds their cells in the same order). What was used and how it was had stands in X_used and X_route.
-[[nodiscard]] std::vector<OutputColumn> ranked_columns(const std::vector<Quantity>& stated, const std::vector<std::string>& kept);
+[[nodiscard]] std::vector<OutputColumn> ranked_columns(const Settings& settings, const std::vector<Quantity>& stated,
+                                         const std::vector<ColumnHead>& kept);
 
 [[nodiscard]] TableHead head_of(const std::vector<OutputColumn>& columns);
 [[nodiscard]] Chunk chunk_of(const std::vector<OutputColumn>& columns, const std::vector<RankedRow>& rows);

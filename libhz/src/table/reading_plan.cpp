@@ -164,12 +164,12 @@ std::optional<Field> ReadingPlan::chosen(const Chunk& chunk, std::size_t row, Qu
   if (!conversion) return Field{{}, problem(header, fmt::format("holds {}, whose unit is not one of {}", words::quoted(value.text), name(quantity)))};
   const auto measured = with_sides(chunk, row, parsed->measured, choice, *conversion);
   if (!measured) return Field{{}, measured.error()};
-  const auto shown = words::quoted(chunk.text(choice.column, row));
+  const auto shown = [&] { return words::quoted(chunk.text(choice.column, row)); };
   if (conversion->kind == ConversionKind::reciprocal && measured->value <= 0) {
-    return Field{{}, problem(header, fmt::format("holds {}, and a parallax that is not above 0 gives no distance", shown), ProblemCode::out_of_range)};
+    return Field{{}, problem(header, fmt::format("holds {}, and a parallax that is not above 0 gives no distance", shown()), ProblemCode::out_of_range)};
   }
   const auto converted = convert(*measured, *conversion);
-  if (!is_finite(converted)) return Field{{}, problem(header, fmt::format("holds {}, which is not a finite value", shown))};
+  if (!is_finite(converted)) return Field{{}, problem(header, fmt::format("holds {}, which is not a finite value", shown()))};
   return Field{converted, {}};
 }
 

@@ -9,6 +9,7 @@
 #include <utility>
 
 #include "hz/error.hpp"
+#include "hz/require.hpp"
 #include "hz/units.hpp"
 #include "table/column_map_text.hpp"
 #include "table/column_matching.hpp"
@@ -210,6 +211,19 @@ std::vector<std::size_t> unused(const TableHead& head, const std::vector<Underst
   return out;
 }
 
+// One sentence about the first; the others are named behind it.
+void refuse_doubts(const TableHead& head, const std::vector<Doubt>& doubts) {
+  std::vector<const Doubt*> blocking;
+  for (const auto& doubt : doubts) {
+    if (doubt.blocks) blocking.push_back(&doubt);
+  }
+  if (blocking.empty()) return;
+  auto what = fmt::format("{}: {}; say which in a column map (--columns MAP.toml): {}", head.source, blocking.front()->what,
+                          fmt::join(blocking.front()->map_lines, "  or  "));
+  for (std::size_t i = 1; i < blocking.size(); ++i) what += fmt::format("; also, {}", blocking[i]->what);
+  throw Error(Fault::input, what);
+}
+
 }  // namespace
 
 std::span<const Quantity> star_inputs() { return std::span(all_inputs).first(star_input_count); }
@@ -227,10 +241,7 @@ Understanding Understanding::draft(const TableHead& head, const ColumnMap& map, 
 
 Understanding Understanding::of(const TableHead& head, const ColumnMap& map, std::span<const Quantity> needed) {
   auto out = draft(head, map, needed);
-  for (const auto& doubt : out.doubts_) {
-    if (!doubt.blocks) continue;
-    throw Error(Fault::input, fmt::format("{}: {}; say which in a column map (--columns MAP.toml): {}", head.source, doubt.what, fmt::join(doubt.map_lines, "  or  ")));
-  }
+  refuse_doubts(head, out.doubts());
   return out;
 }
 
@@ -239,6 +250,9 @@ bool Understanding::knows(Quantity quantity) const {
                      [&](const auto& column) { return column.quantity == quantity && column.part == ColumnPart::value; });
 }
 
-ListRow Understanding::row(const Chunk& chunk, std::size_t index) const { return plan_->read(chunk, index); }
+ListRow Understanding::row(const Chunk& chunk, std::size_t index) const {
+  HZ_REQUIRE(plan_ != nullptr);
+  return plan_->read(chunk, index);
+}
 
 }  // namespace hz

@@ -21,6 +21,12 @@ Measured with_widths(double value, double minus, double plus) {
   return measured;
 }
 
+TEST(MeasuredText, LargerHalfWidthHasTwoDigits) {
+  EXPECT_EQ(measured_text(with_widths(0.4123, 0.0117, 0.0117)), "0.412 ± 0.012");
+  EXPECT_EQ(measured_text(with_widths(4410.4, 71.2, 71.2)), "4410 ± 71");
+  EXPECT_EQ(measured_text(with_widths(4410.4, 712, 712)), "4410 ± 712");
+}
+
 TEST(MeasuredText, AsymmetricHalfWidthsShareTheirDecimals) {
   EXPECT_EQ(measured_text(with_widths(0.79, 0.0213, 0.0298)), "0.790 +0.030 −0.021");
 }

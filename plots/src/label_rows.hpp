@@ -1,0 +1,38 @@
+// Labels along a line that must not overlap.
+#pragma once
+#include <cstddef>
+#include <optional>
+#include <vector>
+
+namespace hz::plots {
+
+/// A label that wants its middle at `at`.
+struct Label {
+  double at = 0;
+  double width = 0;
+};
+
+/// Where labels may stand, and how.
+struct LabelSpace {
+  double low = 0;   // left end
+  double high = 0;  // right end
+  double gap = 2;   // between neighbours
+};
+
+/// The middles of the labels in one row, in the given order, with the least sum of squared shifts; nullopt when the row
+/// is too short for them. `labels` rise in `at`.
+[[nodiscard]] std::optional<std::vector<double>> spread(const std::vector<Label>& labels, const LabelSpace& space);
+
+/// The way of one label's leader: its x in every row it passes, and last the middle of the label, which stands in the
+/// row path.size() - 1 (0 is next to the mark).
+struct LabelPath {
+  std::vector<double> path;
+  [[nodiscard]] std::size_t row() const { return path.size() - 1; }
+};
+
+/// Labels in as few rows as keep every shift within `most_shift`, else in those with the smallest largest shift; leaders
+/// pass between the labels of nearer rows and never cross. nullopt when no number of rows has room.
+[[nodiscard]] std::optional<std::vector<LabelPath>> label_rows(const std::vector<Label>& labels,
+                                                               const LabelSpace& space, double most_shift);
+
+}  // namespace hz::plots

@@ -1,0 +1,177 @@
+#include "planet_row.hpp"
+
+#include <algorithm>
+#include <cmath>
+
+#include "number_text.hpp"
+#include "planet_marks.hpp"
+#include "planet_shelf.hpp"
+#include "planet_spot.hpp"
+
+namespace hz::plots {
+namespace {
+
+constexpr double whisker_distance = 3.4;  // from the disc
+constexpr double widest_label = 60;
+
+Text p_text(const FigurePlanet& planet, const PlanetRowPlan& plan) {
+  const auto p = filling(planet, plan.zone);
+  return p && plan.labels_at_side ? Text{{probability_text(*p)}} : Text{};
+}
+
+double whisker_y(double size, const PlanetRowPlan& plan) {
+  return std::max(size + whisker_distance, plan.clearance + whisker_cap + 1.2);
+}
+
+std::vector<PlanetSpot> spots_of(const Canvas& canvas, const FigureStar& star, const PlanetRowPlan& plan) {
+  std::vector<PlanetSpot> spots;
+  for (const FigurePlanet* planet : by_distance(star)) {
+    PlanetSpot spot{planet, plan.axis.x(planet->semi_major_axis.value),
+                    disc_radius(measured_radius(*planet), plan.unit), 0, {}, {}, {}};
+    spot.letter = label_text(canvas, *planet, plan.letter, widest_label);
+    spot.p = p_text(*planet, plan);
+    spot.whisker = whisker(planet->semi_major_axis, plan.axis, whisker_y(spot.size, plan));
+    spots.push_back(std::move(spot));
+  }
+  return spots;
+}
+
+Box disc_box(const PlanetSpot& spot) { return Box{spot.x, spot.y, 0, 0}.grown(spot.size + 0.5); }
+
+/// Letter and P at the right of the disc, or the letter above it.
+std::vector<Mark> words_beside(const Canvas& canvas, const PlanetSpot& spot, const PlanetRowPlan& plan) {
+  const std::string& name = spot.planet->name;
+  if (!plan.labels_at_side) {
+    const Point above{spot.x, -std::max(spot.size, plan.clearance) - 2};
+    return {haloed(plan, "label:" + name, canvas.text_at(spot.letter, plan.letter, above, Align::center))};
+  }
+  const Point upper{spot.x + 0.75 * spot.size + 2, -0.55 * spot.size - 1.5};
+  std::vector<Mark> words{
+      haloed(plan, "label:" + name, canvas.text_at(spot.letter, plan.letter, upper, Align::left))};
+  if (spot.p.empty()) return words;
+  const double below = whisker_y(spot.size, plan) + whisker_cap + 2 + cap_height * plan.p.size;
+  const Point lower{spot.x + 0.6 * spot.size + 2.5, below};
+  words.push_back(haloed(plan, "p:" + name, canvas.text_at(spot.p, plan.p, lower, Align::left)));
+  return words;
+}
+
+bool any_overlap(const std::vector<Box>& some, const std::vector<Box>& others) {
+  return std::any_of(some.begin(), some.end(), [&](const Box& one) {
+    return std::any_of(others.begin(), others.end(), [&](const Box& other) { return one.grown(0.8).overlaps(other); });
+  });
+}
+
+/// All beside their discs; nullopt when anything of two planets would touch, or leave the page.
+std::optional<std::vector<Mark>> labels_beside(const Canvas& canvas, const std::vector<PlanetSpot>& spots,
+                                               const PlanetRowPlan& plan) {
+  std::vector<std::vector<Box>> planets;
+  std::vector<Mark> all;
+  for (const PlanetSpot& spot : spots) {
+    std::vector<Box> boxes{disc_box(spot)};
+    if (spot.whisker) boxes.push_back(extent(*spot.whisker));
+    for (Mark& mark : words_beside(canvas, spot, plan)) {
+      boxes.push_back(extent(mark.shape));
+      if (boxes.back().right() > canvas.width() - page_margin) return std::nullopt;
+      all.push_back(std::move(mark));
+    }
+    for (const auto& other : planets)
+      if (any_overlap(boxes, other)) return std::nullopt;
+    planets.push_back(std::move(boxes));
+  }
+  return all;
+}
+
+/// By turns above (-1) and below (1).
+double side_of(std::size_t index) { return index % 2 == 0 ? -1 : 1; }
+
+/// Neighbours that would cover each other step apart, each to its own side.
+void step_apart(std::vector<PlanetSpot>& spots) {
+  for (std::size_t i = 1; i < spots.size(); ++i) {
+    const double apart = spots[i - 1].size + spots[i].size + 2.5;
+    const double dx = spots[i].x - spots[i - 1].x;
+    if (dx >= apart) continue;
+    const double step = std::sqrt(apart * apart - dx * dx) / 2;
+    for (const std::size_t which : {i - 1, i})
+      if (std::abs(spots[which].y) < step) spots[which].y = side_of(which) * step;
+  }
+}
+
+/// Each whisker on its planet's side of the disc, farther out where others are in the way.
+void place_whiskers(std::vector<PlanetSpot>& spots, const PlanetRowPlan& plan) {
+  std::vector<Box> taken;
+  for (const PlanetSpot& spot : spots) taken.push_back(disc_box(spot));
+  for (std::size_t i = 0; i < spots.size(); ++i) {
+    if (!spots[i].whisker) continue;
+    WhiskerMark& whisker = *spots[i].whisker;
+    whisker.y = spots[i].y + side_of(i) * whisker_y(spots[i].size, plan);
+    const auto free = [&] {
+      return std::none_of(taken.begin(), taken.end(),
+                          [&](const Box& box) { return box.overlaps(extent(whisker).grown(0.8)); });
+    };
+    while (!free()) whisker.y += side_of(i);
+    taken.push_back(extent(whisker));
+  }
+}
+
+/// How far the discs and whiskers of one side reach from the axis.
+double reach(const std::vector<PlanetSpot>& spots, double side, double clearance) {
+  double farthest = clearance;
+  for (std::size_t i = 0; i < spots.size(); ++i) {
+    farthest = std::max(farthest, side * spots[i].y + spots[i].size);
+    if (spots[i].whisker && side_of(i) == side)
+      farthest = std::max(farthest, side * spots[i].whisker->y + whisker_cap);
+  }
+  return farthest + 1;
+}
+
+std::vector<Mark> labels_on_shelves(const Canvas& canvas, const std::vector<PlanetSpot>& spots,
+                                    const PlanetRowPlan& plan) {
+  std::vector<Mark> marks;
+  for (const double side : {-1.0, 1.0}) {
+    std::vector<const PlanetSpot*> here;
+    for (std::size_t i = 0; i < spots.size(); ++i)
+      if (side_of(i) == side) here.push_back(&spots[i]);
+    for (Mark& mark : PlanetShelf(canvas, plan, side, reach(spots, side, plan.clearance)).filled(here))
+      marks.push_back(std::move(mark));
+  }
+  return marks;
+}
+
+Mark disc_mark(const PlanetSpot& spot, const PlanetRowPlan& plan) {
+  const bool known = measured_radius(*spot.planet).has_value();
+  return {"disc:" + spot.planet->name,
+          disc(plan.position({spot.x, spot.y}), spot.size, filling(*spot.planet, plan.zone), known)};
+}
+
+}  // namespace
+
+Mark haloed(const PlanetRowPlan& plan, std::string tag, TextMark text) {
+  text.style.halo = plan.ground(text.box.center());
+  return {std::move(tag), std::move(text)};
+}
+
+double room_at_side(const Canvas& canvas, const FigurePlanet& planet, const PlanetRowPlan& plan) {
+  const double letter = canvas.measure().advance(label_text(canvas, planet, plan.letter, widest_label), plan.letter);
+  const double p = canvas.measure().advance(p_text(planet, plan), plan.p);
+  return 0.75 * disc_radius(measured_radius(planet), plan.unit) + 3 + std::max(letter, p);
+}
+
+std::vector<Mark> planet_row(const Canvas& canvas, const FigureStar& star, const PlanetRowPlan& plan) {
+  std::vector<PlanetSpot> spots = spots_of(canvas, star, plan);
+  auto labels = labels_beside(canvas, spots, plan);
+  if (!labels) {
+    step_apart(spots);
+    place_whiskers(spots, plan);
+    labels = labels_on_shelves(canvas, spots, plan);
+  }
+  std::vector<Mark> marks;
+  const auto is_leader = [](const Mark& mark) { return std::holds_alternative<LineMark>(mark.shape); };
+  std::copy_if(labels->begin(), labels->end(), std::back_inserter(marks), is_leader);
+  for (const PlanetSpot& spot : spots) marks.push_back(disc_mark(spot, plan));
+  for (const PlanetSpot& spot : spots)
+    if (spot.whisker) marks.push_back({"whisker:" + spot.planet->name, *spot.whisker});
+  std::remove_copy_if(labels->begin(), labels->end(), std::back_inserter(marks), is_leader);
+  return marks;
+}
+
+}  // namespace hz::plots

@@ -1,0 +1,23 @@
+// A planet on its axis, with the words it needs.
+#pragma once
+#include <optional>
+
+#include "hz/plots/system.hpp"
+#include "planet_row.hpp"
+
+namespace hz::plots {
+
+struct PlanetSpot {
+  const FigurePlanet* planet = nullptr;
+  double x = 0;
+  double size = 0;  // radius of the disc
+  double y = 0;     // of the disc's centre
+  Text letter;
+  Text p;  // empty where it is not written
+  std::optional<WhiskerMark> whisker;
+};
+
+/// Text with a halo of the colour behind it.
+[[nodiscard]] Mark haloed(const PlanetRowPlan& plan, std::string tag, TextMark text);
+
+}  // namespace hz::plots
