@@ -46,4 +46,4 @@ trap 'rm -f "$log"' EXIT
 echo "debian-packages.sh: installing ${#packages[@]} packages: ${packages[*]}" >&2
 apt update || { cat "$log" >&2 && die "the package lists could not be fetched (see above); is there a network?"; }
 apt install --no-install-recommends "${packages[@]}" ||
-  { cat "$log" >&2 && die "apt-get could not install the packages (see above); this list is for Debian 12"; }
+  { cat "$log" >&2 && die "apt-get could not install them (see above); is there a network, and is this Debian 12?"; }

@@ -39,15 +39,18 @@ configure() {
 
 # compile TARGET: with all cores.
 compile() {
-  quietly "building with all cores: $1 (takes minutes the first time)" \
+  quietly "building $1 (minutes the first time)" \
     cmake --build "$build" --target "$1" --parallel "$(nproc)"
 }
 
-# show COMMAND...: prints and runs a command of the program just built.
+# show ARGUMENT...: prints and runs a command of the program just built.
 show() {
-  printf '$ hzmap' >&2
-  printf ' %q' "$@" >&2
-  echo >&2
+  local argument line='$ hzmap'
+  for argument in "$@"; do
+    [[ $argument != *' '* ]] || argument="'$argument'"
+    line+=" $argument"
+  done
+  echo "$line" >&2
   "$build/apps/hzmap" "$@" || die "hzmap $1 failed, see above"
 }
 
