@@ -132,6 +132,7 @@ bool half_widths(Scanner& scan, std::string_view number, Measured& measured) {
   scan.skip_blanks();
   if (scan.take("(")) {
     const bool digits_meant = attached && scan.at_digit();
+    scan.skip_blanks();
     const bool read = digits_meant ? last_digit_half_width(scan, number, measured) : signed_half_widths(scan, measured);
     scan.skip_blanks();
     return read && scan.take(")");

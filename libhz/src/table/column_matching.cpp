@@ -23,6 +23,9 @@ std::string bracketed_unit(std::string_view description) {
   return std::string(words::trimmed(description.substr(open + 1, close - open - 1)));
 }
 
+// "R" of "R [Rsun]".
+std::string_view without_brackets(std::string_view header) { return words::trimmed(header.substr(0, header.find_first_of("[("))); }
+
 Candidate candidate(std::size_t column, HeaderMatch match, KnownBy known_by) {
   return {column,   match.quantity, match.part, std::move(match.unit), match.unit_known, known_by, std::move(match.base), std::move(match.meanings)};
 }
@@ -97,17 +100,19 @@ private:
     const auto unit = column.unit.empty() ? bracketed_unit(descriptions_[i]) : column.unit;
     if (auto found = words_.match_canonical(column.name, unit)) return candidate(i, *std::move(found), KnownBy::name);
     if (auto found = prefixed(column.name, unit)) return candidate(i, *std::move(found), KnownBy::words);
-    auto by_header = words_.match(column.name, unit);
-    if (by_header && by_header->meanings.empty()) return candidate(i, *std::move(by_header), KnownBy::words);
+    // A bare letter gives way to a description; its unit in a description is the last resort.
+    const auto by_header = words_.match(column.name, column.unit);
+    const bool is_bare = by_header && !by_header->meanings.empty();
+    if (by_header && !is_bare) return candidate(i, *words_.match(column.name, unit), KnownBy::words);
     if (auto found = words_.match(descriptions_[i], column.unit)) return candidate(i, *std::move(found), KnownBy::comment);
-    if (by_header) return candidate(i, *std::move(by_header), KnownBy::words);
+    if (is_bare) return candidate(i, *words_.match(column.name, unit), KnownBy::words);
     return std::nullopt;
   }
 
   std::optional<HeaderMatch> prefixed(std::string_view header, std::string_view unit) const {
     if (!header.starts_with("e_") && !header.starts_with("E_") && !header.starts_with("l_")) return std::nullopt;
     for (const auto& other : head_.columns) {
-      if (other.name == header.substr(2)) return words_.match_prefixed(header.front(), other.name, unit);
+      if (without_brackets(other.name) == header.substr(2)) return words_.match_prefixed(header.front(), other.name, unit);
     }
     return std::nullopt;
   }

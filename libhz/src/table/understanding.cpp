@@ -6,6 +6,7 @@
 #include <algorithm>
 #include <array>
 #include <map>
+#include <set>
 #include <utility>
 
 #include "hz/error.hpp"
@@ -40,6 +41,7 @@ bool contains(const Container& container, const Value& value) {
 struct Group {
   Candidate value;
   std::map<ColumnPart, Candidate> parts;
+  std::set<ColumnPart> contested;  // more than one column for it: none is used
 };
 
 // Keeps those that satisfy the condition, if any does.
@@ -56,7 +58,7 @@ public:
   Assembly(const TableHead& head, const ColumnMap& map, std::span<const Quantity> needed) : head_(head), needed_(needed) {
     const auto candidates = match_columns(head, map);
     for (const auto& candidate : candidates) {
-      if (is_settled(candidate) && candidate.part == ColumnPart::value) groups_.push_back({candidate, {}});
+      if (is_settled(candidate) && candidate.part == ColumnPart::value) groups_.push_back({candidate, {}, {}});
     }
     for (const auto& candidate : candidates) {
       if (is_settled(candidate) && candidate.part != ColumnPart::value) attach(candidate);
@@ -111,6 +113,7 @@ private:
     const auto [there, is_new] = group->parts.emplace(part.part, part);
     if (is_new || there->second.known_by < part.known_by) return;
     if (there->second.known_by == part.known_by) {
+      group->contested.insert(part.part);
       compete(part.quantity, part.part, {there->second.column, part.column});
     } else {
       there->second = part;
@@ -142,7 +145,9 @@ private:
 
   void use(const Group& group, std::size_t choice) {
     add(group.value, group.value.unit, choice);
-    for (const auto& [part, candidate] : group.parts) add(candidate, group.value.unit, choice);
+    for (const auto& [part, candidate] : group.parts) {
+      if (!group.contested.contains(part)) add(candidate, group.value.unit, choice);
+    }
   }
 
   void add(const Candidate& candidate, const std::string& value_unit, std::size_t choice) {
