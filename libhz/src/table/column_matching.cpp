@@ -26,7 +26,7 @@ std::string bracketed_unit(std::string_view description) {
 // "R" of "R [Rsun]".
 std::string_view without_brackets(std::string_view header) { return words::trimmed(header.substr(0, header.find_first_of("[("))); }
 
-Candidate candidate(std::size_t column, HeaderMatch match, KnownBy known_by) {
+ColumnCandidate candidate(std::size_t column, HeaderMatch match, KnownBy known_by) {
   return {column,   match.quantity, match.part, std::move(match.unit), match.unit_known, known_by, std::move(match.base), std::move(match.meanings)};
 }
 
@@ -34,7 +34,7 @@ class Matching {
 public:
   Matching(const TableHead& head, const ColumnMap& map) : head_(head), map_(map), descriptions_(descriptions(head)) {}
 
-  std::vector<Candidate> all() {
+  std::vector<ColumnCandidate> all() {
     take_mapped();
     take_ignored();
     learn_from_values();
@@ -64,8 +64,8 @@ private:
     }
   }
 
-  Candidate mapped(const ColumnMap::Entry& entry, std::size_t column) const {
-    Candidate out{column, entry.quantity, entry.part, entry.unit, true, KnownBy::map, words::folded(entry.column), {}};
+  ColumnCandidate mapped(const ColumnMap::Entry& entry, std::size_t column) const {
+    ColumnCandidate out{column, entry.quantity, entry.part, entry.unit, true, KnownBy::map, words::folded(entry.column), {}};
     if (!entry.unit.empty() || !is_numeric(entry.quantity)) return out;
     // The file's own unit counts where the map says none; one that does not fit is an error as elsewhere.
     out.unit = unit_in_file(column);
@@ -95,7 +95,7 @@ private:
     }
   }
 
-  std::optional<Candidate> match(std::size_t i) const {
+  std::optional<ColumnCandidate> match(std::size_t i) const {
     const auto& column = head_.columns[i];
     const auto unit = column.unit.empty() ? bracketed_unit(descriptions_[i]) : column.unit;
     if (auto found = words_.match_canonical(column.name, unit)) return candidate(i, *std::move(found), KnownBy::name);
@@ -122,7 +122,7 @@ private:
   std::vector<std::string> descriptions_;
   HeaderWords words_;
   std::set<std::size_t> taken_;
-  std::vector<Candidate> candidates_;
+  std::vector<ColumnCandidate> candidates_;
 };
 
 // "COLUMN pl_rade:  Planet Radius [Earth Radius]" and "pl_rade: Planet Radius" both describe the column pl_rade.
@@ -144,7 +144,7 @@ std::string described_in_comments(const TableHead& head, std::string_view column
 
 }  // namespace
 
-std::vector<Candidate> match_columns(const TableHead& head, const ColumnMap& map) { return Matching(head, map).all(); }
+std::vector<ColumnCandidate> match_columns(const TableHead& head, const ColumnMap& map) { return Matching(head, map).all(); }
 
 std::vector<std::string> descriptions(const TableHead& head) {
   std::vector<std::string> out;

@@ -9,7 +9,7 @@
 namespace hz {
 
 /// A column recognised, before the columns are compared with each other.
-struct Candidate {
+struct ColumnCandidate {
   std::size_t column = 0;
   Quantity quantity{};
   ColumnPart part = ColumnPart::value;
@@ -21,7 +21,7 @@ struct Candidate {
 };
 
 /// Throws hz::Error (input) when the map names a column that is not there or a unit that is not understood.
-[[nodiscard]] std::vector<Candidate> match_columns(const TableHead& head, const ColumnMap& map);
+[[nodiscard]] std::vector<ColumnCandidate> match_columns(const TableHead& head, const ColumnMap& map);
 
 /// What the file says of each column in words: its own description, else a comment line `name: words [unit]`.
 [[nodiscard]] std::vector<std::string> descriptions(const TableHead& head);

@@ -39,8 +39,8 @@ bool contains(const Container& container, const Value& value) {
 
 // A value column with the columns that belong to it.
 struct Group {
-  Candidate value;
-  std::map<ColumnPart, Candidate> parts;
+  ColumnCandidate value;
+  std::map<ColumnPart, ColumnCandidate> parts;
   std::set<ColumnPart> contested;  // more than one column for it: none is used
 };
 
@@ -76,7 +76,7 @@ public:
   std::vector<Doubt> doubts() { return std::move(doubts_); }
 
 private:
-  static bool is_settled(const Candidate& candidate) { return candidate.unit_known && candidate.meanings.empty(); }
+  static bool is_settled(const ColumnCandidate& candidate) { return candidate.unit_known && candidate.meanings.empty(); }
   [[nodiscard]] const std::string& header(std::size_t column) const { return head_.columns[column].name; }
   [[nodiscard]] bool needs(Quantity quantity) const { return contains(needed_, quantity); }
   [[nodiscard]] bool knows(Quantity quantity) const {
@@ -85,7 +85,7 @@ private:
 
   // The value a half-width, bound or mark belongs to: that with the same words, unit and beginning of the header, the
   // nearest before it.
-  Group* owner(const Candidate& part) {
+  Group* owner(const ColumnCandidate& part) {
     std::vector<Group*> pool;
     for (auto& group : groups_) {
       if (group.value.quantity == part.quantity) pool.push_back(&group);
@@ -103,11 +103,11 @@ private:
     return pool.back();
   }
 
-  static bool same_unit(const Candidate& a, const Candidate& b) {
+  static bool same_unit(const ColumnCandidate& a, const ColumnCandidate& b) {
     return is_numeric(a.quantity) ? conversion(a.quantity, a.unit) == conversion(b.quantity, b.unit) : a.unit == b.unit;
   }
 
-  void attach(const Candidate& part) {
+  void attach(const ColumnCandidate& part) {
     auto* const group = owner(part);
     if (group == nullptr) return;
     const auto [there, is_new] = group->parts.emplace(part.part, part);
@@ -150,7 +150,7 @@ private:
     }
   }
 
-  void add(const Candidate& candidate, const std::string& value_unit, std::size_t choice) {
+  void add(const ColumnCandidate& candidate, const std::string& value_unit, std::size_t choice) {
     const bool has_unit = candidate.part != ColumnPart::limit_mark && candidate.part != ColumnPart::route && is_numeric(candidate.quantity);
     auto unit = candidate.unit.empty() ? value_unit : candidate.unit;
     if (unit.empty()) unit = info(candidate.quantity).unit;
@@ -165,7 +165,7 @@ private:
     doubts_.push_back(std::move(doubt));
   }
 
-  void doubt_meaning_or_unit(const Candidate& candidate) {
+  void doubt_meaning_or_unit(const ColumnCandidate& candidate) {
     if (!candidate.meanings.empty()) {
       doubt_meaning(candidate);
     } else if (!candidate.unit_known) {
@@ -173,7 +173,7 @@ private:
     }
   }
 
-  void doubt_meaning(const Candidate& candidate) {
+  void doubt_meaning(const ColumnCandidate& candidate) {
     Doubt doubt;
     doubt.column = candidate.column;
     std::vector<std::string_view> names;
@@ -187,7 +187,7 @@ private:
     doubts_.push_back(std::move(doubt));
   }
 
-  void doubt_unit(const Candidate& candidate) {
+  void doubt_unit(const ColumnCandidate& candidate) {
     const auto& canonical = info(candidate.quantity).unit;
     const auto key = canonical_name(candidate.quantity, candidate.part);
     Doubt doubt;
