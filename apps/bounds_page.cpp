@@ -15,23 +15,25 @@
 namespace hz::app {
 namespace {
 
-const LimitAtStar* at_star(const Answer& answer, const FluxLimit& limit) {
-  const auto found = std::find_if(answer.limits.begin(), answer.limits.end(),
-                                  [&](const LimitAtStar& each) { return each.limit == &limit; });
-  return found == answer.limits.end() ? nullptr : &*found;
-}
-
-std::string role_in(const Zone& zone, const LimitSet& set, const FluxLimit& limit, const char* name) {
-  if (&limit == &set.limits[zone.inner]) return fmt::format("{}, inner", name);
-  if (&limit == &set.limits[zone.outer]) return fmt::format("{}, outer", name);
-  return "";
+std::string_view words(ZoneEdge edge) {
+  switch (edge) {
+    case ZoneEdge::optimistic_inner:
+      return "optimistic, inner";
+    case ZoneEdge::conservative_inner:
+      return "conservative, inner";
+    case ZoneEdge::conservative_outer:
+      return "conservative, outer";
+    case ZoneEdge::optimistic_outer:
+      break;
+  }
+  return "optimistic, outer";
 }
 
 /// "conservative, inner"; empty for a limit that bounds no zone.
-std::string role(const LimitSet& set, const FluxLimit& limit) {
-  std::string result = set.conservative ? role_in(*set.conservative, set, limit, "conservative") : "";
-  const std::string wider = set.optimistic ? role_in(*set.optimistic, set, limit, "optimistic") : "";
-  return result + (result.empty() || wider.empty() ? "" : "; ") + wider;
+std::string role(const LimitAtStar& limit) {
+  std::string result;
+  for (const ZoneEdge edge : limit.edges) result += (result.empty() ? "" : "; ") + std::string(words(edge));
+  return result;
 }
 
 /// Decimals that suit every number of a column: three digits of the smallest.
@@ -58,7 +60,7 @@ int distance_decimals(const Answer& answer) {
 
 std::string cell(const std::optional<double>& value, int decimals) { return value ? fixed(*value, decimals) : ""; }
 
-AlignedTable limit_table(const Answer& answer, const LimitSet& set) {
+AlignedTable limit_table(const Answer& answer) {
   AlignedTable table({{"limit"},
                       {"distance (au)", Align::right},
                       {"insolation", Align::right},
@@ -73,7 +75,7 @@ AlignedTable limit_table(const Answer& answer, const LimitSet& set) {
   std::stable_sort(limits.begin(), limits.end(),
                    [](const auto& a, const auto& b) { return a.insolation > b.insolation; });
   for (const LimitAtStar& each : limits) {
-    const std::string bounds = role(set, *each.limit);
+    const std::string bounds = role(each);
     table.add(
         {each.limit->title(), each.distance ? measured_text(*each.distance, distance) : "", fixed(each.insolation, 3),
          cell(each.period, period), cell(each.angular_separation, angle), bounds, each.held ? "held" : ""},
@@ -82,19 +84,19 @@ AlignedTable limit_table(const Answer& answer, const LimitSet& set) {
   return table;
 }
 
-std::string zone_phrase(const Answer& answer, const LimitSet& set, const std::optional<Zone>& zone, const char* name) {
-  if (!zone) return "";
-  const LimitAtStar* const inner = at_star(answer, set.limits[zone->inner]);
-  const LimitAtStar* const outer = at_star(answer, set.limits[zone->outer]);
+std::string zone_phrase(const Answer& answer, ZoneEdge inner_edge, ZoneEdge outer_edge, const char* name) {
+  const LimitAtStar* const inner = find_edge(answer, inner_edge);
+  const LimitAtStar* const outer = find_edge(answer, outer_edge);
   if (inner == nullptr || outer == nullptr || !inner->distance || !outer->distance) return "";
   const int decimals = decimals_for(inner->distance->value, 3);
   return fmt::format("{} to {} au ({} zone)", fixed(inner->distance->value, decimals),
                      fixed(outer->distance->value, decimals), name);
 }
 
-std::string first_sentence(const Answer& answer, const LimitSet& set) {
-  const std::string narrow = zone_phrase(answer, set, set.conservative, "conservative");
-  const std::string wide = zone_phrase(answer, set, set.optimistic, "optimistic");
+std::string first_sentence(const Answer& answer) {
+  const std::string narrow =
+      zone_phrase(answer, ZoneEdge::conservative_inner, ZoneEdge::conservative_outer, "conservative");
+  const std::string wide = zone_phrase(answer, ZoneEdge::optimistic_inner, ZoneEdge::optimistic_outer, "optimistic");
   return fmt::format("Liquid water from {}{}{}.", narrow, narrow.empty() || wide.empty() ? "" : ", from ", wide);
 }
 
@@ -142,8 +144,8 @@ std::string bounds_page(const ListRow& row, const Answer& answer, const Settings
   const LimitSet& set = *settings.limits;
   const auto paragraph = [&](const std::string& text) { return text.empty() ? "" : wrapped(text, width) + "\n"; };
   const std::string exact = exact_values(row);
-  std::string result = console.styled(wrapped(first_sentence(answer, set), width), Style::strong) + "\n";
-  result += paragraph(star_line(row, answer)) + "\n" + limit_table(answer, set).text(console) + "\n";
+  std::string result = console.styled(wrapped(first_sentence(answer), width), Style::strong) + "\n";
+  result += paragraph(star_line(row, answer)) + "\n" + limit_table(answer).text(console) + "\n";
   result += paragraph(source_sentence(set)) + paragraph(set.warning.empty() ? "" : "Warning: " + set.warning);
   result += paragraph(exact.empty() ? "" : "Taken as exact, being typed without half-widths: " + exact + ".");
   for (const std::string& flag : answer.flags) result += paragraph(flag_sentence(flag));

@@ -1,198 +1,111 @@
 #include "bounds_table.hpp"
 
 #include <fmt/format.h>
+#include <fmt/ranges.h>
 
 #include <array>
 #include <cmath>
-#include <functional>
-#include <limits>
-
-#include "hz/quantity.hpp"
-#include "numbers.hpp"
+#include <string>
+#include <utility>
 
 namespace hz::app {
 namespace {
 
-constexpr double no_value = std::numeric_limits<double>::quiet_NaN();  // the table layer writes an empty cell for it
-constexpr int written_digits = 7;  // far below any half-width, and as far as the published fits carry
+using Columns = std::vector<OutputColumn>;
 
-struct Source {
-  const ListRow& row;
-  const Answer& answer;
-  const LimitSet& set;
-};
+CellValue number(const std::optional<double>& x) {
+  return x && std::isfinite(*x) ? CellValue(six_digits(*x)) : CellValue();
+}
 
-/// A column of ours: its head and what a row has to say in it.
-struct TextColumn {
-  ColumnHead head;
-  std::function<std::string(const Source&)> cell;
-};
-struct NumberColumn {
-  ColumnHead head;
-  std::function<std::optional<double>(const Source&)> cell;
-};
-using OwnColumn = std::variant<TextColumn, NumberColumn>;
+CellValue text(std::string words) { return words.empty() ? CellValue() : CellValue(std::move(words)); }
 
-enum class EdgePart { distance, minus, plus, insolation, period, angular_separation };
-
-struct Edge {
-  const char* name;
-  std::optional<Zone> LimitSet::*zone;
-  std::size_t Zone::*limit;
-};
-constexpr std::array<Edge, 4> edges{{{"optimistic_inner", &LimitSet::optimistic, &Zone::inner},
-                                     {"conservative_inner", &LimitSet::conservative, &Zone::inner},
-                                     {"conservative_outer", &LimitSet::conservative, &Zone::outer},
-                                     {"optimistic_outer", &LimitSet::optimistic, &Zone::outer}}};
-
-const LimitAtStar* edge_at_star(const Source& source, const Edge& edge) {
-  const std::optional<Zone>& zone = source.set.*edge.zone;
-  if (!zone) return nullptr;
-  const FluxLimit* const wanted = &source.set.limits[(*zone).*edge.limit];
-  for (const LimitAtStar& each : source.answer.limits) {
-    if (each.limit == wanted) return &each;
+/// A column whose name stands in catalogs/columns.csv, with the unit and description it has there.
+template <class Get>
+void add(Columns& columns, const std::string& name, Get get) {
+  ColumnHead head{name, "", "", ""};
+  for (const QuantityInfo& info : all_columns()) {
+    if (info.name == name) head = {info.name, info.unit, info.ucd, info.description};
   }
-  return nullptr;
+  columns.push_back({head, std::move(get)});
 }
 
-std::optional<double> edge_value(const Source& source, const Edge& edge, EdgePart part) {
-  const LimitAtStar* const at_star = edge_at_star(source, edge);
-  if (at_star == nullptr) return std::nullopt;
-  switch (part) {
-    case EdgePart::insolation:
-      return at_star->insolation;
-    case EdgePart::period:
-      return at_star->period;
-    case EdgePart::angular_separation:
-      return at_star->angular_separation;
-    default:
-      break;
-  }
-  if (!at_star->distance) return std::nullopt;
-  const Measured& distance = *at_star->distance;
-  return part == EdgePart::distance ? distance.value : part == EdgePart::minus ? distance.minus : distance.plus;
-}
-
-NumberColumn edge_column(const Edge& edge, EdgePart part, const char* suffix, const char* unit) {
-  return {{fmt::format("{}_{}", edge.name, suffix), unit, "", ""},
-          [&edge, part](const Source& source) { return edge_value(source, edge, part); }};
-}
-
-void add_edge(std::vector<OwnColumn>& columns, const Edge& edge) {
-  columns.emplace_back(edge_column(edge, EdgePart::distance, "edge", "AU"));
-  columns.emplace_back(edge_column(edge, EdgePart::minus, "edge_err_minus", "AU"));
-  columns.emplace_back(edge_column(edge, EdgePart::plus, "edge_err_plus", "AU"));
-  columns.emplace_back(edge_column(edge, EdgePart::insolation, "insolation", ""));
-  columns.emplace_back(edge_column(edge, EdgePart::period, "period", "d"));
-  columns.emplace_back(edge_column(edge, EdgePart::angular_separation, "angular_separation", "mas"));
-}
-
-using StarValue = std::optional<Derived> StarAnswer::*;
-
-NumberColumn star_column(Quantity quantity, const char* suffix, StarValue value,
-                         std::optional<double> (*part)(const Measured&)) {
-  return {{fmt::format("{}{}", name(quantity), suffix), info(quantity).unit, "", ""},
-          [value, part](const Source& source) -> std::optional<double> {
-            const std::optional<Derived>& derived = source.answer.star.*value;
-            return derived ? part(derived->measured) : std::nullopt;
-          }};
-}
-
-void add_star_value(std::vector<OwnColumn>& columns, Quantity quantity, StarValue value) {
-  columns.emplace_back(star_column(quantity, "", value, [](const Measured& m) { return std::optional(m.value); }));
-  columns.emplace_back(star_column(quantity, "_err_minus", value, [](const Measured& m) { return m.minus; }));
-  columns.emplace_back(star_column(quantity, "_err_plus", value, [](const Measured& m) { return m.plus; }));
-  columns.emplace_back(TextColumn{{fmt::format("{}_route", name(quantity)), "", "", ""}, [value](const Source& source) {
-                                    const std::optional<Derived>& derived = source.answer.star.*value;
-                                    return derived ? derived->route : std::string();
-                                  }});
-}
-
-std::string joined(const std::vector<std::string>& words) {
-  std::string result;
-  for (const std::string& word : words) result += (result.empty() ? "" : ";") + word;
-  return result;
-}
-
-void add_text(std::vector<OwnColumn>& columns, const char* column, std::string (*cell)(const Source&)) {
-  columns.emplace_back(TextColumn{{column, "", "", ""}, cell});
-}
-
-std::vector<OwnColumn> own_columns() {
-  std::vector<OwnColumn> columns;
-  add_text(columns, "star", [](const Source& source) { return source.row.star.name; });
-  add_text(columns, "planet", [](const Source& source) { return source.row.planet.name; });
-  add_star_value(columns, Quantity::teff, &StarAnswer::teff);
-  add_star_value(columns, Quantity::luminosity, &StarAnswer::luminosity);
-  add_star_value(columns, Quantity::stellar_mass, &StarAnswer::stellar_mass);
-  add_star_value(columns, Quantity::distance, &StarAnswer::distance);
-  for (const Edge& edge : edges) add_edge(columns, edge);
-  add_text(columns, "limit_set", [](const Source& source) { return source.set.key; });
-  add_text(columns, "status", [](const Source& source) {
-    return std::string(source.answer.status == Status::answered ? "answered" : "set aside");
+/// What was used of the star: it may differ from what the list states, so it has a name of its own and its route beside
+/// it.
+void add_used(Columns& columns, Quantity quantity, std::optional<Derived> StarAnswer::*value) {
+  const QuantityInfo& about = info(quantity);
+  const auto part = [&](const std::string& suffix, const std::string& words,
+                        std::optional<double> (*of)(const Measured&)) {
+    columns.push_back({{about.name + suffix, about.unit, "", words + about.name}, [value, of](const RankedRow& row) {
+                         const std::optional<Derived>& derived = row.candidate.answer.star.*value;
+                         return derived ? number(of(derived->measured)) : CellValue();
+                       }});
+  };
+  part("_used", "used: ", [](const Measured& m) { return std::optional(m.value); });
+  part("_used_err_minus", "lower half-width of the used ", [](const Measured& m) { return m.minus; });
+  part("_used_err_plus", "upper half-width of the used ", [](const Measured& m) { return m.plus; });
+  add(columns, about.name + "_route", [value](const RankedRow& row) {
+    const std::optional<Derived>& derived = row.candidate.answer.star.*value;
+    return derived ? text(derived->route) : CellValue();
   });
-  add_text(columns, "reason", [](const Source& source) { return source.answer.reason; });
-  add_text(columns, "flags", [](const Source& source) { return joined(source.answer.flags); });
-  return columns;
 }
 
-const std::vector<OwnColumn>& all_own_columns() {
-  static const std::vector<OwnColumn> columns = own_columns();
-  return columns;
+template <class Get>
+void add_edge_part(Columns& columns, const std::string& name, ZoneEdge edge, Get get) {
+  add(columns, name, [edge, get](const RankedRow& row) {
+    const LimitAtStar* const at_star = find_edge(row.candidate.answer, edge);
+    return at_star != nullptr ? number(get(*at_star)) : CellValue();
+  });
 }
 
-const ColumnHead& head_of(const OwnColumn& column) {
-  return std::visit([](const auto& each) -> const ColumnHead& { return each.head; }, column);
+void add_edge(Columns& columns, const std::string& name, ZoneEdge edge) {
+  using At = LimitAtStar;
+  using Part = std::optional<double>;
+  add_edge_part(columns, name + "_edge", edge,
+                [](const At& at) { return at.distance ? Part(at.distance->value) : Part(); });
+  add_edge_part(columns, name + "_edge_err_minus", edge,
+                [](const At& at) { return at.distance ? at.distance->minus : Part(); });
+  add_edge_part(columns, name + "_edge_err_plus", edge,
+                [](const At& at) { return at.distance ? at.distance->plus : Part(); });
+  add_edge_part(columns, name + "_insolation", edge, [](const At& at) { return Part(at.insolation); });
+  add_edge_part(columns, name + "_period", edge, [](const At& at) { return at.period; });
+  add_edge_part(columns, name + "_angular_separation", edge, [](const At& at) { return at.angular_separation; });
 }
 
-std::string_view store(Chunk& chunk, std::string text) {
-  chunk.storage.push_back(std::make_unique<std::string>(std::move(text)));
-  return *chunk.storage.back();
+void add_outcome(Columns& columns) {
+  add(columns, "status", [](const RankedRow& row) {
+    return CellValue(row.candidate.answer.status == Status::answered ? "answered" : "set aside");
+  });
+  add(columns, "reason", [](const RankedRow& row) { return text(row.candidate.answer.reason); });
+  add(columns, "flags",
+      [](const RankedRow& row) { return text(fmt::format("{}", fmt::join(row.candidate.answer.flags, ";"))); });
 }
 
-Cells text_cells(Chunk& chunk, const std::vector<Source>& sources,
-                 const std::function<std::string(const Source&)>& cell) {
-  std::vector<std::string_view> cells;
-  for (const Source& source : sources) cells.push_back(store(chunk, cell(source)));
-  return cells;
-}
-
-Cells number_cells(const std::vector<Source>& sources, const NumberColumn& column) {
-  std::vector<double> cells;
-  for (const Source& source : sources) {
-    const std::optional<double> value = column.cell(source);
-    cells.push_back(value && std::isfinite(*value) ? rounded(*value, written_digits) : no_value);
-  }
-  return cells;
-}
-
-Cells cells_of(Chunk& chunk, const std::vector<Source>& sources, const OwnColumn& column) {
-  if (const auto* const number = std::get_if<NumberColumn>(&column)) return number_cells(sources, *number);
-  return text_cells(chunk, sources, std::get<TextColumn>(column).cell);
+/// What the answers hang on beside the row.
+void add_basis(Columns& columns, const Settings& settings) {
+  add(columns, "limit_set", [key = settings.limits->key](const RankedRow&) { return CellValue(key); });
+  const std::string asymmetry = settings.asymmetry == Asymmetry::median ? "median" : "mode";
+  add(columns, "asymmetry", [asymmetry](const RankedRow&) { return CellValue(asymmetry); });
 }
 
 }  // namespace
 
-BoundsTable::BoundsTable(const LimitSet& set, std::vector<ColumnHead> kept) : set_(&set), kept_(kept.size()) {
-  for (const OwnColumn& column : all_own_columns()) head_.columns.push_back(head_of(column));
-  for (ColumnHead& column : kept) head_.columns.push_back(std::move(column));
-}
-
-std::vector<std::string> BoundsTable::own_names() {
-  std::vector<std::string> names;
-  for (const OwnColumn& column : all_own_columns()) names.push_back(head_of(column).name);
-  return names;
-}
-
-Chunk BoundsTable::chunk(const std::vector<ListRow>& rows, const std::vector<Answer>& answers) const {
-  std::vector<Source> sources;
-  for (std::size_t i = 0; i < rows.size(); ++i) sources.push_back({rows[i], answers[i], *set_});
-  Chunk chunk;
-  chunk.row_problems.resize(rows.size());
-  for (const OwnColumn& column : all_own_columns()) chunk.columns.push_back(cells_of(chunk, sources, column));
-  for (std::size_t k = 0; k < kept_; ++k)
-    chunk.columns.push_back(text_cells(chunk, sources, [k](const Source& source) { return source.row.kept[k]; }));
-  return chunk;
+std::vector<OutputColumn> bounds_columns(const Settings& settings, const std::vector<ColumnHead>& kept) {
+  Columns columns;
+  add(columns, "star", [](const RankedRow& row) { return text(row.candidate.row.star.name); });
+  add(columns, "planet", [](const RankedRow& row) { return text(row.candidate.row.planet.name); });
+  add_outcome(columns);
+  add_used(columns, Quantity::teff, &StarAnswer::teff);
+  add_used(columns, Quantity::luminosity, &StarAnswer::luminosity);
+  add_used(columns, Quantity::stellar_mass, &StarAnswer::stellar_mass);
+  add_used(columns, Quantity::distance, &StarAnswer::distance);
+  add_edge(columns, "optimistic_inner", ZoneEdge::optimistic_inner);
+  add_edge(columns, "conservative_inner", ZoneEdge::conservative_inner);
+  add_edge(columns, "conservative_outer", ZoneEdge::conservative_outer);
+  add_edge(columns, "optimistic_outer", ZoneEdge::optimistic_outer);
+  add_basis(columns, settings);
+  for (std::size_t i = 0; i < kept.size(); ++i)
+    columns.push_back({kept[i], [i](const RankedRow& row) { return text(row.candidate.row.kept.at(i)); }});
+  return columns;
 }
 
 }  // namespace hz::app

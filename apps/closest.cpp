@@ -19,6 +19,13 @@ std::string lower(std::string_view text) {
 /// A word of four letters may be two edits away, a longer one a few more.
 std::size_t near_enough(std::string_view word) { return 1 + word.size() / 4; }
 
+/// The beginning of a word stands for the whole of it as well as a single slip would.
+std::size_t distance_between(std::string_view word, std::string_view candidate) {
+  constexpr std::size_t telling = 3;
+  const bool begins = word.size() >= telling && candidate.starts_with(word);
+  return begins ? std::min<std::size_t>(1, candidate.size() - word.size()) : edit_distance(word, candidate);
+}
+
 }  // namespace
 
 std::size_t edit_distance(std::string_view from, std::string_view to) {
@@ -43,7 +50,7 @@ std::optional<std::string> closest(std::string_view word, std::span<const std::s
   std::optional<std::string> best;
   std::size_t best_distance = near_enough(word) + 1;
   for (const std::string& candidate : candidates) {
-    const std::size_t distance = edit_distance(wanted, lower(candidate));
+    const std::size_t distance = distance_between(wanted, lower(candidate));
     if (distance >= best_distance) continue;
     best = candidate;
     best_distance = distance;

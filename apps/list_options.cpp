@@ -99,4 +99,16 @@ std::vector<KeptColumn> kept_columns(const Arguments& arguments, const TableHead
   return kept_columns(arguments.value("keep").value_or("none"), input, written);
 }
 
+std::vector<std::string> kept_cells(const Chunk& chunk, std::size_t row, std::span<const KeptColumn> kept) {
+  std::vector<std::string> cells;
+  for (const KeptColumn& column : kept) cells.push_back(chunk.row_problems[row] ? "" : chunk.text(column.column, row));
+  return cells;
+}
+
+std::vector<ColumnHead> heads_of(std::span<const KeptColumn> kept) {
+  std::vector<ColumnHead> heads;
+  for (const KeptColumn& column : kept) heads.push_back(column.head);
+  return heads;
+}
+
 }  // namespace hz::app

@@ -40,6 +40,12 @@ struct KeptColumn {
 [[nodiscard]] std::vector<KeptColumn> kept_columns(const Arguments& arguments, const TableHead& input,
                                                    std::span<const std::string> written);
 
+/// The cells of these columns in a row, as text; empty ones for a row that could not be read.
+[[nodiscard]] std::vector<std::string> kept_cells(const Chunk& chunk, std::size_t row,
+                                                  std::span<const KeptColumn> kept);
+
+[[nodiscard]] std::vector<ColumnHead> heads_of(std::span<const KeptColumn> kept);
+
 /// The part of kept_columns behind the option's value; for tests.
 [[nodiscard]] std::vector<KeptColumn> kept_columns(const std::string& keep, const TableHead& input,
                                                    std::span<const std::string> written);

@@ -67,7 +67,7 @@ int complain(const std::string& sentence, int code) {
 /// A closed pipe ends the program without a word: whoever read it has what they wanted.
 int stopped() {
   const int code = exit_code::signal + stop_signal();
-  return stop_signal() == SIGPIPE ? code : complain("stopped; no file was written", code);
+  return stop_signal() == SIGPIPE ? code : complain("stopped before the end", code);
 }
 
 }  // namespace

@@ -2,6 +2,7 @@
 
 #include <fmt/format.h>
 
+#include <algorithm>
 #include <boost/program_options.hpp>
 #include <charconv>
 #include <cmath>
@@ -86,6 +87,14 @@ po::variables_map store(std::string_view command, const po::parsed_options& pars
   return map;
 }
 
+/// Boost takes `--teff --luminosity` for a value of --teff; a person has forgotten the value.
+void check_is_no_option(std::string_view command, std::span<const Option> options, const Option& option,
+                        const std::string& value) {
+  const auto is_meant = [&](const Option& other) { return value == fmt::format("--{}", other.name); };
+  if (std::any_of(options.begin(), options.end(), is_meant))
+    usage_error(command, fmt::format("--{} needs a value", option.name));
+}
+
 std::vector<std::string> values_of(const po::variables_map& map, const Option& option) {
   const po::variable_value& value = map[std::string(option.name)];
   if (value.empty()) return {};
@@ -112,7 +121,11 @@ Arguments Arguments::read(std::string_view command, std::span<const Option> opti
   const po::parsed_options parsed = parse(command, options, description, words);
   const po::variables_map map = store(command, parsed);
   Arguments result;
-  for (const Option& option : options) result.given_[std::string(option.name)] = values_of(map, option);
+  for (const Option& option : options) {
+    std::vector<std::string>& values = result.given_[std::string(option.name)];
+    values = values_of(map, option);
+    for (const std::string& value : values) check_is_no_option(command, options, option, value);
+  }
   result.words_ = po::collect_unrecognized(parsed.options, po::include_positional);
   if (!result.knows("help") || !result.has("help")) check_number_of_words(command, positionals, result.words_);
   return result;

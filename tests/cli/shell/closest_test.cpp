@@ -22,6 +22,8 @@ TEST(Closest, OffersWhatWasMeant) {
   EXPECT_EQ(closest("RANK", names), "rank");
 }
 
+TEST(Closest, ABeginningIsEnough) { EXPECT_EQ(closest("lim", names), "limits"); }
+
 TEST(Closest, OffersNothingFarAway) {
   EXPECT_EQ(closest("photosynthesis", names), std::nullopt);
   EXPECT_EQ(closest("", names), std::nullopt);

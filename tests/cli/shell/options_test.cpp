@@ -49,7 +49,10 @@ TEST(Arguments, NegativeNumbersAreValues) {
   EXPECT_EQ(read({"a", "--value=-0.5"}).value("value"), "-0.5");
 }
 
-TEST(Arguments, AnOptionIsNoValue) { EXPECT_THAT(trouble({"a", "--value", "-f"}), HasSubstr("--value needs a value")); }
+TEST(Arguments, AnOptionIsNoValue) {
+  EXPECT_THAT(trouble({"a", "--value", "-f"}), HasSubstr("--value needs a value"));
+  EXPECT_THAT(trouble({"a", "--value", "--list", "x"}), HasSubstr("--value needs a value"));
+}
 
 TEST(Arguments, ListsKeepTheirOrder) {
   EXPECT_THAT(read({"a", "--list", "y", "--list", "x"}).values("list"), ElementsAre("y", "x"));
