@@ -1,0 +1,79 @@
+#include <gmock/gmock.h>
+#include <gtest/gtest.h>
+
+#include "table_helpers.hpp"
+
+namespace hz {
+namespace {
+
+using ::testing::ElementsAre;
+using ::testing::HasSubstr;
+
+std::string refusal(std::string_view text) {
+  return testing::error_of([&] { (void)ColumnMap::parse(text, "map.toml"); });
+}
+
+TEST(ColumnMap, ReadsEveryKey) {
+  const auto map = ColumnMap::parse(R"toml(missing = ["-99", "unknown"]
+ignore = ["K"]
+[columns]
+teff = "T (phot)"
+teff_err_plus = "dT+"
+distance = { column = "d", unit = "pc" }
+star = "Host, components"
+)toml",
+                                    "map.toml");
+  EXPECT_THAT(map.missing_values, ElementsAre("-99", "unknown"));
+  ASSERT_EQ(map.ignored.size(), 1U);
+  EXPECT_EQ(map.ignored[0].column, "K");
+  EXPECT_EQ(map.ignored[0].place, "map.toml:2:11");
+  ASSERT_EQ(map.entries.size(), 4U);
+  for (const auto& entry : map.entries) {
+    if (entry.quantity == Quantity::distance) {
+      EXPECT_EQ(entry.column, "d");
+      EXPECT_EQ(entry.unit, "pc");
+      EXPECT_EQ(entry.place, "map.toml:6:1");
+    }
+    if (entry.part == ColumnPart::upper_half_width) {
+      EXPECT_EQ(entry.column, "dT+");
+      EXPECT_EQ(entry.quantity, Quantity::teff);
+    }
+  }
+}
+
+TEST(ColumnMap, EmptyIsFine) { EXPECT_TRUE(ColumnMap::parse("# nothing\n", "map.toml").entries.empty()); }
+
+TEST(ColumnMap, MistakesNameTheirPlace) {
+  EXPECT_THAT(refusal("colums = 1\n"), HasSubstr("map.toml:1:1: \"colums\" is not a key of a column map"));
+  EXPECT_THAT(refusal("[columns]\ntemperature = \"T\"\n"),
+              HasSubstr("map.toml:2:1: \"temperature\" is not a column name of hzmap"));
+  EXPECT_THAT(refusal("[columns]\nteff = 5\n"), HasSubstr("map.toml:2:8: teff must be text in quotes"));
+  EXPECT_THAT(refusal("[columns]\nteff = { colum = \"T\" }\n"),
+              HasSubstr("map.toml:2:10: \"colum\" is not known here"));
+  EXPECT_THAT(refusal("[columns]\nteff = { unit = \"K\" }\n"), HasSubstr("map.toml:2:1: teff names no column"));
+  EXPECT_THAT(refusal("[columns]\nteff = { column = \"T\", unit = \"AU\" }\n"),
+              HasSubstr("map.toml:2:31: \"AU\" is not a unit of teff; the canonical one is \"K\""));
+  EXPECT_THAT(refusal("[columns]\nstar = { column = \"T\", unit = \"K\" }\n"), HasSubstr("star has no unit"));
+  EXPECT_THAT(refusal("[columns]\nstar_err = \"T\"\n"), HasSubstr("\"star_err\" is not a column name"));
+  EXPECT_THAT(refusal("missing = \"-99\"\n"), HasSubstr("map.toml:1:11: missing must be a list of texts"));
+  EXPECT_THAT(refusal("missing = [-99]\n"), HasSubstr("map.toml:1:12: missing must be text in quotes"));
+  EXPECT_THAT(refusal("columns = 3\n"), HasSubstr("columns must be a section [columns]"));
+  EXPECT_THAT(refusal("[columns\n"), HasSubstr("map.toml:1:"));
+  EXPECT_THAT(refusal("[columns]\nteff = \"a\"\nteff = \"b\"\n"), HasSubstr("map.toml:3:"));
+}
+
+TEST(ColumnMap, ColumnsMustBeThere) {
+  const testing::Folder folder;
+  const auto list = folder.write("list.csv", "star,T\nLantern 1,5000\n");
+  const auto use = [&](std::string_view text) {
+    return testing::error_of([&] { (void)testing::read_list(list, ColumnMap::parse(text, "map.toml")); });
+  };
+  EXPECT_THAT(use("[columns]\nteff = \"Temp\"\n"), HasSubstr("map.toml:2:1: "));
+  EXPECT_THAT(use("[columns]\nteff = \"Temp\"\n"), HasSubstr("list.csv has no column named \"Temp\""));
+  EXPECT_THAT(use("ignore = [\"Temp\"]\n"), HasSubstr("has no column named \"Temp\""));
+  EXPECT_THAT(use("[columns]\nteff = \"T\"\nstellar_mass = \"T\"\n"),
+              HasSubstr("column \"T\" stands in the map twice"));
+}
+
+}  // namespace
+}  // namespace hz
