@@ -94,7 +94,8 @@ void AtomicFile::finish() {
 
 void AtomicFile::fail(const std::string& what, int error) const {
   const auto name = path_ == "-" ? std::string("standard output") : path_;
-  throw Error(Fault::output, error == 0 ? fmt::format("{} {}", name, what) : fmt::format("{} {}: {}", name, what, std::strerror(error)));
+  throw Error(Fault::output, error == 0 ? fmt::format("{} {}", name, what)
+                                        : fmt::format("{} {}: {}", name, what, std::strerror(error)));
 }
 
 void write_file(const std::string& path, std::string_view bytes) {

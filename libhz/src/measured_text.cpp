@@ -16,8 +16,15 @@ constexpr bool is_digit(char c) { return c >= '0' && c <= '9'; }
 // Signs beyond ASCII that stand for one of ours.
 std::string in_ascii(std::string_view text) {
   static constexpr std::array<std::pair<std::string_view, std::string_view>, 9> signs{{
-      {"±", "+-"}, {"\u2212", "-"}, {"\u2013", "-"}, {"≤", "<"}, {"≥", ">"},
-      {"\u00a0", " "}, {"\u2009", " "}, {"\u202f", " "}, {"\u2007", " "},
+      {"±", "+-"},
+      {"\u2212", "-"},
+      {"\u2013", "-"},
+      {"≤", "<"},
+      {"≥", ">"},
+      {"\u00a0", " "},
+      {"\u2009", " "},
+      {"\u202f", " "},
+      {"\u2007", " "},
   }};
   std::string out(text);
   for (const auto& [from, to] : signs) out = words::replaced(out, from, to);
@@ -142,7 +149,8 @@ bool half_widths(Scanner& scan, std::string_view number, Measured& measured) {
 
 bool is_unit_word(std::string_view word) {
   const auto first = static_cast<unsigned char>(word.front());
-  const bool starts_well = (first >= 'a' && first <= 'z') || (first >= 'A' && first <= 'Z') || first == '%' || first >= 0x80U;
+  const bool starts_well =
+      (first >= 'a' && first <= 'z') || (first >= 'A' && first <= 'Z') || first == '%' || first >= 0x80U;
   return starts_well && word.find_first_of("+<>,;=") == std::string_view::npos;
 }
 
@@ -181,7 +189,8 @@ Result<MeasuredText> parse_measured(std::string_view text, std::string_view colu
 }
 
 bool is_missing(std::string_view text) {
-  static constexpr std::array<std::string_view, 10> spellings{"", "nan", "null", "none", "n/a", "na", "-", "--", "...", "…"};
+  static constexpr std::array<std::string_view, 10> spellings{"",   "nan", "null", "none", "n/a",
+                                                              "na", "-",   "--",   "...",  "…"};
   const auto bare = words::trimmed(text);
   if (bare.size() > 4 || (!bare.empty() && bare.front() >= '0' && bare.front() <= '9')) return false;
   return std::find(spellings.begin(), spellings.end(), words::lower_case(bare)) != spellings.end();

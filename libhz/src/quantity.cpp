@@ -16,7 +16,18 @@ namespace {
 constexpr auto quantity_count = static_cast<std::size_t>(Quantity::note) + 1;
 
 // Cells of the catalogue never hold a separator or a quote (a test reads it with the full reader).
-enum Cell : std::size_t { name_cell, symbol_cell, unit_cell, unit_votable_cell, ucd_cell, ucd_also_cell, role_cell, accept_cell, description_cell, cell_count };
+enum Cell : std::size_t {
+  name_cell,
+  symbol_cell,
+  unit_cell,
+  unit_votable_cell,
+  ucd_cell,
+  ucd_also_cell,
+  role_cell,
+  accept_cell,
+  description_cell,
+  cell_count
+};
 
 std::vector<std::string> spellings(std::string_view cell) {
   std::vector<std::string> out;

@@ -21,8 +21,8 @@ enum class Dimension {
   acceleration,  // cm s^-2
 };
 
-/// Size of a unit in the one named above; nullopt when the spelling is unknown in this dimension. Understands a number in
-/// front ("1361W.m**-2").
+/// Size of a unit in the one named above; nullopt when the spelling is unknown in this dimension. Understands a number
+/// in front ("1361W.m**-2").
 [[nodiscard]] std::optional<double> unit_size(Dimension dimension, std::string_view unit);
 
 }  // namespace hz

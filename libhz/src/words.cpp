@@ -17,7 +17,8 @@ constexpr char lower(char c) { return c >= 'A' && c <= 'Z' ? static_cast<char>(c
 std::string star_signs_spelled(std::string_view text) {
   std::string out;
   for (std::size_t i = 0; i < text.size(); ++i) {
-    const bool ends_word = i > 0 && is_ascii_letter(text[i - 1]) && (i + 1 == text.size() || !is_ascii_letter(text[i + 1]));
+    const bool ends_word =
+        i > 0 && is_ascii_letter(text[i - 1]) && (i + 1 == text.size() || !is_ascii_letter(text[i + 1]));
     if (text[i] == '*' && ends_word && text.substr(i, 2) != "**") {
       out += "star";
     } else {

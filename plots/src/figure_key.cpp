@@ -55,7 +55,7 @@ private:
           return planet.semi_major_axis.minus || planet.semi_major_axis.plus;
         })) {
       key_.start_group();
-      key_.add_sample({WhiskerMark{-8, 8, 0, whisker_cap, false, false, {palette::ink, 0.8, {}}}}, {{"68 %"}});
+      key_.add_sample({WhiskerMark{-8, 8, 0, whisker_cap, false, false, {palette::ink, 0.7, {}}}}, {{"68 %"}});
     }
   }
 
@@ -74,6 +74,7 @@ private:
   void add_sizes() {
     key_.start_group();
     if (any_planet([](const FigurePlanet& planet) { return measured_radius(planet).has_value(); })) {
+      key_.add_words({{"radius"}});
       const bool giants = any_planet([](const FigurePlanet& planet) { return measured_radius(planet) > 6; });
       for (const int radius : {1, giants ? 4 : 2, giants ? 12 : 4}) {
         Text words{{std::to_string(radius)}};
@@ -102,7 +103,7 @@ private:
     if (any_limit([](const FigureLimit& limit) { return !is_conservative(limit.role); }))
       add_zone(palette::optimistic, limit_stroke(LimitRole::optimistic_inner), "optimistic zone");
     if (any_limit([](const FigureLimit& limit) { return limit.distance.minus || limit.distance.plus; }))
-      key_.add_words({{"(edges fade over 68 %)"}});
+      key_.add_words({{"edges fade over their 68 %"}});
     if (any_limit([](const FigureLimit& limit) { return limit.held; })) add_held();
   }
 

@@ -6,10 +6,11 @@
 
 namespace hz::plots {
 
-/// A label that wants its middle at `at`.
+/// A label that wants its middle at `at`; a fixed one is in the way of the others.
 struct Label {
   double at = 0;
   double width = 0;
+  bool fixed = false;
 };
 
 /// Where labels may stand, and how.
@@ -20,7 +21,7 @@ struct LabelSpace {
 };
 
 /// The middles of the labels in one row, in the given order, with the least sum of squared shifts; nullopt when the row
-/// is too short for them. `labels` rise in `at`.
+/// is too short for them, or a fixed one would have to move. `labels` rise in `at`.
 [[nodiscard]] std::optional<std::vector<double>> spread(const std::vector<Label>& labels, const LabelSpace& space);
 
 /// The way of one label's leader: its x in every row it passes, and last the middle of the label, which stands in the
@@ -30,9 +31,18 @@ struct LabelPath {
   [[nodiscard]] std::size_t row() const { return path.size() - 1; }
 };
 
+/// Something that stands in the rows from `from_row` on.
+struct Obstacle {
+  double low = 0;
+  double high = 0;
+  std::size_t from_row = 0;
+};
+
 /// Labels in as few rows as keep every shift within `most_shift`, else in those with the smallest largest shift; leaders
-/// pass between the labels of nearer rows and never cross. nullopt when no number of rows has room.
+/// pass between the labels of nearer rows and never cross. Obstacles (by rising `low`) are kept clear of; those outside the
+/// space do not count. nullopt when no number of rows has room.
 [[nodiscard]] std::optional<std::vector<LabelPath>> label_rows(const std::vector<Label>& labels,
-                                                               const LabelSpace& space, double most_shift);
+                                                               const LabelSpace& space, double most_shift,
+                                                               const std::vector<Obstacle>& obstacles = {});
 
 }  // namespace hz::plots

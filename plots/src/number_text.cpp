@@ -46,7 +46,7 @@ std::string measured_text(const Measured& measured) {
   std::vector<std::string> parts{to_place(measured.value, decimals), to_place(plus, decimals),
                                  to_place(minus, decimals)};
   trim_together(parts);
-  if (parts[1] == parts[2]) return parts[0] + " ± " + parts[1];
+  if (parts[1] == parts[2]) return parts[0] + " ±\u00A0" + parts[1];
   return parts[0] + " +" + parts[1] + "/−" + parts[2];
 }
 

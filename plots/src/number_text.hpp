@@ -8,7 +8,7 @@
 namespace hz::plots {
 
 /// `4410 ± 70`, `0.165 ± 0.009`, `4410 +80/−60`: half-widths with two digits, the value to the same decimal, zeros that
-/// end all of them left out. Without a half-width above 0: four digits.
+/// end all of them left out; ± does not part from its number. Without a half-width above 0: four digits.
 [[nodiscard]] std::string measured_text(const Measured& measured);
 
 /// Two digits; `> 0.99` above 0.99 and `< 0.01` below 0.01.

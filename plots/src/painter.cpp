@@ -32,27 +32,14 @@ public:
     stroke(arc.stroke);
   }
 
-  void operator()(const SectorMark& sector) const {
-    const Point c = sector.center;
-    const Pattern fill(cairo_pattern_create_radial(c.x, c.y, sector.inner, c.x, c.y, sector.outer));
-    add_stops(fill.get(), sector.stops, sector.inner, sector.outer);
-    cairo_new_path(cr_);
-    cairo_arc(cr_, c.x, c.y, sector.outer, -sector.half_angle, sector.half_angle);
-    cairo_arc_negative(cr_, c.x, c.y, sector.inner, sector.half_angle, -sector.half_angle);
-    fill_with(fill.get());
-  }
+  void operator()(const SectorMark& sector) const { fill_ground(sector); }
 
-  void operator()(const BarMark& bar) const {
-    const Pattern fill(cairo_pattern_create_linear(bar.box.x, 0, bar.box.right(), 0));
-    add_stops(fill.get(), bar.stops, bar.box.x, bar.box.right());
-    cairo_new_path(cr_);
-    cairo_rectangle(cr_, bar.box.x, bar.box.y, bar.box.width, bar.box.height);
-    fill_with(fill.get());
-  }
+  void operator()(const BarMark& bar) const { fill_ground(bar); }
 
   void operator()(const DiscMark& disc) const {
     if (disc.halo > 0) fill_disc(disc, disc.radius + disc.ring.width / 2 + disc.halo, palette::white);
-    fill_disc(disc, disc.radius, disc.ground);
+    fill_disc(disc, disc.radius, palette::white);
+    fill_disc(disc, disc.radius - disc.gap, disc.ground);
     if (disc.filled > 0) fill_water(disc);
     circle(disc.center, disc.radius);
     stroke(disc.ring);
@@ -70,7 +57,10 @@ public:
     if (!whisker.high_open) line(whisker.high, whisker.y - whisker.cap, whisker.high, whisker.y + whisker.cap);
   }
 
-  void operator()(const TextMark& text) const { measure_.draw(cr_, text); }
+  void operator()(const TextMark& text) const {
+    if (text.ground) interrupt_lines(text);
+    measure_.draw(cr_, text);
+  }
 
 private:
   void set_source(const Color& color) const { cairo_set_source_rgb(cr_, color.red, color.green, color.blue); }
@@ -85,9 +75,59 @@ private:
     cairo_stroke(cr_);
   }
 
-  void fill_with(cairo_pattern_t* pattern) const {
-    cairo_set_source(cr_, pattern);
+  [[nodiscard]] static Pattern colors(const SectorMark& sector) {
+    const Point c = sector.center;
+    Pattern pattern(cairo_pattern_create_radial(c.x, c.y, sector.inner, c.x, c.y, sector.outer));
+    add_stops(pattern.get(), sector.stops, sector.inner, sector.outer);
+    return pattern;
+  }
+
+  [[nodiscard]] static Pattern colors(const BarMark& bar) {
+    Pattern pattern(cairo_pattern_create_linear(bar.box.x, 0, bar.box.right(), 0));
+    add_stops(pattern.get(), bar.stops, bar.box.x, bar.box.right());
+    return pattern;
+  }
+
+  void outline(const SectorMark& sector) const {
+    const Point c = sector.center;
+    cairo_new_path(cr_);
+    cairo_arc(cr_, c.x, c.y, sector.outer, -sector.half_angle, sector.half_angle);
+    cairo_arc_negative(cr_, c.x, c.y, sector.inner, sector.half_angle, -sector.half_angle);
+  }
+
+  void outline(const BarMark& bar) const {
+    cairo_new_path(cr_);
+    cairo_rectangle(cr_, bar.box.x, bar.box.y, bar.box.width, bar.box.height);
+  }
+
+  template <class GroundMark>
+  void fill_ground(const GroundMark& ground) const {
+    const Pattern pattern = colors(ground);
+    outline(ground);
+    cairo_set_source(cr_, pattern.get());
     cairo_fill(cr_);
+  }
+
+  /// A broad outline of the words in the colours of the ground.
+  void interrupt_lines(const TextMark& text) const {
+    set_source(palette::white);
+    stroke_around(text);
+    cairo_save(cr_);
+    std::visit([&](const auto& ground) { outline(ground); }, *text.ground);
+    cairo_clip(cr_);
+    const Pattern pattern = std::visit([](const auto& ground) { return colors(ground); }, *text.ground);
+    cairo_set_source(cr_, pattern.get());
+    stroke_around(text);
+    cairo_restore(cr_);
+  }
+
+  void stroke_around(const TextMark& text) const {
+    cairo_new_path(cr_);
+    measure_.outline(cr_, text);
+    cairo_set_line_width(cr_, 0.3 * text.style.size);
+    cairo_set_line_join(cr_, CAIRO_LINE_JOIN_ROUND);
+    cairo_set_dash(cr_, nullptr, 0, 0);
+    cairo_stroke(cr_);
   }
 
   static void add_stops(cairo_pattern_t* pattern, const std::vector<ColorStop>& stops, double from, double to) {
@@ -113,7 +153,7 @@ private:
   void fill_water(const DiscMark& disc) const {
     const double half = chord_half_angle(disc.filled);
     cairo_new_path(cr_);
-    cairo_arc(cr_, disc.center.x, disc.center.y, disc.radius, full_circle / 4 - half, full_circle / 4 + half);
+    cairo_arc(cr_, disc.center.x, disc.center.y, disc.radius - disc.gap, full_circle / 4 - half, full_circle / 4 + half);
     cairo_close_path(cr_);
     set_source(disc.water);
     cairo_fill(cr_);

@@ -12,11 +12,12 @@ namespace hz::plots {
 /// A radius that was measured; a limit is none.
 [[nodiscard]] std::optional<double> measured_radius(const FigurePlanet& planet);
 
-/// Radius of the disc, pt, for one Earth radius drawn as `unit`: the area grows with the radius, between the smallest
-/// disc that can show a height and the disc of 16 Earth radii. Without a radius 0.8 units.
+/// Radius of the disc, pt, for one Earth radius drawn as `unit`: it grows as the radius to the power 0.4,
+/// so that giants leave room, between the smallest disc that can show a height and that of 16 Earth radii. Without a
+/// radius 1.1 units.
 [[nodiscard]] double disc_radius(std::optional<double> radius, double unit);
 
-/// The disc: a dashed ring without a radius, grey inside without a probability.
+/// The disc: a dashed ring apart from it without a radius, grey inside without a probability.
 [[nodiscard]] DiscMark disc(Point center, double size, std::optional<double> p, bool known_radius);
 
 /// The 68 % of the semi-major axis along the axis, cut where the axis ends; nullopt without half-widths.

@@ -43,15 +43,15 @@ std::vector<Mark> words_beside(const Canvas& canvas, const PlanetSpot& spot, con
   const std::string& name = spot.planet->name;
   if (!plan.labels_at_side) {
     const Point above{spot.x, -std::max(spot.size, plan.clearance) - 2};
-    return {haloed(plan, "label:" + name, canvas.text_at(spot.letter, plan.letter, above, Align::center))};
+    return {over_ground(plan, "label:" + name, canvas.text_at(spot.letter, plan.letter, above, Align::center))};
   }
   const Point upper{spot.x + 0.75 * spot.size + 2, -0.55 * spot.size - 1.5};
   std::vector<Mark> words{
-      haloed(plan, "label:" + name, canvas.text_at(spot.letter, plan.letter, upper, Align::left))};
+      over_ground(plan, "label:" + name, canvas.text_at(spot.letter, plan.letter, upper, Align::left))};
   if (spot.p.empty()) return words;
   const double below = whisker_y(spot.size, plan) + whisker_cap + 2 + cap_height * plan.p.size;
   const Point lower{spot.x + 0.6 * spot.size + 2.5, below};
-  words.push_back(haloed(plan, "p:" + name, canvas.text_at(spot.p, plan.p, lower, Align::left)));
+  words.push_back(over_ground(plan, "p:" + name, canvas.text_at(spot.p, plan.p, lower, Align::left)));
   return words;
 }
 
@@ -145,8 +145,8 @@ Mark disc_mark(const PlanetSpot& spot, const PlanetRowPlan& plan) {
 
 }  // namespace
 
-Mark haloed(const PlanetRowPlan& plan, std::string tag, TextMark text) {
-  text.style.halo = plan.ground(text.box.center());
+Mark over_ground(const PlanetRowPlan& plan, std::string tag, TextMark text) {
+  text.ground = plan.ground;
   return {std::move(tag), std::move(text)};
 }
 

@@ -1,6 +1,7 @@
 // The planets of one star along an axis, with labels that never touch.
 #pragma once
 #include <functional>
+#include <optional>
 #include <vector>
 
 #include "hz/plots/system.hpp"
@@ -8,6 +9,13 @@
 #include "log_scale.hpp"
 
 namespace hz::plots {
+
+/// A line that comes down from the top of the page to `height` above the axis, between x = low and high.
+struct Curtain {
+  double low = 0;
+  double high = 0;
+  double height = 0;
+};
 
 /// How a kind of figure wants its planets; the axis lies at y = 0.
 struct PlanetRowPlan {
@@ -18,7 +26,8 @@ struct PlanetRowPlan {
   double clearance = 0;         // half the height of what labels and whiskers keep clear of
   TextStyle letter;
   TextStyle p;
-  std::function<Color(Point)> ground;    // the colour behind a place
+  std::optional<Ground> ground;          // of the zone
+  std::vector<Curtain> curtains;         // by rising x; labels keep clear of them
   std::function<Point(Point)> position;  // of a disc that belongs at x and stepped aside by y
 };
 

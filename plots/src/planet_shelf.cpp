@@ -1,6 +1,7 @@
 #include "planet_shelf.hpp"
 
 #include <algorithm>
+#include <cmath>
 
 #include "hz/error.hpp"
 #include "palette.hpp"
@@ -22,13 +23,26 @@ std::vector<Mark> PlanetShelf::filled(const std::vector<const PlanetSpot*>& spot
   std::vector<Label> labels;
   for (const PlanetSpot* spot : spots) labels.push_back({spot->x, width(*spot)});
   const LabelSpace space{plan_.axis.x0 - 6, std::min(plan_.axis.x1 + 10, canvas_.width() - page_margin), between_labels};
-  const auto paths = label_rows(labels, space, most_shift);
+  auto paths = label_rows(labels, space, most_shift, obstacles());
+  if (!paths) paths = label_rows(labels, space, most_shift);
   if (!paths)
     throw Error(Fault::usage, "the page is too narrow for the labels of so many planets; choose a larger --width");
   std::vector<Mark> marks;
   for (std::size_t i = 0; i < spots.size(); ++i) marks.push_back(leader(*spots[i], (*paths)[i]));
   for (std::size_t i = 0; i < spots.size(); ++i) add_words(marks, *spots[i], (*paths)[i]);
   return marks;
+}
+
+/// A curtain hangs in the rows that reach higher than its end.
+std::vector<Obstacle> PlanetShelf::obstacles() const {
+  std::vector<Obstacle> all;
+  if (side_ > 0) return all;
+  for (const Curtain& curtain : plan_.curtains) {
+    std::size_t row = 0;
+    while (std::abs(far(row)) + before_words < curtain.height) ++row;
+    all.push_back({curtain.low, curtain.high, row});
+  }
+  return all;
 }
 
 double PlanetShelf::width(const PlanetSpot& spot) const {
@@ -58,11 +72,11 @@ void PlanetShelf::add_words(std::vector<Mark>& marks, const PlanetSpot& spot, co
   const double middle = label.path.back();
   const bool alone_above = spot.p.empty() && side_ < 0;  // then it stands where P would, at the end of its leader
   const Point letter{middle, alone_above ? top + height() : top + cap(plan_.letter)};
-  marks.push_back(haloed(plan_, "label:" + spot.planet->name,
+  marks.push_back(over_ground(plan_, "label:" + spot.planet->name,
                          canvas_.text_at(spot.letter, plan_.letter, letter, Align::center)));
   if (spot.p.empty()) return;
   const Point p{middle, top + height()};
-  marks.push_back(haloed(plan_, "p:" + spot.planet->name, canvas_.text_at(spot.p, plan_.p, p, Align::center)));
+  marks.push_back(over_ground(plan_, "p:" + spot.planet->name, canvas_.text_at(spot.p, plan_.p, p, Align::center)));
 }
 
 }  // namespace hz::plots

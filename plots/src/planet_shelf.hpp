@@ -24,6 +24,7 @@ private:
   /// The edge of a row that faces the axis, and the opposite one.
   [[nodiscard]] double near(std::size_t row) const;
   [[nodiscard]] double far(std::size_t row) const { return near(row) + side_ * height(); }
+  [[nodiscard]] std::vector<Obstacle> obstacles() const;
   [[nodiscard]] Mark leader(const PlanetSpot& spot, const LabelPath& label) const;
   void add_words(std::vector<Mark>& marks, const PlanetSpot& spot, const LabelPath& label) const;
 

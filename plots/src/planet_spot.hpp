@@ -17,7 +17,7 @@ struct PlanetSpot {
   std::optional<WhiskerMark> whisker;
 };
 
-/// Text with a halo of the colour behind it.
-[[nodiscard]] Mark haloed(const PlanetRowPlan& plan, std::string tag, TextMark text);
+/// Text that interrupts the lines behind it.
+[[nodiscard]] Mark over_ground(const PlanetRowPlan& plan, std::string tag, TextMark text);
 
 }  // namespace hz::plots

@@ -32,6 +32,7 @@ struct Mover {
     text.baseline = text.baseline + by;
     text.box.x += by.x;
     text.box.y += by.y;
+    if (text.ground) std::visit(*this, *text.ground);
   }
 };
 

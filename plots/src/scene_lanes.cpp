@@ -113,10 +113,6 @@ private:
     add_zone(row, star);
     add_star(row, star);
     add_best(row, star);
-    const auto shade = zone_shade(star.limits, plan_.axis);
-    plan_.ground = [&](Point p) {
-      return std::abs(p.y) < plan_.clearance ? shade_at(shade, p.x) : palette::white;
-    };
     for (Mark& mark : planet_row(canvas_, star, plan_)) row.push_back(std::move(mark));
     Box box = extent(row.front().shape);
     for (const Mark& mark : row) box = box.united(extent(mark.shape));
@@ -146,10 +142,10 @@ private:
 
   void add_star(std::vector<Mark>& row, const FigureStar& star) const {
     const Color tint = star_tint(star.teff.value);
-    row.push_back({"star", DiscMark{{columns_.tint_x, 0}, tint_size, 0, tint, tint, {palette::grey, 0.6, {}}, 0}});
-    const Point name{columns_.names_right, -1.2};
+    row.push_back({"star", DiscMark{{columns_.tint_x, 0}, tint_size, 0, 0, tint, tint, {palette::grey, 0.6, {}}, 0}});
+    const Point name{columns_.names_right, -2};
     row.push_back({"star name", canvas_.text_at(name_of(star), canvas_.names(), name, Align::right)});
-    const Point below{columns_.names_right, 1.6 + cap_height * canvas_.size()};
+    const Point below{columns_.names_right, 2.6 + cap_height * canvas_.size()};
     row.push_back({"star fact", canvas_.text_at(temperature(star), canvas_.quiet_words(), below, Align::right)});
   }
 

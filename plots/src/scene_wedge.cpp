@@ -30,7 +30,7 @@ struct StarWords {
 StarWords star_words(const Canvas& canvas, const FigureStar& star, double width) {
   const TextMeasure& measure = canvas.measure();
   StarWords words{wrapped(measure, measure.printable(star.name), canvas.names(), width, 3), {}};
-  for (const std::string& fact : {measured_text(star.teff) + " K", measured_text(star.luminosity) + " L⊙"})
+  for (const std::string& fact : {measured_text(star.teff) + "\u00A0K", measured_text(star.luminosity) + "\u00A0L⊙"})
     for (Text& line : wrapped(measure, measure.printable(fact), canvas.quiet_words(), width, 2))
       words.facts.push_back(std::move(line));
   return words;
@@ -68,9 +68,7 @@ private:
 
   void add_zone() {
     if (frame_.shade.empty()) return;
-    std::vector<ColorStop> stops = frame_.shade;
-    for (ColorStop& stop : stops) stop.at -= frame_.star_x;
-    add("zone", SectorMark{center(), stops.front().at, stops.back().at, frame_.half_angle, stops});
+    add("zone", frame_.zone());
   }
 
   void add_arc(std::string tag, double distance, const Stroke& stroke) {
@@ -104,7 +102,7 @@ private:
   void add_star(const StarWords& words) {
     const double size = 2 * canvas_.size() - 5;
     const Color tint = star_tint(star_.teff.value);
-    add("star", DiscMark{center(), size, 0, tint, tint, {palette::grey, 0.7, {}}, 0});
+    add("star", DiscMark{center(), size, 0, 0, tint, tint, {palette::grey, 0.7, {}}, 0});
     double y = -size - 5 - (static_cast<double>(words.name.size()) - 1) * line_pitch * canvas_.names().size;
     for (const Text& line : words.name) add_line("star name", line, canvas_.names(), y);
     y = size + 5 + cap_height * canvas_.size();
@@ -142,7 +140,7 @@ PlanetRowPlan side_label_plan(const Canvas& canvas, FilledZone zone) {
 
 /// The wedge opens as far as this at its outermost ring.
 double half_angle(const Canvas& canvas, double star_x, const LogScale& axis) {
-  const double half_height = std::clamp(0.15 * canvas.width(), 46.0, 76.0);
+  const double half_height = std::clamp(0.16 * canvas.width(), 50.0, 78.0);
   return std::asin(std::min(0.5, half_height / (axis.x1 - star_x)));
 }
 
@@ -181,10 +179,10 @@ double add_rulers(Canvas& canvas, const FigureStar& star, const LogScale& axis, 
 
 }  // namespace
 
-Color WedgeFrame::ground(Point p) const {
-  const double from_star = std::hypot(p.x - star_x, p.y);
-  if (std::abs(p.y) > from_star * std::sin(half_angle)) return palette::white;
-  return shade_at(shade, star_x + from_star);
+SectorMark WedgeFrame::zone() const {
+  std::vector<ColorStop> stops = shade;
+  for (ColorStop& stop : stops) stop.at -= star_x;
+  return {{star_x, 0}, stops.front().at, stops.back().at, half_angle, stops};
 }
 
 Point WedgeFrame::on_ring(double x, double y) const {
@@ -205,11 +203,13 @@ Scene wedge_scene(const FigureStar& star, const FigureOptions& options) {
   frame.axis = plan.axis = wedge_axis(canvas, star, plan, page_margin + column + 8);
   frame.half_angle = half_angle(canvas, frame.star_x, frame.axis);
   frame.shade = zone_shade(star.limits, frame.axis);
-  plan.ground = [&](Point p) { return frame.ground(p); };
+  if (!frame.shade.empty()) plan.ground = frame.zone();
   plan.position = [&](Point p) { return frame.on_ring(p.x, p.y); };
 
-  const std::vector<Mark> body = Wedge(canvas, star, frame).body(words, plan);
   const LimitTitles titles(canvas, star, frame);
+  plan.curtains = titles.curtains();
+
+  const std::vector<Mark> body = Wedge(canvas, star, frame).body(words, plan);
   const Box reach = united_extent(body);
   const double star_y = page_margin + titles.height() + 4 - reach.y;
   for (Mark& mark : titles.marks(page_margin, star_y)) canvas.add(mark.tag, mark.shape);

@@ -61,6 +61,8 @@ void make_scalable(PangoContext* context) {
   pango_context_set_base_dir(context, PANGO_DIRECTION_LTR);
 }
 
+constexpr gunichar no_break_space = 0xA0;
+
 int pango_units(double points) { return static_cast<int>(std::lround(points * PANGO_SCALE)); }
 
 void insert(PangoAttrList* list, PangoAttribute* attribute, std::size_t from, std::size_t to) {
@@ -102,17 +104,6 @@ Owned<PangoLayout> layout_of(PangoContext* context, const Text& text, const Text
   return layout;
 }
 
-void set_source(cairo_t* cr, const Color& color) { cairo_set_source_rgb(cr, color.red, color.green, color.blue); }
-
-void draw_halo(cairo_t* cr, PangoLayoutLine* line, const TextMark& mark) {
-  cairo_move_to(cr, mark.baseline.x, mark.baseline.y);
-  pango_cairo_layout_line_path(cr, line);
-  set_source(cr, *mark.style.halo);
-  cairo_set_line_join(cr, CAIRO_LINE_JOIN_ROUND);
-  cairo_set_line_width(cr, 0.3 * mark.style.size);
-  cairo_stroke(cr);
-}
-
 }  // namespace
 
 struct TextMeasure::Pango {
@@ -125,6 +116,14 @@ struct TextMeasure::Pango {
     pango_fc_font_map_set_config(PANGO_FC_FONT_MAP(map.get()), config.get());
     context.reset(pango_font_map_create_context(map.get()));
     make_scalable(context.get());
+  }
+
+  /// The words laid out for a surface and its scale.
+  [[nodiscard]] Owned<PangoLayout> on(cairo_t* cr, const TextMark& mark) const {
+    const Owned<PangoContext> surface(pango_font_map_create_context(map.get()));
+    make_scalable(surface.get());
+    pango_cairo_update_context(cr, surface.get());
+    return layout_of(surface.get(), mark.text, mark.style);
   }
 
   [[nodiscard]] bool holds(gunichar character) const {
@@ -162,7 +161,7 @@ Text TextMeasure::printable(std::string_view typed) const {
     if (text.empty() || text.back().script != script) text.push_back({"", script});
     std::string& words = text.back().text;
     if (sun) words += "\u2299";
-    else if (g_unichar_isspace(character) || g_unichar_iscntrl(character)) words += ' ';
+    else if ((g_unichar_isspace(character) && character != no_break_space) || g_unichar_iscntrl(character)) words += ' ';
     else if (pango_->holds(character)) words.append(at, static_cast<const char*>(g_utf8_next_char(at)));
     else words += replacement_sign;
   }
@@ -170,15 +169,17 @@ Text TextMeasure::printable(std::string_view typed) const {
 }
 
 void TextMeasure::draw(cairo_t* cr, const TextMark& mark) const {
-  const Owned<PangoContext> context(pango_font_map_create_context(pango_->map.get()));
-  make_scalable(context.get());
-  pango_cairo_update_context(cr, context.get());
-  const Owned<PangoLayout> layout = layout_of(context.get(), mark.text, mark.style);
-  PangoLayoutLine* line = pango_layout_get_line_readonly(layout.get(), 0);
-  if (mark.style.halo) draw_halo(cr, line, mark);
+  const Color& color = mark.style.color;
+  cairo_set_source_rgb(cr, color.red, color.green, color.blue);
   cairo_move_to(cr, mark.baseline.x, mark.baseline.y);
-  set_source(cr, mark.style.color);
-  pango_cairo_show_layout_line(cr, line);
+  const Owned<PangoLayout> layout = pango_->on(cr, mark);
+  pango_cairo_show_layout_line(cr, pango_layout_get_line_readonly(layout.get(), 0));
+}
+
+void TextMeasure::outline(cairo_t* cr, const TextMark& mark) const {
+  cairo_move_to(cr, mark.baseline.x, mark.baseline.y);
+  const Owned<PangoLayout> layout = pango_->on(cr, mark);
+  pango_cairo_layout_line_path(cr, pango_layout_get_line_readonly(layout.get(), 0));
 }
 
 }  // namespace hz::plots

@@ -33,7 +33,10 @@ public:
   /// replacement_sign for every character the faces lack. Signs of the Sun and the Earth become subscripts.
   [[nodiscard]] Text printable(std::string_view typed) const;
 
+  /// Fills the words with their colour.
   void draw(cairo_t* cr, const TextMark& mark) const;
+  /// Adds the outlines of the words to the current path.
+  void outline(cairo_t* cr, const TextMark& mark) const;
 
 private:
   struct Pango;

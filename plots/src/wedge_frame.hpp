@@ -16,8 +16,8 @@ struct WedgeFrame {
 
   /// Of the ring at this distance (au).
   [[nodiscard]] double ring(double distance) const { return axis.x(distance) - star_x; }
-  /// The colour behind a place.
-  [[nodiscard]] Color ground(Point p) const;
+  /// The zone in its shades; there must be one.
+  [[nodiscard]] SectorMark zone() const;
   /// A place on the ring that meets the axis at x, `y` below the axis.
   [[nodiscard]] Point on_ring(double x, double y) const;
 };

@@ -11,7 +11,6 @@
 namespace hz::plots {
 namespace {
 
-constexpr double drop = 14;             // height of the slanted part of the leaders
 constexpr double between_rows = 4;
 constexpr double between_leaders = 2.5;  // where they turn down
 
@@ -28,7 +27,7 @@ LimitTitles::LimitTitles(const Canvas& canvas, const FigureStar& star, const Wed
 }
 
 double LimitTitles::height() const {
-  return limits_.empty() ? 0 : static_cast<double>(rows_) * row_height() + drop;
+  return limits_.empty() ? 0 : static_cast<double>(rows_) * row_height() + drop_;
 }
 
 std::vector<Mark> LimitTitles::marks(double top, double star_y) const {
@@ -46,15 +45,24 @@ double LimitTitles::row_bottom(std::size_t row, double top) const {
   return top + static_cast<double>(rows_ - row) * row_height() - between_rows;
 }
 
-double LimitTitles::arc_end(std::size_t i) const {
-  return frame_.star_x + frame_.ring(limits_[i]->distance.value) * std::cos(frame_.half_angle);
+Point LimitTitles::arc_end(std::size_t i) const {
+  const double ring = frame_.ring(limits_[i]->distance.value);
+  return {frame_.star_x + ring * std::cos(frame_.half_angle), -ring * std::sin(frame_.half_angle)};
+}
+
+std::vector<Curtain> LimitTitles::curtains() const {
+  std::vector<Curtain> all;
+  for (std::size_t i = 0; i < limits_.size(); ++i) {
+    const Point end = arc_end(i);
+    all.push_back({std::min(end.x, elbows_[i]) - 0.5, std::max(end.x, elbows_[i]) + 0.5, -end.y});
+  }
+  return all;
 }
 
 /// Names in one line each if their leaders stay steep, else broken at blanks, else in several rows.
 void LimitTitles::choose_lines() {
-  const double steep = 0.14 * canvas_.width();
-  if (arrange(canvas_.width(), 1, steep) && rows_ == 1) return;
-  if (!arrange(0.19 * canvas_.width(), 3, 2 * steep))
+  if (arrange(canvas_.width(), 1, 0.14 * canvas_.width()) && rows_ == 1) return;
+  if (!arrange(0.19 * canvas_.width(), 3, canvas_.width()))
     throw Error(Fault::usage, "the page is too narrow for the names of the limits; choose a larger --width");
 }
 
@@ -69,8 +77,8 @@ bool LimitTitles::arrange(double width, std::size_t most_lines, double most_shif
     lines_.push_back(wrapped(canvas_.measure(), title, style(), width, most_lines));
     double widest = 0;
     for (const Text& line : lines_.back()) widest = std::max(widest, canvas_.measure().advance(line, style()));
-    labels.push_back({arc_end(i), widest});
-    ends.push_back({arc_end(i), 0});
+    labels.push_back({arc_end(i).x, widest});
+    ends.push_back({arc_end(i).x, 0});
     most_lines_ = std::max(most_lines_, lines_.back().size());
   }
   const LabelSpace page{page_margin, canvas_.width() - page_margin, 6};
@@ -80,7 +88,12 @@ bool LimitTitles::arrange(double width, std::size_t most_lines, double most_shif
   paths_ = *paths;
   elbows_ = *elbows;
   rows_ = 0;
-  for (const LabelPath& path : paths_) rows_ = std::max(rows_, path.row() + 1);
+  double shift = 0;
+  for (std::size_t i = 0; i < limits_.size(); ++i) {
+    rows_ = std::max(rows_, paths_[i].row() + 1);
+    shift = std::max(shift, std::abs(paths_[i].path.front() - elbows_[i]));
+  }
+  drop_ = std::clamp(0.3 * shift, 10.0, 26.0);
   return true;
 }
 
@@ -91,9 +104,8 @@ Mark LimitTitles::leader(std::size_t i, double top, double star_y) const {
     line.points.push_back({path[row], row_bottom(row + 1, top) + between_rows});
     line.points.push_back({path[row], row_bottom(row, top) + 1});
   }
-  const double ring = frame_.ring(limits_[i]->distance.value);
   line.points.push_back({elbows_[i], top + height()});
-  line.points.push_back({arc_end(i), star_y - ring * std::sin(frame_.half_angle)});
+  line.points.push_back({arc_end(i).x, star_y + arc_end(i).y});
   return {"title leader:" + limits_[i]->title, std::move(line)};
 }
 

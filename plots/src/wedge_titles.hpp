@@ -5,6 +5,7 @@
 #include "hz/plots/system.hpp"
 #include "canvas.hpp"
 #include "label_rows.hpp"
+#include "planet_row.hpp"
 #include "wedge_frame.hpp"
 
 namespace hz::plots {
@@ -21,12 +22,15 @@ public:
   /// `top` of the names and the star's `star_y` on the page; leaders first.
   [[nodiscard]] std::vector<Mark> marks(double top, double star_y) const;
 
+  /// The leaders where they come down to the wedge.
+  [[nodiscard]] std::vector<Curtain> curtains() const;
+
 private:
   [[nodiscard]] TextStyle style() const;
   [[nodiscard]] double line_height() const { return line_pitch * canvas_.size(); }
   [[nodiscard]] double row_height() const;
   [[nodiscard]] double row_bottom(std::size_t row, double top) const;
-  [[nodiscard]] double arc_end(std::size_t i) const;
+  [[nodiscard]] Point arc_end(std::size_t i) const;  // from the star's line
   void choose_lines();
   bool arrange(double width, std::size_t most_lines, double most_shift);
   [[nodiscard]] Mark leader(std::size_t i, double top, double star_y) const;
@@ -38,6 +42,7 @@ private:
   std::vector<std::vector<Text>> lines_;    // of each name
   std::vector<LabelPath> paths_;            // row 0 is the lowest
   std::vector<double> elbows_;              // x where each leader turns down
+  double drop_ = 0;                         // height of the slanted part of the leaders
   std::size_t rows_ = 1;
   std::size_t most_lines_ = 1;
 };

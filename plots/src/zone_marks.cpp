@@ -69,13 +69,6 @@ std::vector<ColorStop> zone_shade(const std::vector<FigureLimit>& limits, const 
   return shade;
 }
 
-Color shade_at(const std::vector<ColorStop>& shade, double x) {
-  const auto after = std::find_if(shade.begin(), shade.end(), [&](const ColorStop& stop) { return stop.at > x; });
-  if (after == shade.begin() || after == shade.end()) return palette::white;
-  const auto before = after - 1;
-  return palette::mixed(after->color, before->color, (x - before->at) / (after->at - before->at));
-}
-
 bool is_inner(LimitRole role) {
   return role == LimitRole::optimistic_inner || role == LimitRole::conservative_inner;
 }

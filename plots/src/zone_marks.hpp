@@ -11,9 +11,6 @@ namespace hz::plots {
 /// Rises in x, white at both ends; empty when no pair of limits bounds a zone.
 [[nodiscard]] std::vector<ColorStop> zone_shade(const std::vector<FigureLimit>& limits, const LogScale& axis);
 
-/// The shade at x; white outside.
-[[nodiscard]] Color shade_at(const std::vector<ColorStop>& shade, double x);
-
 [[nodiscard]] bool is_inner(LimitRole role);
 [[nodiscard]] bool is_conservative(LimitRole role);
 

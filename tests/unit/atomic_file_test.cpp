@@ -45,12 +45,14 @@ TEST(AtomicFile, TwoWritersDoNotShareTheirFileAside) {
 }
 
 TEST(AtomicFile, NoSuchFolder) {
-  EXPECT_THAT(testing::error_of([] { const AtomicFile file("/nowhere/f.txt"); }, Fault::output), HasSubstr("/nowhere/f.txt cannot be written: No such file"));
+  EXPECT_THAT(testing::error_of([] { const AtomicFile file("/nowhere/f.txt"); }, Fault::output),
+              HasSubstr("/nowhere/f.txt cannot be written: No such file"));
 }
 
 TEST(AtomicFile, Directory) {
   const testing::Folder folder;
-  EXPECT_THAT(testing::error_of([&] { const AtomicFile file(folder.file("")); }, Fault::output), HasSubstr("is a directory"));
+  EXPECT_THAT(testing::error_of([&] { const AtomicFile file(folder.file("")); }, Fault::output),
+              HasSubstr("is a directory"));
 }
 
 TEST(AtomicFile, FullDisk) {

@@ -45,11 +45,14 @@ TEST(ColumnMap, EmptyIsFine) { EXPECT_TRUE(ColumnMap::parse("# nothing\n", "map.
 
 TEST(ColumnMap, MistakesNameTheirPlace) {
   EXPECT_THAT(refusal("colums = 1\n"), HasSubstr("map.toml:1:1: \"colums\" is not a key of a column map"));
-  EXPECT_THAT(refusal("[columns]\ntemperature = \"T\"\n"), HasSubstr("map.toml:2:1: \"temperature\" is not a column name of hzmap"));
+  EXPECT_THAT(refusal("[columns]\ntemperature = \"T\"\n"),
+              HasSubstr("map.toml:2:1: \"temperature\" is not a column name of hzmap"));
   EXPECT_THAT(refusal("[columns]\nteff = 5\n"), HasSubstr("map.toml:2:8: teff must be text in quotes"));
-  EXPECT_THAT(refusal("[columns]\nteff = { colum = \"T\" }\n"), HasSubstr("map.toml:2:10: \"colum\" is not known here"));
+  EXPECT_THAT(refusal("[columns]\nteff = { colum = \"T\" }\n"),
+              HasSubstr("map.toml:2:10: \"colum\" is not known here"));
   EXPECT_THAT(refusal("[columns]\nteff = { unit = \"K\" }\n"), HasSubstr("map.toml:2:1: teff names no column"));
-  EXPECT_THAT(refusal("[columns]\nteff = { column = \"T\", unit = \"AU\" }\n"), HasSubstr("map.toml:2:31: \"AU\" is not a unit of teff; the canonical one is \"K\""));
+  EXPECT_THAT(refusal("[columns]\nteff = { column = \"T\", unit = \"AU\" }\n"),
+              HasSubstr("map.toml:2:31: \"AU\" is not a unit of teff; the canonical one is \"K\""));
   EXPECT_THAT(refusal("[columns]\nstar = { column = \"T\", unit = \"K\" }\n"), HasSubstr("star has no unit"));
   EXPECT_THAT(refusal("[columns]\nstar_err = \"T\"\n"), HasSubstr("\"star_err\" is not a column name"));
   EXPECT_THAT(refusal("missing = \"-99\"\n"), HasSubstr("map.toml:1:11: missing must be a list of texts"));
@@ -68,7 +71,8 @@ TEST(ColumnMap, ColumnsMustBeThere) {
   EXPECT_THAT(use("[columns]\nteff = \"Temp\"\n"), HasSubstr("map.toml:2:1: "));
   EXPECT_THAT(use("[columns]\nteff = \"Temp\"\n"), HasSubstr("list.csv has no column named \"Temp\""));
   EXPECT_THAT(use("ignore = [\"Temp\"]\n"), HasSubstr("has no column named \"Temp\""));
-  EXPECT_THAT(use("[columns]\nteff = \"T\"\nstellar_mass = \"T\"\n"), HasSubstr("column \"T\" stands in the map twice"));
+  EXPECT_THAT(use("[columns]\nteff = \"T\"\nstellar_mass = \"T\"\n"),
+              HasSubstr("column \"T\" stands in the map twice"));
 }
 
 }  // namespace

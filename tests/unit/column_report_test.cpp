@@ -25,7 +25,8 @@ Understood understood(std::string_view bytes) {
 }
 
 TEST(ColumnReport, ShowsEveryColumnOnce) {
-  const auto list = understood("star,Teff [K],e,what\nx,5000,0.1,\nx,5000,N/A,\ny,6000,0.2,\nz,7000,0.3,\nw,8000,0.4,\n");
+  const auto list =
+      understood("star,Teff [K],e,what\nx,5000,0.1,\nx,5000,N/A,\ny,6000,0.2,\nz,7000,0.3,\nw,8000,0.4,\n");
   const auto report = report_columns(list.head, list.understanding, list.first);
   ASSERT_EQ(report.columns.size(), 4U);
   EXPECT_EQ(report.columns[1].meaning, "teff");
@@ -47,8 +48,9 @@ TEST(ColumnReport, SaysWhatIsMissing) {
   EXPECT_THAT(missing("star,teff\n").missing_for_stars, ElementsAre("luminosity, log_luminosity or stellar_radius"));
   EXPECT_THAT(missing("planet,teff,insolation\n").missing_for_planets, IsEmpty());
   EXPECT_THAT(missing("planet,teff,luminosity,orbital_period,stellar_mass\n").missing_for_planets, IsEmpty());
-  EXPECT_THAT(missing("teff,luminosity,orbital_period\n").missing_for_planets,
-              ElementsAre("planet", "semi_major_axis, orbital_period with stellar_mass, scaled_semi_major_axis or insolation"));
+  EXPECT_THAT(
+      missing("teff,luminosity,orbital_period\n").missing_for_planets,
+      ElementsAre("planet", "semi_major_axis, orbital_period with stellar_mass, scaled_semi_major_axis or insolation"));
 }
 
 TEST(StarterMap, ChangesNothingAsItStands) {
@@ -67,7 +69,10 @@ TEST(StarterMap, ItsLinesGiveTheSameUnderstanding) {
   auto text = starter_map(list.head, list.understanding);
   std::istringstream lines(text.substr(text.find("[columns]")));
   std::string uncommented;
-  for (std::string line; std::getline(lines, line);) uncommented += line.find(" = ") != std::string::npos && line.find("Not used") == std::string::npos ? line.substr(2) + '\n' : line + '\n';
+  for (std::string line; std::getline(lines, line);)
+    uncommented += line.find(" = ") != std::string::npos && line.find("Not used") == std::string::npos
+                       ? line.substr(2) + '\n'
+                       : line + '\n';
   const auto again = Understanding::of(list.head, ColumnMap::parse(uncommented, "map.toml"));
   ASSERT_EQ(again.columns().size(), list.understanding.columns().size());
   for (std::size_t i = 0; i < again.columns().size(); ++i) {

@@ -33,7 +33,10 @@ TEST(CsvReader, PlainRows) {
 }
 
 TEST(CsvReader, ByteOrderMarkIsNoPartOfTheFirstName) {
-  EXPECT_THAT(names(read("\xEF\xBB\xBF" "a,b\n1,2\n").head), ElementsAre("a", "b"));
+  EXPECT_THAT(names(read("\xEF\xBB\xBF"
+                         "a,b\n1,2\n")
+                        .head),
+              ElementsAre("a", "b"));
   EXPECT_THAT(names(read("\xEF\xBB\xBF# c\na,b\n1,2\n").head), ElementsAre("a", "b"));
 }
 
@@ -81,7 +84,9 @@ TEST(CsvReader, SeparatorIsToldFromTheHeader) {
   EXPECT_EQ(read("only\n7\n").rows, (Rows{{"7"}}));
 }
 
-TEST(CsvReader, HeaderNamesAreTrimmed) { EXPECT_THAT(names(read(" a , \"b, c\" \n1,2\n").head), ElementsAre("a", "b, c")); }
+TEST(CsvReader, HeaderNamesAreTrimmed) {
+  EXPECT_THAT(names(read(" a , \"b, c\" \n1,2\n").head), ElementsAre("a", "b, c"));
+}
 
 TEST(CsvReader, HeaderMayEndInASeparator) {
   const auto table = read("a,b,\n1,2,\n3,4,5\n");
@@ -91,7 +96,8 @@ TEST(CsvReader, HeaderMayEndInASeparator) {
 
 TEST(CsvReader, RaggedRowsKeepTheirPlace) {
   const auto table = read("a,b\n1\n1,2,3\n4,5\n");
-  EXPECT_THAT(table.problems, ElementsAre("line 2 holds 1 cells where the header names 2", "line 3 holds 3 cells where the header names 2", ""));
+  EXPECT_THAT(table.problems, ElementsAre("line 2 holds 1 cells where the header names 2",
+                                          "line 3 holds 3 cells where the header names 2", ""));
   EXPECT_EQ(table.rows.size(), 3U);
   EXPECT_THAT(table.rows[2], ElementsAre("4", "5"));
 }
@@ -108,14 +114,16 @@ TEST(CsvReader, NothingInIt) {
 }
 
 TEST(CsvReader, UnclosedQuoteNamesWhereItOpened) {
-  EXPECT_THAT(refusal("a,b\n1,2\n3,\"open\nmore\nand more"), HasSubstr("list.csv:3: a quote opens here and never closes"));
+  EXPECT_THAT(refusal("a,b\n1,2\n3,\"open\nmore\nand more"),
+              HasSubstr("list.csv:3: a quote opens here and never closes"));
   EXPECT_THAT(refusal("a,\"b\n1,2\n"), HasSubstr("list.csv:1: a quote opens here"));
 }
 
 TEST(CsvReader, UnclosedQuoteInABigFileNamesWhereItOpened) {
   std::string bytes = "a,b\n1,\"open\n";
   while (bytes.size() < 6'000'000) bytes += "3,4\n";
-  EXPECT_THAT(refusal(bytes), HasSubstr("list.csv:2: this row is longer than 4 MB; a quote opens here and does not close"));
+  EXPECT_THAT(refusal(bytes),
+              HasSubstr("list.csv:2: this row is longer than 4 MB; a quote opens here and does not close"));
 }
 
 TEST(CsvReader, NulByteNamesItsLine) {
@@ -146,7 +154,8 @@ TEST(CsvReader, NamesOnlyOnce) {
 TEST(CsvReader, ManyChunksGiveEveryRowInOrder) {
   std::string bytes = "# top\nname,text\n";
   constexpr std::size_t count = 60'000;
-  for (std::size_t i = 0; i < count; ++i) bytes += std::to_string(i) + ",\"a \"\"long\"\" cell, number\n" + std::to_string(i) + "\"\r\n";
+  for (std::size_t i = 0; i < count; ++i)
+    bytes += std::to_string(i) + ",\"a \"\"long\"\" cell, number\n" + std::to_string(i) + "\"\r\n";
   const testing::Folder folder;
   const auto reader = open_table(folder.write("list.csv", bytes));
   std::size_t row_number = 0;
@@ -174,7 +183,8 @@ TEST(CsvReader, MovingAChunkKeepsItsCells) {
 }
 
 TEST(OpenTable, NoSuchFile) {
-  EXPECT_THAT(testing::error_of([] { (void)open_table("/nowhere/list.csv"); }), HasSubstr("/nowhere/list.csv: cannot be read: No such file"));
+  EXPECT_THAT(testing::error_of([] { (void)open_table("/nowhere/list.csv"); }),
+              HasSubstr("/nowhere/list.csv: cannot be read: No such file"));
 }
 
 TEST(OpenTable, Directory) {
@@ -183,9 +193,14 @@ TEST(OpenTable, Directory) {
 }
 
 TEST(OpenTable, OtherFormatsAreNamed) {
-  const std::vector<std::pair<std::string, std::string>> starts{{"\x1f\x8b\x08", "gzip"},   {"SIMPLE  =                    T", "FITS"},
-                                                                {"<?xml version=\"1.0\"?>", "VOTable"}, {"<VOTABLE>", "VOTable"},
-                                                                {"PK\x03\x04", "spreadsheet"}, {"\xff\xfe" "a", "UTF-16"}};
+  const std::vector<std::pair<std::string, std::string>> starts{{"\x1f\x8b\x08", "gzip"},
+                                                                {"SIMPLE  =                    T", "FITS"},
+                                                                {"<?xml version=\"1.0\"?>", "VOTable"},
+                                                                {"<VOTABLE>", "VOTable"},
+                                                                {"PK\x03\x04", "spreadsheet"},
+                                                                {"\xff\xfe"
+                                                                 "a",
+                                                                 "UTF-16"}};
   for (const auto& [start, name] : starts) {
     const auto what = refusal(start);
     EXPECT_THAT(what, HasSubstr(name));

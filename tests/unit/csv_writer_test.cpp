@@ -40,7 +40,8 @@ TEST(CsvWriter, MinimalQuotesAndLineFeeds) {
 
 TEST(CsvWriter, ShortestNumbersThatReadBack) {
   std::vector<double> numbers{0.1, 1.0 / 3, 5772, 1e22, 1e-7, -0.0, 6.02214076e23};
-  EXPECT_EQ(written({"x"}, {numbers}, numbers.size()), "x\n0.1\n0.3333333333333333\n5772\n1e+22\n1e-07\n-0\n6.02214076e+23\n");
+  EXPECT_EQ(written({"x"}, {numbers}, numbers.size()),
+            "x\n0.1\n0.3333333333333333\n5772\n1e+22\n1e-07\n-0\n6.02214076e+23\n");
 }
 
 TEST(CsvWriter, NoValueAndNoInfinityAreEmpty) {

@@ -22,7 +22,8 @@ std::map<std::string, std::string> understood(const std::string& name) {
   const auto understanding = Understanding::of(reader->head());
   std::map<std::string, std::string> out;
   for (const auto& column : understanding.columns()) {
-    out[reader->head().columns[column.column].name] = canonical_name(column.quantity, column.part) + " [" + column.unit + "]";
+    out[reader->head().columns[column.column].name] =
+        canonical_name(column.quantity, column.part) + " [" + column.unit + "]";
   }
   return out;
 }
@@ -39,17 +40,39 @@ std::size_t count(const std::vector<ListRow>& rows, bool (*holds)(const ListRow&
 }
 
 void expect_archive_columns(const std::map<std::string, std::string>& columns) {
-  const std::map<std::string, std::string> expected{
-      {"pl_name", "planet []"}, {"hostname", "star []"}, {"sy_snum", "number_of_stars []"}, {"pl_orbper", "orbital_period [days]"},
-      {"pl_orbpererr1", "orbital_period_err_plus [days]"}, {"pl_orbpererr2", "orbital_period_err_minus [days]"}, {"pl_orbperlim", "orbital_period_limit []"},
-      {"pl_orbsmax", "semi_major_axis [au]"}, {"pl_rade", "planet_radius [Earth Radius]"}, {"pl_radelim", "planet_radius_limit []"},
-      {"pl_radj", "planet_radius [Jupiter Radius]"}, {"pl_bmasse", "planet_mass [Earth Mass]"}, {"pl_bmasseerr2", "planet_mass_err_minus [Earth Mass]"},
-      {"pl_bmassj", "planet_mass [Jupiter Mass]"}, {"pl_bmasselim", "planet_mass_limit []"}, {"pl_bmassprov", "planet_mass_kind []"},
-      {"pl_orbeccen", "eccentricity []"}, {"pl_orbeccenlim", "eccentricity_limit []"}, {"pl_insol", "insolation [Earth Flux]"},
-      {"pl_eqt", "equilibrium_temperature [K]"}, {"st_teff", "teff [K]"}, {"st_tefferr1", "teff_err_plus [K]"}, {"st_tefflim", "teff_limit []"},
-      {"st_rad", "stellar_radius [Solar Radius]"}, {"st_mass", "stellar_mass [Solar mass]"}, {"st_logg", "log_g [log10(cm/s**2)]"},
-      {"st_met", "metallicity [dex]"}, {"sy_dist", "distance [pc]"}, {"sy_disterr1", "distance_err_plus [pc]"}, {"sy_vmag", "magnitude_v [mag]"},
-      {"sy_kmag", "magnitude_k [mag]"}, {"sy_gaiamag", "magnitude_g [mag]"}, {"st_spectype", "spectral_type []"}};
+  const std::map<std::string, std::string> expected{{"pl_name", "planet []"},
+                                                    {"hostname", "star []"},
+                                                    {"sy_snum", "number_of_stars []"},
+                                                    {"pl_orbper", "orbital_period [days]"},
+                                                    {"pl_orbpererr1", "orbital_period_err_plus [days]"},
+                                                    {"pl_orbpererr2", "orbital_period_err_minus [days]"},
+                                                    {"pl_orbperlim", "orbital_period_limit []"},
+                                                    {"pl_orbsmax", "semi_major_axis [au]"},
+                                                    {"pl_rade", "planet_radius [Earth Radius]"},
+                                                    {"pl_radelim", "planet_radius_limit []"},
+                                                    {"pl_radj", "planet_radius [Jupiter Radius]"},
+                                                    {"pl_bmasse", "planet_mass [Earth Mass]"},
+                                                    {"pl_bmasseerr2", "planet_mass_err_minus [Earth Mass]"},
+                                                    {"pl_bmassj", "planet_mass [Jupiter Mass]"},
+                                                    {"pl_bmasselim", "planet_mass_limit []"},
+                                                    {"pl_bmassprov", "planet_mass_kind []"},
+                                                    {"pl_orbeccen", "eccentricity []"},
+                                                    {"pl_orbeccenlim", "eccentricity_limit []"},
+                                                    {"pl_insol", "insolation [Earth Flux]"},
+                                                    {"pl_eqt", "equilibrium_temperature [K]"},
+                                                    {"st_teff", "teff [K]"},
+                                                    {"st_tefferr1", "teff_err_plus [K]"},
+                                                    {"st_tefflim", "teff_limit []"},
+                                                    {"st_rad", "stellar_radius [Solar Radius]"},
+                                                    {"st_mass", "stellar_mass [Solar mass]"},
+                                                    {"st_logg", "log_g [log10(cm/s**2)]"},
+                                                    {"st_met", "metallicity [dex]"},
+                                                    {"sy_dist", "distance [pc]"},
+                                                    {"sy_disterr1", "distance_err_plus [pc]"},
+                                                    {"sy_vmag", "magnitude_v [mag]"},
+                                                    {"sy_kmag", "magnitude_k [mag]"},
+                                                    {"sy_gaiamag", "magnitude_g [mag]"},
+                                                    {"st_spectype", "spectral_type []"}};
   for (const auto& [header, meaning] : expected) {
     const auto found = columns.find(header);
     ASSERT_NE(found, columns.end()) << header;
@@ -62,7 +85,8 @@ TEST(RealLists, CompositeIsUnderstoodWithoutAMap) {
   HZ_NEEDS_LIST("planets_composite_2023.csv");
   const auto columns = understood("planets_composite_2023.csv");
   expect_archive_columns(columns);
-  EXPECT_EQ(columns.size(), 79U);  // 88 less sy_pnum, 4 of the discovery, 2 flags, the metallicity ratio, sexagesimal RA and Dec
+  EXPECT_EQ(columns.size(),
+            79U);  // 88 less sy_pnum, 4 of the discovery, 2 flags, the metallicity ratio, sexagesimal RA and Dec
 }
 
 TEST(RealLists, CompositeIsReadInFull) {
@@ -73,10 +97,17 @@ TEST(RealLists, CompositeIsReadInFull) {
   EXPECT_EQ(count(rows, [](const ListRow& row) { return row.problem.has_value(); }), 0U);
   EXPECT_EQ(count(rows, [](const ListRow& row) { return row.planet.semi_major_axis.stated.has_value(); }), 5064U);
   EXPECT_EQ(count(rows, [](const ListRow& row) { return row.star.teff.stated.has_value(); }), 5146U);
-  EXPECT_EQ(count(rows, [](const ListRow& row) { return row.planet.planet_mass_kind == PlanetMassKind::minimum; }), 873U);
-  EXPECT_EQ(count(rows, [](const ListRow& row) { return row.planet.planet_mass_kind == PlanetMassKind::from_radius; }), 2799U);
-  EXPECT_EQ(count(rows, [](const ListRow& row) { return row.planet.planet_mass_kind == PlanetMassKind::measured; }), 1655U + 20U);
-  EXPECT_EQ(count(rows, [](const ListRow& row) { return row.planet.eccentricity.stated && row.planet.eccentricity.stated->limit == LimitMark::upper; }), 242U);
+  EXPECT_EQ(count(rows, [](const ListRow& row) { return row.planet.planet_mass_kind == PlanetMassKind::minimum; }),
+            873U);
+  EXPECT_EQ(count(rows, [](const ListRow& row) { return row.planet.planet_mass_kind == PlanetMassKind::from_radius; }),
+            2799U);
+  EXPECT_EQ(count(rows, [](const ListRow& row) { return row.planet.planet_mass_kind == PlanetMassKind::measured; }),
+            1655U + 20U);
+  EXPECT_EQ(count(rows,
+                  [](const ListRow& row) {
+                    return row.planet.eccentricity.stated && row.planet.eccentricity.stated->limit == LimitMark::upper;
+                  }),
+            242U);
   const auto no_width = [](const ListRow& row) {
     const auto& a = row.planet.semi_major_axis.stated;
     return a && !a->plus && !a->minus;
@@ -90,7 +121,8 @@ TEST(RealLists, CompositeRowAsItStandsInTheFile) {
   const auto* const row = find(rows, "14 Her b");  // line 99
   ASSERT_NE(row, nullptr);
   EXPECT_EQ(row->line, 99U);
-  EXPECT_EQ(row->planet.orbital_period.stated, (Measured{1765.03890112, 1.87256063, 1.67708897, LimitMark::none, false}));
+  EXPECT_EQ(row->planet.orbital_period.stated,
+            (Measured{1765.03890112, 1.87256063, 1.67708897, LimitMark::none, false}));
   EXPECT_EQ(row->planet.semi_major_axis.stated, (Measured{2.773069, 0.118828, 0.110517, LimitMark::none, false}));
   EXPECT_EQ(row->planet.planet_radius.stated, (Measured{12.6, {}, {}, LimitMark::none, false}));
 }
@@ -125,8 +157,9 @@ TEST(RealLists, WorksheetWithItsMap) {
     EXPECT_EQ(row.star.teff.problem.has_value(), broken) << row.line;
     EXPECT_EQ(row.star.stellar_radius.problem.has_value(), broken) << row.line;
     EXPECT_EQ(row.star.stellar_mass.problem.has_value(), broken) << row.line;
-    for (const auto* const field : {&row.star.log_luminosity, &row.star.distance, &row.planet.orbital_period, &row.planet.semi_major_axis, &row.planet.eccentricity,
-                                    &row.planet.planet_radius, &row.planet.planet_mass}) {
+    for (const auto* const field :
+         {&row.star.log_luminosity, &row.star.distance, &row.planet.orbital_period, &row.planet.semi_major_axis,
+          &row.planet.eccentricity, &row.planet.planet_radius, &row.planet.planet_mass}) {
       EXPECT_FALSE(field->problem.has_value()) << row.line;
     }
     ASSERT_TRUE(row.star.distance.stated.has_value()) << row.line;
@@ -135,7 +168,8 @@ TEST(RealLists, WorksheetWithItsMap) {
   EXPECT_EQ(find(rows, "alf Ari b")->star.teff.problem->what, "Teff [K] holds \"4553+15-\", which is not a value");
 }
 
-// The worksheet was made from the composite list by rounding conversions, so that both must agree to the printed digits.
+// The worksheet was made from the composite list by rounding conversions, so that both must agree to the printed
+// digits.
 TEST(RealLists, WorksheetAgreesWithTheListItCameFrom) {
   HZ_NEEDS_LIST("worksheet_mixed.csv");
   HZ_NEEDS_LIST("planets_composite_2023.csv");
@@ -146,11 +180,14 @@ TEST(RealLists, WorksheetAgreesWithTheListItCameFrom) {
   for (const auto& row : sheet) {
     const auto* const original = find(list, row.planet.name);
     if (original == nullptr) continue;
-    // Light years are given with four digits at least, milliarcseconds with five: 1 part in 2000 covers half of the last one.
+    // Light years are given with four digits at least, milliarcseconds with five: 1 part in 2000 covers half of the
+    // last one.
     EXPECT_NEAR(row.star.distance.stated->value / original->star.distance.stated->value, 1, 5e-4) << row.planet.name;
-    // Years are given with four decimals: half of the last is 0.00005 * 365.25 d = 0.018 d, twice for solutions that differ.
+    // Years are given with four decimals: half of the last is 0.00005 * 365.25 d = 0.018 d, twice for solutions that
+    // differ.
     if (original->planet.orbital_period.stated) {
-      EXPECT_NEAR(row.planet.orbital_period.stated->value, original->planet.orbital_period.stated->value, 0.04) << row.planet.name;
+      EXPECT_NEAR(row.planet.orbital_period.stated->value, original->planet.orbital_period.stated->value, 0.04)
+          << row.planet.name;
     }
     ++distances;
   }

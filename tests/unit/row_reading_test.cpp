@@ -21,15 +21,18 @@ ListRow row_of(std::string_view bytes, std::string_view map = {}) {
   return rows.at(0);
 }
 
-Measured measured(double value, std::optional<double> minus = {}, std::optional<double> plus = {}, LimitMark limit = LimitMark::none) {
+Measured measured(double value, std::optional<double> minus = {}, std::optional<double> plus = {},
+                  LimitMark limit = LimitMark::none) {
   return {value, minus, plus, limit, false};
 }
 
 TEST(RowReading, FillsBothRecords) {
   const auto row = row_of(
-      "star,planet,spectral_type,number_of_stars,teff,luminosity,stellar_radius,stellar_mass,log_g,distance,orbital_period,semi_major_axis,a/R*,"
+      "star,planet,spectral_type,number_of_stars,teff,luminosity,stellar_radius,stellar_mass,log_g,distance,orbital_"
+      "period,semi_major_axis,a/R*,"
       "eccentricity,insolation,planet_radius,planet_mass,min_mass,adopted,planet_mass_kind,reference,star_id\n"
-      " Lantern 4 ,Lantern 4 b ,K5 V,2,4410,0.165,0.7,0.72,4.6,12.5,80,0.412,100,0.1,0.9,1.3,2,1.5,1,Mass,Survey 1,0042\n");
+      " Lantern 4 ,Lantern 4 b ,K5 V,2,4410,0.165,0.7,0.72,4.6,12.5,80,0.412,100,0.1,0.9,1.3,2,1.5,1,Mass,Survey "
+      "1,0042\n");
   EXPECT_EQ(row.number, 1U);
   EXPECT_EQ(row.line, 2U);
   EXPECT_EQ(row.star.name, "Lantern 4");
@@ -99,11 +102,13 @@ TEST(RowReading, HalfWidthColumns) {
 }
 
 TEST(RowReading, BrokenHalfWidthsAreProblems) {
-  EXPECT_THAT(row_of("star,teff,teff_err\nx,4410,wide\n").star.teff.problem->what, HasSubstr("teff_err holds \"wide\", which is not a number"));
+  EXPECT_THAT(row_of("star,teff,teff_err\nx,4410,wide\n").star.teff.problem->what,
+              HasSubstr("teff_err holds \"wide\", which is not a number"));
   EXPECT_THAT(row_of("star,teff,teff_err\nx,4410,inf\n").star.teff.problem->what, HasSubstr("teff_err holds \"inf\""));
   EXPECT_THAT(row_of("star,teff,teff_err\nx,4410,-70\n").star.teff.problem->what, HasSubstr("half-width below 0"));
   EXPECT_THAT(row_of("star,teff,teff_err_plus\nx,4410,-70\n").star.teff.problem->what, HasSubstr("half-width below 0"));
-  EXPECT_THAT(row_of("star,teff,teff_lower\nx,4410,4500\n").star.teff.problem->what, HasSubstr("bound on the wrong side"));
+  EXPECT_THAT(row_of("star,teff,teff_lower\nx,4410,4500\n").star.teff.problem->what,
+              HasSubstr("bound on the wrong side"));
 }
 
 TEST(RowReading, HalfWidthsInTheCellWinOverColumns) {
@@ -111,24 +116,30 @@ TEST(RowReading, HalfWidthsInTheCellWinOverColumns) {
 }
 
 TEST(RowReading, LimitMarks) {
-  const auto limit_of = [](const std::string& mark) { return row_of("star,eccentricity,eccentricity_limit\nx,0.3," + mark + "\n").planet.eccentricity; };
-  for (const auto* const upper : {"1", "<", "1.0", "+1"}) EXPECT_EQ(limit_of(upper).stated->limit, LimitMark::upper) << upper;
+  const auto limit_of = [](const std::string& mark) {
+    return row_of("star,eccentricity,eccentricity_limit\nx,0.3," + mark + "\n").planet.eccentricity;
+  };
+  for (const auto* const upper : {"1", "<", "1.0", "+1"})
+    EXPECT_EQ(limit_of(upper).stated->limit, LimitMark::upper) << upper;
   for (const auto* const lower : {"-1", ">"}) EXPECT_EQ(limit_of(lower).stated->limit, LimitMark::lower) << lower;
   for (const auto* const none : {"0", "", "="}) EXPECT_EQ(limit_of(none).stated->limit, LimitMark::none) << none;
-  EXPECT_THAT(limit_of("2").problem->what, HasSubstr("eccentricity_limit holds \"2\", which is not one of 1, 0, -1, < and >"));
+  EXPECT_THAT(limit_of("2").problem->what,
+              HasSubstr("eccentricity_limit holds \"2\", which is not one of 1, 0, -1, < and >"));
   EXPECT_FALSE(row_of("star,eccentricity,eccentricity_limit\nx,,1\n").planet.eccentricity.stated.has_value());
   EXPECT_FALSE(row_of("star,eccentricity,eccentricity_limit\nx,,1\n").planet.eccentricity.problem.has_value());
 }
 
 TEST(RowReading, UnitsOfColumnsAndCells) {
-  const auto row = row_of("star,Orbital period [yr],Planet radius [RJ],Planet radius err [RJ],d\nx,2,1,0.5,74.597 mas\n",
-                          "[columns]\ndistance = { column = \"d\", unit = \"pc\" }");
+  const auto row =
+      row_of("star,Orbital period [yr],Planet radius [RJ],Planet radius err [RJ],d\nx,2,1,0.5,74.597 mas\n",
+             "[columns]\ndistance = { column = \"d\", unit = \"pc\" }");
   EXPECT_EQ(row.planet.orbital_period.stated, measured(730.5));
   EXPECT_DOUBLE_EQ(row.planet.planet_radius.stated->value, 7.1492e7 / 6.3781e6);
   EXPECT_DOUBLE_EQ(*row.planet.planet_radius.stated->plus, 0.5 * 7.1492e7 / 6.3781e6);
   EXPECT_DOUBLE_EQ(row.star.distance.stated->value, 1000 / 74.597);
   EXPECT_EQ(row_of("star,Orbital period [yr]\nx,30 d\n").planet.orbital_period.stated, measured(30));
-  EXPECT_THAT(row_of("star,orbital_period\nx,30 furlong\n").planet.orbital_period.problem->what, HasSubstr("whose unit is not one of orbital_period"));
+  EXPECT_THAT(row_of("star,orbital_period\nx,30 furlong\n").planet.orbital_period.problem->what,
+              HasSubstr("whose unit is not one of orbital_period"));
 }
 
 TEST(RowReading, HalfWidthInAUnitOfItsOwn) {
@@ -149,8 +160,9 @@ TEST(RowReading, OverflowInTheConversionIsNoValue) {
 }
 
 TEST(RowReading, FirstFilledChoiceCountsWithItsOwnHalfWidths) {
-  const auto rows = rows_of("planet,Planet radius [Earth],Planet radius err [Earth],Planet radius [Jupiter],Planet radius err [Jupiter]\n"
-                            "a,2,0.1,9,9\nb,,0.1,1,0.2\n");
+  const auto rows = rows_of(
+      "planet,Planet radius [Earth],Planet radius err [Earth],Planet radius [Jupiter],Planet radius err [Jupiter]\n"
+      "a,2,0.1,9,9\nb,,0.1,1,0.2\n");
   EXPECT_EQ(rows[0].planet.planet_radius.stated, measured(2, 0.1, 0.1));
   EXPECT_DOUBLE_EQ(rows[1].planet.planet_radius.stated->value, 7.1492e7 / 6.3781e6);
   EXPECT_DOUBLE_EQ(*rows[1].planet.planet_radius.stated->plus, 0.2 * 7.1492e7 / 6.3781e6);
@@ -165,15 +177,22 @@ TEST(RowReading, DerivedValuesOfAnEarlierRunAreLeftOut) {
 }
 
 TEST(RowReading, KindsOfPlanetMass) {
-  const auto kind_of = [](const std::string& text) { return row_of("planet,planet_mass,planet_mass_kind\na,3," + text + "\n").planet.planet_mass_kind; };
-  for (const auto* const kind : {"Mass", "measured", "Msin(i)/sin(i)", "true mass"}) EXPECT_EQ(kind_of(kind), PlanetMassKind::measured) << kind;
-  for (const auto* const kind : {"Msini", "M sin i", "Mass*sin(i)", "minimum mass", "minimum"}) EXPECT_EQ(kind_of(kind), PlanetMassKind::minimum) << kind;
-  for (const auto* const kind : {"M-R relationship", "from radius", "mass-radius relation", "from_radius"}) EXPECT_EQ(kind_of(kind), PlanetMassKind::from_radius) << kind;
+  const auto kind_of = [](const std::string& text) {
+    return row_of("planet,planet_mass,planet_mass_kind\na,3," + text + "\n").planet.planet_mass_kind;
+  };
+  for (const auto* const kind : {"Mass", "measured", "Msin(i)/sin(i)", "true mass"})
+    EXPECT_EQ(kind_of(kind), PlanetMassKind::measured) << kind;
+  for (const auto* const kind : {"Msini", "M sin i", "Mass*sin(i)", "minimum mass", "minimum"})
+    EXPECT_EQ(kind_of(kind), PlanetMassKind::minimum) << kind;
+  for (const auto* const kind : {"M-R relationship", "from radius", "mass-radius relation", "from_radius"})
+    EXPECT_EQ(kind_of(kind), PlanetMassKind::from_radius) << kind;
   for (const auto* const kind : {"", "--", "guess"}) EXPECT_EQ(kind_of(kind), PlanetMassKind::unsaid) << kind;
 }
 
 TEST(RowReading, AdoptedMarks) {
-  const auto adopted = [](const std::string& text) { return row_of("planet,adopted\na," + text + "\n").planet.adopted; };
+  const auto adopted = [](const std::string& text) {
+    return row_of("planet,adopted\na," + text + "\n").planet.adopted;
+  };
   EXPECT_EQ(adopted("1"), true);
   EXPECT_EQ(adopted("TRUE"), true);
   EXPECT_EQ(adopted("no"), false);
@@ -192,10 +211,11 @@ TEST(RowReading, RaggedRowHasEmptyRecordsAndItsProblem) {
 
 TEST(RowReading, ColumnsOfNumbersAsBinaryFormatsHoldThem) {
   TableHead head;
-  for (const auto* const name : {"teff", "teff_err", "number_of_stars", "planet_mass"}) head.columns.push_back({name, {}, {}, {}});
+  for (const auto* const name : {"teff", "teff_err", "number_of_stars", "planet_mass"})
+    head.columns.push_back({name, {}, {}, {}});
   Chunk chunk;
-  chunk.columns = {std::vector<double>{4410, std::nan("")}, std::vector<double>{70, 70}, std::vector<std::optional<std::int64_t>>{2, std::nullopt},
-                   std::vector<double>{INFINITY, 3}};
+  chunk.columns = {std::vector<double>{4410, std::nan("")}, std::vector<double>{70, 70},
+                   std::vector<std::optional<std::int64_t>>{2, std::nullopt}, std::vector<double>{INFINITY, 3}};
   chunk.row_problems.resize(2);
   const auto understanding = Understanding::of(head);
   const auto first = understanding.row(chunk, 0);

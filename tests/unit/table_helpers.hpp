@@ -21,7 +21,8 @@ class Folder {
 public:
   Folder() {
     const auto* const test = ::testing::UnitTest::GetInstance()->current_test_info();
-    path_ = std::filesystem::temp_directory_path() / (std::string("hz_") + test->test_suite_name() + '_' + test->name());
+    path_ =
+        std::filesystem::temp_directory_path() / (std::string("hz_") + test->test_suite_name() + '_' + test->name());
     std::filesystem::remove_all(path_);
     std::filesystem::create_directories(path_);
   }
@@ -35,7 +36,8 @@ public:
     return file(name);
   }
   [[nodiscard]] std::size_t entries() const {
-    return static_cast<std::size_t>(std::distance(std::filesystem::directory_iterator(path_), std::filesystem::directory_iterator()));
+    return static_cast<std::size_t>(
+        std::distance(std::filesystem::directory_iterator(path_), std::filesystem::directory_iterator()));
   }
 
 private:

@@ -24,7 +24,8 @@ std::vector<std::string> meanings(const TableHead& head, const ColumnMap& map = 
   const auto understanding = Understanding::draft(head, map);
   std::vector<std::string> out(head.columns.size(), "-");
   for (const auto& column : understanding.columns()) {
-    out[column.column] = canonical_name(column.quantity, column.part) + " [" + (column.unit_assumed ? "?" : "") + column.unit + "] " + std::string(text(column.known_by));
+    out[column.column] = canonical_name(column.quantity, column.part) + " [" + (column.unit_assumed ? "?" : "") +
+                         column.unit + "] " + std::string(text(column.known_by));
   }
   return out;
 }
@@ -36,11 +37,14 @@ std::string refusal(const std::vector<std::string>& names, const ColumnMap& map 
 }
 
 TEST(Understanding, CanonicalNamesWithTheirParts) {
-  EXPECT_THAT(meanings(head_of({"teff", "teff_err", "luminosity [Lsun]", "luminosity_err_plus", "luminosity_err_minus", "semi_major_axis", "semi_major_axis_lower",
-                                "semi_major_axis_upper", "semi_major_axis_limit", "semi_major_axis_route"})),
-              ElementsAre("teff [?K] name", "teff_err [?K] name", "luminosity [Lsun] name", "luminosity_err_plus [?Lsun] name", "luminosity_err_minus [?Lsun] name",
-                          "semi_major_axis [?AU] name", "semi_major_axis_lower [?AU] name", "semi_major_axis_upper [?AU] name", "semi_major_axis_limit [] name",
-                          "semi_major_axis_route [] name"));
+  EXPECT_THAT(
+      meanings(head_of({"teff", "teff_err", "luminosity [Lsun]", "luminosity_err_plus", "luminosity_err_minus",
+                        "semi_major_axis", "semi_major_axis_lower", "semi_major_axis_upper", "semi_major_axis_limit",
+                        "semi_major_axis_route"})),
+      ElementsAre("teff [?K] name", "teff_err [?K] name", "luminosity [Lsun] name", "luminosity_err_plus [?Lsun] name",
+                  "luminosity_err_minus [?Lsun] name", "semi_major_axis [?AU] name", "semi_major_axis_lower [?AU] name",
+                  "semi_major_axis_upper [?AU] name", "semi_major_axis_limit [] name",
+                  "semi_major_axis_route [] name"));
 }
 
 TEST(Understanding, EveryAcceptedSpellingMeansItsQuantity) {
@@ -81,44 +85,60 @@ TEST(Understanding, HeadersAsPeopleWriteThem) {
 
 TEST(Understanding, LogarithmIsToldByTheUnit) {
   EXPECT_EQ(meaning("Luminosity [log10(Lsun)]"), "log_luminosity [log10(Lsun)] words");
-  EXPECT_THAT(meanings(head_of({"Luminosity [dex]", "Luminosity error"})), ElementsAre("log_luminosity [dex] words", "log_luminosity_err [?dex] words"));
-  EXPECT_THAT(meanings(head_of({"Luminosity [Lsun]", "Luminosity error"})), ElementsAre("luminosity [Lsun] words", "luminosity_err [?Lsun] words"));
+  EXPECT_THAT(meanings(head_of({"Luminosity [dex]", "Luminosity error"})),
+              ElementsAre("log_luminosity [dex] words", "log_luminosity_err [?dex] words"));
+  EXPECT_THAT(meanings(head_of({"Luminosity [Lsun]", "Luminosity error"})),
+              ElementsAre("luminosity [Lsun] words", "luminosity_err [?Lsun] words"));
 }
 
 TEST(Understanding, HalfWidthSpellings) {
-  for (const auto* const symmetric : {"Teff err", "Teff_error", "Teff uncertainty", "teff unc.", "sigma Teff", "err_Teff", "Teff std", "Teff sigma", "e_Teff", "Teff err [K]"}) {
+  for (const auto* const symmetric : {"Teff err", "Teff_error", "Teff uncertainty", "teff unc.", "sigma Teff",
+                                      "err_Teff", "Teff std", "Teff sigma", "e_Teff", "Teff err [K]"}) {
     EXPECT_THAT(meanings(head_of({"Teff", symmetric}))[1], ::testing::StartsWith("teff_err [")) << symmetric;
   }
-  for (const auto* const plus : {"Teff err plus", "Teff_err_up", "Teff Upper Error", "Teff upper unc.", "Teff_unc_upper", "Teff err hi", "Teff err pos"}) {
+  for (const auto* const plus : {"Teff err plus", "Teff_err_up", "Teff Upper Error", "Teff upper unc.",
+                                 "Teff_unc_upper", "Teff err hi", "Teff err pos"}) {
     EXPECT_THAT(meanings(head_of({"Teff", plus}))[1], ::testing::StartsWith("teff_err_plus [")) << plus;
   }
-  for (const auto* const minus : {"Teff err minus", "Teff_err_down", "Teff Lower Error", "Teff Lower Unc. [K]", "Teff lower uncertainty", "Teff err lo", "Teff err neg"}) {
+  for (const auto* const minus : {"Teff err minus", "Teff_err_down", "Teff Lower Error", "Teff Lower Unc. [K]",
+                                  "Teff lower uncertainty", "Teff err lo", "Teff err neg"}) {
     EXPECT_THAT(meanings(head_of({"Teff", minus}))[1], ::testing::StartsWith("teff_err_minus [")) << minus;
   }
-  EXPECT_THAT(meanings(head_of({"Teff", "Teff lower", "Teff p84", "Teff limit flag", "l_Teff"})),
-              ElementsAre("teff [?K] words", "teff_lower [?K] words", "teff_upper [?K] words", "-", "-"));  // two marks compete
-  EXPECT_THAT(meanings(head_of({"Teff", "e_Teff", "E_Teff"})), ElementsAre("teff [?K] words", "teff_err [?K] words", "teff_err_plus [?K] words"));
+  EXPECT_THAT(
+      meanings(head_of({"Teff", "Teff lower", "Teff p84", "Teff limit flag", "l_Teff"})),
+      ElementsAre("teff [?K] words", "teff_lower [?K] words", "teff_upper [?K] words", "-", "-"));  // two marks compete
+  EXPECT_THAT(meanings(head_of({"Teff", "e_Teff", "E_Teff"})),
+              ElementsAre("teff [?K] words", "teff_err [?K] words", "teff_err_plus [?K] words"));
   EXPECT_THAT(meanings(head_of({"B-V", "e_B-V"})), ElementsAre("color_bv [?mag] words", "color_bv_err [?mag] words"));
-  EXPECT_THAT(meanings(head_of({"R [Rsun]", "e_R"})), ElementsAre("stellar_radius [Rsun] words", "stellar_radius_err [Rsun] words"));
+  EXPECT_THAT(meanings(head_of({"R [Rsun]", "e_R"})),
+              ElementsAre("stellar_radius [Rsun] words", "stellar_radius_err [Rsun] words"));
 }
 
 TEST(Understanding, PartsWithoutTheirValueAreNotUsed) { EXPECT_EQ(meaning("teff_err"), "-"); }
 
 TEST(Understanding, DescriptionsInTheCommentBlock) {
-  const auto head = head_of({"p1", "p2", "p3", "m", "mu", "ml", "mlim", "prov", "d", "du", "v", "x", "a1"},
-                            {"COLUMN p1:        Orbital Period [days]", "COLUMN p2: Orbital Period Upper Unc. [days]", "p3:Orbital Period Lower Unc. [days]",
-                             "COLUMN m:     Planet Mass or Mass*sin(i) [Earth Mass]", "COLUMN mu:  Planet Mass or Mass*sin(i) [Earth Mass] Upper Unc.",
-                             "COLUMN ml:  Planet Mass or Mass*sin(i) [Earth Mass] Lower Unc.", "COLUMN mlim: Planet Mass or Mass*sin(i) [Earth Mass] Limit Flag",
-                             "COLUMN prov: Planet Mass or Mass*sin(i) Provenance", "COLUMN d: Distance [pc]", "COLUMN du: Distance [pc] Upper Unc",
-                             "COLUMN v: V (Johnson) Magnitude", "CONSTRAINT: nothing about x", "COLUMN a1: Orbit Semi-Major Axis [au])"});
-  EXPECT_THAT(meanings(head), ElementsAre("orbital_period [days] comment", "orbital_period_err_plus [days] comment", "orbital_period_err_minus [days] comment",
-                                          "planet_mass [Earth Mass] comment", "planet_mass_err_plus [Earth Mass] comment", "planet_mass_err_minus [Earth Mass] comment",
-                                          "planet_mass_limit [] comment", "planet_mass_kind [] comment", "distance [pc] comment", "distance_err_plus [pc] comment",
-                                          "magnitude_v [?mag] comment", "-", "semi_major_axis [au] comment"));
+  const auto head =
+      head_of({"p1", "p2", "p3", "m", "mu", "ml", "mlim", "prov", "d", "du", "v", "x", "a1"},
+              {"COLUMN p1:        Orbital Period [days]", "COLUMN p2: Orbital Period Upper Unc. [days]",
+               "p3:Orbital Period Lower Unc. [days]", "COLUMN m:     Planet Mass or Mass*sin(i) [Earth Mass]",
+               "COLUMN mu:  Planet Mass or Mass*sin(i) [Earth Mass] Upper Unc.",
+               "COLUMN ml:  Planet Mass or Mass*sin(i) [Earth Mass] Lower Unc.",
+               "COLUMN mlim: Planet Mass or Mass*sin(i) [Earth Mass] Limit Flag",
+               "COLUMN prov: Planet Mass or Mass*sin(i) Provenance", "COLUMN d: Distance [pc]",
+               "COLUMN du: Distance [pc] Upper Unc", "COLUMN v: V (Johnson) Magnitude", "CONSTRAINT: nothing about x",
+               "COLUMN a1: Orbit Semi-Major Axis [au])"});
+  EXPECT_THAT(
+      meanings(head),
+      ElementsAre("orbital_period [days] comment", "orbital_period_err_plus [days] comment",
+                  "orbital_period_err_minus [days] comment", "planet_mass [Earth Mass] comment",
+                  "planet_mass_err_plus [Earth Mass] comment", "planet_mass_err_minus [Earth Mass] comment",
+                  "planet_mass_limit [] comment", "planet_mass_kind [] comment", "distance [pc] comment",
+                  "distance_err_plus [pc] comment", "magnitude_v [?mag] comment", "-", "semi_major_axis [au] comment"));
 }
 
 TEST(Understanding, DescriptionGivesTheUnitOfANamedColumn) {
-  EXPECT_EQ(meanings(head_of({"planet_radius"}, {"planet_radius: size [Jupiter Radius]"}))[0], "planet_radius [Jupiter Radius] name");
+  EXPECT_EQ(meanings(head_of({"planet_radius"}, {"planet_radius: size [Jupiter Radius]"}))[0],
+            "planet_radius [Jupiter Radius] name");
 }
 
 TEST(Understanding, DescriptionSettlesABareLetter) {
@@ -126,31 +146,39 @@ TEST(Understanding, DescriptionSettlesABareLetter) {
 }
 
 TEST(Understanding, SeveralUnitsOfOneQuantityAreChoices) {
-  const auto understanding = Understanding::of(head_of({"Planet radius [RJ]", "Planet radius err [RJ]", "Planet radius [R_earth]", "Planet radius err [R_earth]"}));
+  const auto understanding = Understanding::of(head_of(
+      {"Planet radius [RJ]", "Planet radius err [RJ]", "Planet radius [R_earth]", "Planet radius err [R_earth]"}));
   std::vector<std::size_t> choices;
   for (const auto& column : understanding.columns()) choices.push_back(column.choice);
   EXPECT_THAT(choices, ElementsAre(0, 0, 1, 1));
 }
 
 TEST(Understanding, CanonicalNameWinsOverWords) {
-  EXPECT_THAT(meanings(head_of({"Effective temperature", "Effective temperature err", "teff", "teff_err"})), ElementsAre("-", "-", "teff [?K] name", "teff_err [?K] name"));
+  EXPECT_THAT(meanings(head_of({"Effective temperature", "Effective temperature err", "teff", "teff_err"})),
+              ElementsAre("-", "-", "teff [?K] name", "teff_err [?K] name"));
 }
 
 TEST(Understanding, HalfWidthsOfALosingColumnDoNotMoveToTheWinner) {
   const auto map = ColumnMap::parse("[columns]\nteff = \"T spec\"\n", "map.toml");
-  EXPECT_THAT(meanings(head_of({"Teff", "Teff err", "T spec", "T spec err"}), map), ElementsAre("-", "-", "teff [?K] map", "teff_err [?K] words"));
+  EXPECT_THAT(meanings(head_of({"Teff", "Teff err", "T spec", "T spec err"}), map),
+              ElementsAre("-", "-", "teff [?K] map", "teff_err [?K] words"));
   EXPECT_THAT(meanings(head_of({"Teff", "Teff err", "T spec"}), map), ElementsAre("-", "-", "teff [?K] map"));
 }
 
 TEST(Understanding, TheMapWins) {
-  const auto map = ColumnMap::parse("ignore = [\"K\"]\n[columns]\nteff = \"Temp [K]\"\nteff_err = \"dT\"\ndistance = { column = \"d\", unit = \"ly\" }\nstellar_radius = \"R\"\n", "map.toml");
+  const auto map = ColumnMap::parse(
+      "ignore = [\"K\"]\n[columns]\nteff = \"Temp [K]\"\nteff_err = \"dT\"\ndistance = { column = \"d\", unit = \"ly\" "
+      "}\nstellar_radius = \"R\"\n",
+      "map.toml");
   EXPECT_THAT(meanings(head_of({"Temp [K]", "dT", "d", "R", "e_R", "K"}), map),
-              ElementsAre("teff [K] map", "teff_err [?K] map", "distance [ly] map", "stellar_radius [?solRad] map", "stellar_radius_err [?solRad] words", "-"));
+              ElementsAre("teff [K] map", "teff_err [?K] map", "distance [ly] map", "stellar_radius [?solRad] map",
+                          "stellar_radius_err [?solRad] words", "-"));
 }
 
 TEST(Understanding, TwoColumnsForOneQuantityAreAnError) {
   EXPECT_EQ(refusal({"Teff", "T_eff"}),
-            "list.csv: columns \"Teff\" and \"T_eff\" both look like teff; say which in a column map (--columns MAP.toml): teff = \"Teff\"  or  teff = \"T_eff\"");
+            "list.csv: columns \"Teff\" and \"T_eff\" both look like teff; say which in a column map (--columns "
+            "MAP.toml): teff = \"Teff\"  or  teff = \"T_eff\"");
   EXPECT_THAT(refusal({"Teff", "Teff err", "Teff sigma"}), HasSubstr("both look like teff_err"));
   EXPECT_EQ(refusal({"J mag", "mag J"}), "");  // not needed
 }
@@ -161,8 +189,11 @@ TEST(Understanding, TwoColumnsAreSettledByTheMap) {
 }
 
 TEST(Understanding, BareLettersAndWordsAreAnError) {
-  EXPECT_EQ(refusal({"R"}), "list.csv: column \"R\" may be stellar_radius or planet_radius; say which in a column map (--columns MAP.toml): stellar_radius = \"R\"  or  planet_radius = \"R\"  or  ignore = [\"R\"]");
-  for (const auto* const bare : {"a", "e", "R", "Rp", "mass", "Radius"}) EXPECT_THAT(refusal({bare}), HasSubstr("may be")) << bare;
+  EXPECT_EQ(refusal({"R"}),
+            "list.csv: column \"R\" may be stellar_radius or planet_radius; say which in a column map (--columns "
+            "MAP.toml): stellar_radius = \"R\"  or  planet_radius = \"R\"  or  ignore = [\"R\"]");
+  for (const auto* const bare : {"a", "e", "R", "Rp", "mass", "Radius"})
+    EXPECT_THAT(refusal({bare}), HasSubstr("may be")) << bare;
   // Magnitudes and velocities are no inputs of the main job: these are mentioned only.
   EXPECT_EQ(refusal({"K"}), "");
   EXPECT_THAT(refusal({"G"}), HasSubstr("magnitude_g or log_g"));
@@ -174,19 +205,26 @@ TEST(Understanding, BareLettersStopNobodyWhoDoesNotNeedThem) {
   EXPECT_EQ(refusal({"eccentricity", "e"}), "");
 }
 
-TEST(Understanding, FurtherDoubtsAreNamedToo) { EXPECT_THAT(refusal({"e", "Rp"}), HasSubstr("; also, column \"Rp\" may be")); }
+TEST(Understanding, FurtherDoubtsAreNamedToo) {
+  EXPECT_THAT(refusal({"e", "Rp"}), HasSubstr("; also, column \"Rp\" may be"));
+}
 
 TEST(Understanding, UnknownUnitIsAnErrorThatSaysWhatToWrite) {
   EXPECT_EQ(refusal({"Teff [furlong]"}),
-            "list.csv: the unit \"furlong\" of column \"Teff [furlong]\" is not one of teff; say which in a column map (--columns MAP.toml): "
+            "list.csv: the unit \"furlong\" of column \"Teff [furlong]\" is not one of teff; say which in a column map "
+            "(--columns MAP.toml): "
             "teff = { column = \"Teff [furlong]\", unit = \"K\" }  or  ignore = [\"Teff [furlong]\"]");
   EXPECT_THAT(refusal({"teff", "teff_err [AU]"}), HasSubstr("the unit \"AU\" of column \"teff_err [AU]\""));
   EXPECT_EQ(refusal({"V mag [Jy]"}), "");  // not needed: a note
-  EXPECT_EQ(refusal({"Teff [furlong]"}, ColumnMap::parse("[columns]\nteff = { column = \"Teff [furlong]\", unit = \"K\" }\n", "map.toml")), "");
+  EXPECT_EQ(refusal({"Teff [furlong]"},
+                    ColumnMap::parse("[columns]\nteff = { column = \"Teff [furlong]\", unit = \"K\" }\n", "map.toml")),
+            "");
 }
 
 TEST(Understanding, OutputColumnsOfARankedListAreLeftAlone) {
-  EXPECT_THAT(meanings(head_of({"rank", "star", "p_conservative", "conservative_inner_edge_err_plus", "flags", "merit"})), ElementsAre("-", "star [] name", "-", "-", "-", "-"));
+  EXPECT_THAT(
+      meanings(head_of({"rank", "star", "p_conservative", "conservative_inner_edge_err_plus", "flags", "merit"})),
+      ElementsAre("-", "star [] name", "-", "-", "-", "-"));
 }
 
 }  // namespace

@@ -32,18 +32,25 @@ TEST(Units, CanonicalUnitsOfTheCatalogueChangeNothing) {
 TEST(Units, CanonicalSpellingsOfEveryStandard) {
   const std::vector<std::pair<Quantity, std::vector<std::string>>> same{
       {Quantity::teff, {"K", "Kelvin", "kelvin", " K ", "deg K"}},
-      {Quantity::luminosity, {"solLum", "Lsun", "L_sun", "LSun", "L☉", "L_{\\odot}", "Lsol", "Solar", "solar luminosity", "L/Lsun"}},
-      {Quantity::log_luminosity, {"dex(solLum)", "log(solLum)", "log10(L/Lsun)", "[Lsun]", "dex", "log10(Solar)", "log(L/L_sun)", "Lsun"}},
-      {Quantity::stellar_radius, {"solRad", "Rsun", "R_sun", "RSun", "R☉", "R⊙", "Solar Radius", "solar radii", "solar"}},
+      {Quantity::luminosity,
+       {"solLum", "Lsun", "L_sun", "LSun", "L☉", "L_{\\odot}", "Lsol", "Solar", "solar luminosity", "L/Lsun"}},
+      {Quantity::log_luminosity,
+       {"dex(solLum)", "log(solLum)", "log10(L/Lsun)", "[Lsun]", "dex", "log10(Solar)", "log(L/L_sun)", "Lsun"}},
+      {Quantity::stellar_radius,
+       {"solRad", "Rsun", "R_sun", "RSun", "R☉", "R⊙", "Solar Radius", "solar radii", "solar"}},
       {Quantity::stellar_mass, {"solMass", "Msun", "M_sun", "Solar mass", "Solar Masses", "M☉"}},
-      {Quantity::planet_radius, {"earthRad", "R_earth", "Rearth", "R⊕", "RE", "Earth Radius", "earth radii", "Earth", "Rgeo"}},
-      {Quantity::planet_mass, {"earthMass", "M_earth", "Mearth", "M⊕", "ME", "Earth Mass", "earth masses", "5.9722E24kg"}},
+      {Quantity::planet_radius,
+       {"earthRad", "R_earth", "Rearth", "R⊕", "RE", "Earth Radius", "earth radii", "Earth", "Rgeo"}},
+      {Quantity::planet_mass,
+       {"earthMass", "M_earth", "Mearth", "M⊕", "ME", "Earth Mass", "earth masses", "5.9722E24kg"}},
       {Quantity::orbital_period, {"d", "day", "days", "Days", "DAYS"}},
       {Quantity::semi_major_axis, {"AU", "au", "a.u.", "astronomical unit"}},
       {Quantity::distance, {"pc", "parsec", "Parsecs"}},
       {Quantity::parallax, {"mas", "milliarcsec"}},
       {Quantity::insolation, {"1361W.m**-2", "Earth Flux", "S_earth", "S⊕", "earth", "solar constant"}},
-      {Quantity::log_g, {"dex(cm.s**-2)", "log(cm.s**-2)", "[cm/s2]", "[cm.s**-2]", "log10(cm/s**2)", "cgs", "dex", "cm/s2", "log(cm s^-2)"}},
+      {Quantity::log_g,
+       {"dex(cm.s**-2)", "log(cm.s**-2)", "[cm/s2]", "[cm.s**-2]", "log10(cm/s**2)", "cgs", "dex", "cm/s2",
+        "log(cm s^-2)"}},
       {Quantity::metallicity, {"dex", "[Fe/H]"}},
       {Quantity::age, {"Gyr", "Ga"}},
       {Quantity::rv_semi_amplitude, {"m.s**-1", "m/s", "m s-1", "m s^-1", "m.s-1", "m s$^{-1}$"}},
@@ -65,7 +72,8 @@ TEST(Units, OtherUnitsAreConverted) {
   EXPECT_EQ(factor(Quantity::orbital_period, "a"), 365.25);
   EXPECT_DOUBLE_EQ(factor(Quantity::orbital_period, "h"), 1.0 / 24);
   EXPECT_EQ(factor(Quantity::parallax, "arcsec"), 1000);
-  // Source: IAU 2015 Resolution B3, nominal equatorial radii 7.1492e7 m and 6.3781e6 m, GM 1.2668653e17 and 3.986004e14.
+  // Source: IAU 2015 Resolution B3, nominal equatorial radii 7.1492e7 m and 6.3781e6 m, GM 1.2668653e17
+  // and 3.986004e14.
   EXPECT_DOUBLE_EQ(factor(Quantity::planet_radius, "RJ"), 7.1492e7 / 6.3781e6);
   EXPECT_DOUBLE_EQ(factor(Quantity::planet_radius, "Jupiter Radius"), 7.1492e7 / 6.3781e6);
   EXPECT_DOUBLE_EQ(factor(Quantity::planet_mass, "MJ"), 1.2668653e17 / 3.986004e14);
@@ -119,7 +127,8 @@ TEST(Units, ReciprocalOfZeroIsABrokenPrecondition) {
 }
 
 TEST(Units, HalfWidthsTurnWithTheValue) {
-  const auto radius = convert(Measured{1, 0.5, {}, LimitMark::lower, false}, *conversion(Quantity::planet_radius, "RJ"));
+  const auto radius =
+      convert(Measured{1, 0.5, {}, LimitMark::lower, false}, *conversion(Quantity::planet_radius, "RJ"));
   EXPECT_DOUBLE_EQ(*radius.minus, 0.5 * radius.value);
   EXPECT_FALSE(radius.plus.has_value());
   EXPECT_EQ(radius.limit, LimitMark::lower);

@@ -9,9 +9,9 @@ namespace hz {
 /// Writes aside, in the folder of the final file, and renames in finish().
 ///
 /// Until finish() returns nothing is seen under the final name, and an older file there stays as it is. Destroying an
-/// unfinished file removes what was written aside, so unwinding by an exception leaves nothing behind. Path "-" is standard
-/// output; it and devices or pipes are written directly. A link is followed. Every failure (no such folder, full disk,
-/// reader gone) throws hz::Error (output) with the system's words.
+/// unfinished file removes what was written aside, so unwinding by an exception leaves nothing behind. Path "-" is
+/// standard output; it and devices or pipes are written directly. A link is followed. Every failure (no such folder,
+/// full disk, reader gone) throws hz::Error (output) with the system's words.
 class AtomicFile {
 public:
   explicit AtomicFile(std::string path);

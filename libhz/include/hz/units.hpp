@@ -21,17 +21,17 @@ struct Conversion {
   friend bool operator==(const Conversion&, const Conversion&) = default;
 };
 
-/// How `unit` becomes the canonical unit of `quantity`; nullopt for a unit that is unknown or of another dimension, and for
-/// every unit of a quantity that is no number.
+/// How `unit` becomes the canonical unit of `quantity`; nullopt for a unit that is unknown or of another dimension, and
+/// for every unit of a quantity that is no number.
 ///
 /// Understands the VOUnits, FITS, CDS and common astropy spellings and the words of published tables ("Earth Radius",
-/// "days", "Rsun", "RJ", "ly"), a number in front ("1361W.m**-2") and logarithms ("dex(cm.s**-2)", "log10(L/Lsun)", "dex").
-/// Case-exact where case matters. Empty: already canonical.
+/// "days", "Rsun", "RJ", "ly"), a number in front ("1361W.m**-2") and logarithms ("dex(cm.s**-2)", "log10(L/Lsun)",
+/// "dex"). Case-exact where case matters. Empty: already canonical.
 [[nodiscard]] std::optional<Conversion> conversion(Quantity quantity, std::string_view unit);
 
 /// The measured value in the canonical unit, half-widths and limit marks turned with it. A reciprocal needs a value
-/// above 0 (else a broken precondition); the ends of its interval are carried over exactly, and where the interval reaches
-/// past zero the half-width follows from the slope.
+/// above 0 (else a broken precondition); the ends of its interval are carried over exactly, and where the interval
+/// reaches past zero the half-width follows from the slope.
 [[nodiscard]] Measured convert(const Measured& measured, const Conversion& conversion);
 
 }  // namespace hz

@@ -35,7 +35,9 @@ ByteSource::~ByteSource() {
 }
 
 ByteSource::ByteSource(ByteSource&& other) noexcept
-    : name_(std::move(other.name_)), peeked_(std::move(other.peeked_)), descriptor_(std::exchange(other.descriptor_, -1)) {}
+    : name_(std::move(other.name_)),
+      peeked_(std::move(other.peeked_)),
+      descriptor_(std::exchange(other.descriptor_, -1)) {}
 
 std::string_view ByteSource::peek(std::size_t count) {
   while (peeked_.size() < count) {

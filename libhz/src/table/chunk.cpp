@@ -9,7 +9,9 @@ namespace {
 
 std::string as_text(std::string_view text) { return std::string(text); }
 std::string as_text(double number) { return std::isfinite(number) ? fmt::format("{}", number) : std::string(); }
-std::string as_text(const std::optional<std::int64_t>& number) { return number ? fmt::format("{}", *number) : std::string(); }
+std::string as_text(const std::optional<std::int64_t>& number) {
+  return number ? fmt::format("{}", *number) : std::string();
+}
 
 }  // namespace
 

@@ -56,14 +56,16 @@ private:
     } else if (key == "columns") {
       take_columns(key, node);
     } else {
-      fail(key.source(), fmt::format("{} is not a key of a column map; the keys are missing, ignore and [columns]", words::quoted(key.str())));
+      fail(key.source(), fmt::format("{} is not a key of a column map; the keys are missing, ignore and [columns]",
+                                     words::quoted(key.str())));
     }
   }
 
   std::vector<std::pair<std::string, toml::source_region>> texts(const toml::key& key, const toml::node& node) const {
     std::vector<std::pair<std::string, toml::source_region>> out;
     const auto* const array = node.as_array();
-    if (array == nullptr) fail(node.source(), fmt::format("{} must be a list of texts, as in {} = [\"…\"]", key.str(), key.str()));
+    if (array == nullptr)
+      fail(node.source(), fmt::format("{} must be a list of texts, as in {} = [\"…\"]", key.str(), key.str()));
     for (const auto& item : *array) out.emplace_back(text(item, key.str()), item.source());
     return out;
   }
@@ -82,7 +84,12 @@ private:
 
   [[nodiscard]] ColumnMap::Entry entry(const toml::key& key, const toml::node& node) const {
     const auto named = part_named(key.str());
-    if (!named) fail(key.source(), fmt::format("{} is not a column name of hzmap (with _err, _err_plus, _err_minus, _lower, _upper or _limit behind it)", words::quoted(key.str())));
+    if (!named)
+      fail(
+          key.source(),
+          fmt::format(
+              "{} is not a column name of hzmap (with _err, _err_plus, _err_minus, _lower, _upper or _limit behind it)",
+              words::quoted(key.str())));
     ColumnMap::Entry out{named->quantity, named->part, {}, {}, place(key.source())};
     if (const auto* const table = node.as_table()) {
       take_details(key, *table, out);
@@ -99,17 +106,21 @@ private:
       } else if (name == "unit") {
         entry.unit = unit(entry.quantity, value);
       } else {
-        fail(name.source(), fmt::format("{} is not known here; a column has {{ column = \"…\", unit = \"…\" }}", words::quoted(name.str())));
+        fail(name.source(), fmt::format("{} is not known here; a column has {{ column = \"…\", unit = \"…\" }}",
+                                        words::quoted(name.str())));
       }
     }
-    if (!table.contains("column")) fail(key.source(), fmt::format("{} names no column; write {{ column = \"…\", unit = \"…\" }}", key.str()));
+    if (!table.contains("column"))
+      fail(key.source(), fmt::format("{} names no column; write {{ column = \"…\", unit = \"…\" }}", key.str()));
   }
 
   [[nodiscard]] std::string unit(Quantity quantity, const toml::node& node) const {
     auto out = text(node, "unit");
     if (conversion(quantity, out)) return out;
-    fail(node.source(), is_numeric(quantity) ? fmt::format("{} is not a unit of {}; the canonical one is {}", words::quoted(out), name(quantity), words::quoted(info(quantity).unit))
-                                             : fmt::format("{} has no unit", name(quantity)));
+    fail(node.source(), is_numeric(quantity)
+                            ? fmt::format("{} is not a unit of {}; the canonical one is {}", words::quoted(out),
+                                          name(quantity), words::quoted(info(quantity).unit))
+                            : fmt::format("{} has no unit", name(quantity)));
   }
 
   std::string file_;
@@ -118,7 +129,9 @@ private:
 
 }  // namespace
 
-ColumnMap ColumnMap::parse(std::string_view toml_text, const std::string& file) { return MapParser(file).parse(toml_text); }
+ColumnMap ColumnMap::parse(std::string_view toml_text, const std::string& file) {
+  return MapParser(file).parse(toml_text);
+}
 
 std::string map_line(std::string_view key, std::string_view column, std::string_view unit) {
   if (unit.empty()) return fmt::format("{} = {}", key, in_toml_quotes(column));

@@ -24,10 +24,19 @@ std::string bracketed_unit(std::string_view description) {
 }
 
 // "R" of "R [Rsun]".
-std::string_view without_brackets(std::string_view header) { return words::trimmed(header.substr(0, header.find_first_of("[("))); }
+std::string_view without_brackets(std::string_view header) {
+  return words::trimmed(header.substr(0, header.find_first_of("[(")));
+}
 
 ColumnCandidate candidate(std::size_t column, HeaderMatch match, KnownBy known_by) {
-  return {column,   match.quantity, match.part, std::move(match.unit), match.unit_known, known_by, std::move(match.base), std::move(match.meanings)};
+  return {column,
+          match.quantity,
+          match.part,
+          std::move(match.unit),
+          match.unit_known,
+          known_by,
+          std::move(match.base),
+          std::move(match.meanings)};
 }
 
 class Matching {
@@ -50,14 +59,16 @@ private:
     for (std::size_t i = 0; i < head_.columns.size(); ++i) {
       if (head_.columns[i].name == column) return i;
     }
-    throw Error(Fault::input, fmt::format("{}: {} has no column named {}; write its header as the file spells it", place, head_.source, words::quoted(column)));
+    throw Error(Fault::input, fmt::format("{}: {} has no column named {}; write its header as the file spells it",
+                                          place, head_.source, words::quoted(column)));
   }
 
   void take_mapped() {
     for (const auto& entry : map_.entries) {
       const auto column = column_named(entry.column, entry.place);
       if (!taken_.insert(column).second) {
-        throw Error(Fault::input, fmt::format("{}: column {} stands in the map twice", entry.place, words::quoted(entry.column)));
+        throw Error(Fault::input,
+                    fmt::format("{}: column {} stands in the map twice", entry.place, words::quoted(entry.column)));
       }
       candidates_.push_back(mapped(entry, column));
       if (entry.part == ColumnPart::value) words_.learn(entry.column, entry.quantity);
@@ -88,7 +99,8 @@ private:
     std::map<std::string, std::set<Quantity>> meanings;
     for (std::size_t i = 0; i < head_.columns.size(); ++i) {
       const auto found = taken_.contains(i) ? std::nullopt : match(i);
-      if (found && found->part == ColumnPart::value && found->meanings.empty()) meanings[found->base].insert(found->quantity);
+      if (found && found->part == ColumnPart::value && found->meanings.empty())
+        meanings[found->base].insert(found->quantity);
     }
     for (const auto& [base, quantities] : meanings) {
       if (quantities.size() == 1) words_.learn(base, *quantities.begin());
@@ -104,7 +116,8 @@ private:
     const auto by_header = words_.match(column.name, column.unit);
     const bool is_bare = by_header && !by_header->meanings.empty();
     if (by_header && !is_bare) return candidate(i, *words_.match(column.name, unit), KnownBy::words);
-    if (auto found = words_.match(descriptions_[i], column.unit)) return candidate(i, *std::move(found), KnownBy::comment);
+    if (auto found = words_.match(descriptions_[i], column.unit))
+      return candidate(i, *std::move(found), KnownBy::comment);
     if (is_bare) return candidate(i, *words_.match(column.name, unit), KnownBy::words);
     return std::nullopt;
   }
@@ -112,7 +125,8 @@ private:
   std::optional<HeaderMatch> prefixed(std::string_view header, std::string_view unit) const {
     if (!header.starts_with("e_") && !header.starts_with("E_") && !header.starts_with("l_")) return std::nullopt;
     for (const auto& other : head_.columns) {
-      if (without_brackets(other.name) == header.substr(2)) return words_.match_prefixed(header.front(), other.name, unit);
+      if (without_brackets(other.name) == header.substr(2))
+        return words_.match_prefixed(header.front(), other.name, unit);
     }
     return std::nullopt;
   }
@@ -137,7 +151,8 @@ std::string described_in_comments(const TableHead& head, std::string_view column
     const auto colon = comment.find(':');
     if (colon == std::string::npos) continue;
     const auto text = std::string_view(comment);
-    if (describes(words::trimmed(text.substr(0, colon)), column)) return std::string(words::trimmed(text.substr(colon + 1)));
+    if (describes(words::trimmed(text.substr(0, colon)), column))
+      return std::string(words::trimmed(text.substr(colon + 1)));
   }
   return {};
 }

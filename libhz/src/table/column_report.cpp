@@ -13,11 +13,13 @@ namespace hz {
 namespace {
 
 bool knows_luminosity(const Understanding& known) {
-  return known.knows(Quantity::luminosity) || known.knows(Quantity::log_luminosity) || known.knows(Quantity::stellar_radius);
+  return known.knows(Quantity::luminosity) || known.knows(Quantity::log_luminosity) ||
+         known.knows(Quantity::stellar_radius);
 }
 
 bool knows_semi_major_axis(const Understanding& known) {
-  return known.knows(Quantity::semi_major_axis) || (known.knows(Quantity::orbital_period) && known.knows(Quantity::stellar_mass));
+  return known.knows(Quantity::semi_major_axis) ||
+         (known.knows(Quantity::orbital_period) && known.knows(Quantity::stellar_mass));
 }
 
 bool knows_insolation(const Understanding& known) {
@@ -25,7 +27,8 @@ bool knows_insolation(const Understanding& known) {
 }
 
 constexpr auto luminosity_choices = "luminosity, log_luminosity or stellar_radius";
-constexpr auto orbit_choices = "semi_major_axis, orbital_period with stellar_mass, scaled_semi_major_axis or insolation";
+constexpr auto orbit_choices =
+    "semi_major_axis, orbital_period with stellar_mass, scaled_semi_major_axis or insolation";
 
 std::vector<std::string> missing_for_stars(const Understanding& known) {
   std::vector<std::string> missing;
@@ -45,11 +48,18 @@ std::vector<std::string> missing_for_planets(const Understanding& known) {
 }
 
 ReportedColumn reported(const TableHead& head, const UnderstoodColumn& column) {
-  return {head.columns[column.column].name, canonical_name(column.quantity, column.part), column.unit, column.unit_assumed, column.known_by, {}, {}};
+  return {head.columns[column.column].name,
+          canonical_name(column.quantity, column.part),
+          column.unit,
+          column.unit_assumed,
+          column.known_by,
+          {},
+          {}};
 }
 
 std::string line_of(const TableHead& head, const UnderstoodColumn& column) {
-  return map_line(canonical_name(column.quantity, column.part), head.columns[column.column].name, column.unit_assumed ? std::string() : column.unit);
+  return map_line(canonical_name(column.quantity, column.part), head.columns[column.column].name,
+                  column.unit_assumed ? std::string() : column.unit);
 }
 
 std::string understood_lines(const TableHead& head, const Understanding& understanding) {
@@ -74,7 +84,8 @@ std::string doubt_lines(const Understanding& understanding) {
 
 std::string unused_lines(const TableHead& head, const Understanding& understanding) {
   std::string out;
-  for (const auto other : understanding.others()) out += fmt::format("#   {}\n", words::quoted(head.columns[other].name));
+  for (const auto other : understanding.others())
+    out += fmt::format("#   {}\n", words::quoted(head.columns[other].name));
   return out;
 }
 
@@ -90,7 +101,8 @@ std::vector<std::string> sample_values(const Chunk& chunk, std::size_t column, s
   return out;
 }
 
-ColumnReport report_columns(const TableHead& head, const Understanding& understanding, const std::optional<Chunk>& first) {
+ColumnReport report_columns(const TableHead& head, const Understanding& understanding,
+                            const std::optional<Chunk>& first) {
   ColumnReport report;
   for (const auto& column : head.columns) report.columns.push_back({column.name, {}, {}, false, {}, {}, {}});
   for (const auto& column : understanding.columns()) report.columns[column.column] = reported(head, column);
@@ -102,11 +114,16 @@ ColumnReport report_columns(const TableHead& head, const Understanding& understa
 }
 
 std::string starter_map(const TableHead& head, const Understanding& understanding) {
-  std::string out = fmt::format("# Column map for {}. It changes nothing until you take comment signs away.\n\n", head.source);
-  out += "# Further spellings of \"no value\", and columns to leave alone:\n# missing = [\"-99\"]\n# ignore = [\"…\"]\n\n[columns]\n";
-  if (!understanding.columns().empty()) out += "# Understood without this map:\n" + understood_lines(head, understanding);
+  std::string out =
+      fmt::format("# Column map for {}. It changes nothing until you take comment signs away.\n\n", head.source);
+  out +=
+      "# Further spellings of \"no value\", and columns to leave alone:\n# missing = [\"-99\"]\n# ignore = "
+      "[\"…\"]\n\n[columns]\n";
+  if (!understanding.columns().empty())
+    out += "# Understood without this map:\n" + understood_lines(head, understanding);
   if (!understanding.doubts().empty()) out += "\n# To be decided, one line of each:\n" + doubt_lines(understanding);
-  if (!understanding.others().empty()) out += "\n# Not used, as in  teff = { column = \"…\", unit = \"K\" }:\n" + unused_lines(head, understanding);
+  if (!understanding.others().empty())
+    out += "\n# Not used, as in  teff = { column = \"…\", unit = \"K\" }:\n" + unused_lines(head, understanding);
   return out;
 }
 

@@ -49,14 +49,17 @@ void CsvReader::read_more(std::string& text) { at_end_ = !source_.read(text, blo
 void CsvReader::refuse_long_row(std::size_t length) const {
   if (length <= longest_row) return;
   const auto quote = tokenizer_.open_quote_line();
-  throw Error(Fault::input,
-              fmt::format("{}:{}: this row is longer than {} MB; {}", head_.source, quote > 0 ? quote : tokenizer_.line(), longest_row / 1'000'000,
-                          quote > 0 ? "a quote opens here and does not close" : "check that the file is a table with line ends"));
+  throw Error(Fault::input, fmt::format("{}:{}: this row is longer than {} MB; {}", head_.source,
+                                        quote > 0 ? quote : tokenizer_.line(), longest_row / 1'000'000,
+                                        quote > 0 ? "a quote opens here and does not close"
+                                                  : "check that the file is a table with line ends"));
 }
 
 void CsvReader::refuse_headless() const {
-  const auto* const what = pending_.empty() ? "the file is empty" : "there is no header line, only comments or blank lines";
-  throw Error(Fault::input, fmt::format("{}: {}; a table starts with a line that names its columns", head_.source, what));
+  const auto* const what =
+      pending_.empty() ? "the file is empty" : "there is no header line, only comments or blank lines";
+  throw Error(Fault::input,
+              fmt::format("{}: {}; a table starts with a line that names its columns", head_.source, what));
 }
 
 void CsvReader::read_head() {
@@ -99,12 +102,13 @@ void CsvReader::take_names(const CsvRow& row) {
     const auto name = words::trimmed(row.cells[i]);
     const auto [first, is_new] = seen.emplace(name, i);
     if (!is_new && !name.empty()) {
-      throw Error(Fault::input, fmt::format("{}:{}: columns {} and {} are both named {}; rename one", head_.source, row.line, first->second + 1,
-                                            i + 1, words::quoted(name)));
+      throw Error(Fault::input, fmt::format("{}:{}: columns {} and {} are both named {}; rename one", head_.source,
+                                            row.line, first->second + 1, i + 1, words::quoted(name)));
     }
     head_.columns.push_back({std::string(name), {}, {}, {}});
   }
-  if (!row.trouble.empty()) throw Error(Fault::input, fmt::format("{}:{}: {} in the header", head_.source, row.line, row.trouble));
+  if (!row.trouble.empty())
+    throw Error(Fault::input, fmt::format("{}:{}: {} in the header", head_.source, row.line, row.trouble));
 }
 
 std::optional<Chunk> CsvReader::next() {
@@ -142,13 +146,16 @@ std::size_t CsvReader::read_rows(std::string& text, std::size_t from, Chunk& chu
 void CsvReader::add(const CsvRow& row, Chunk& chunk) const {
   const auto expected = head_.columns.size();
   for (std::size_t i = 0; i < expected; ++i) {
-    std::get<std::vector<std::string_view>>(chunk.columns[i]).push_back(i < row.cells.size() ? row.cells[i] : std::string_view());
+    std::get<std::vector<std::string_view>>(chunk.columns[i])
+        .push_back(i < row.cells.size() ? row.cells[i] : std::string_view());
   }
   chunk.lines.push_back(row.line);
   std::optional<Problem> problem;
   if (row.cells.size() != expected) {
-    problem = Problem{ProblemCode::unreadable, {},
-                      fmt::format("line {} holds {} cells where the header names {}", row.line, row.cells.size(), expected)};
+    problem =
+        Problem{ProblemCode::unreadable,
+                {},
+                fmt::format("line {} holds {} cells where the header names {}", row.line, row.cells.size(), expected)};
   } else if (!row.trouble.empty()) {
     problem = Problem{ProblemCode::unreadable, {}, fmt::format("in line {} {}", row.line, row.trouble)};
   }

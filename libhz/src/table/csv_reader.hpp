@@ -12,8 +12,8 @@ namespace hz {
 /// The longest row that is read; a longer one means a file that is no table or a quote left open.
 inline constexpr std::size_t longest_row = 4'000'000;
 
-/// Separator `,` `;` or tab, told from the header line; `#` lines are comments, before the header and between rows; blank
-/// lines are skipped; a byte-order mark is passed over.
+/// Separator `,` `;` or tab, told from the header line; `#` lines are comments, before the header and between rows;
+/// blank lines are skipped; a byte-order mark is passed over.
 class CsvReader : public TableReader {
 public:
   /// Reads the head. Throws hz::Error (input) when there is none.

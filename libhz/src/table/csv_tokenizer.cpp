@@ -36,7 +36,8 @@ struct CsvTokenizer::Pass {
   [[nodiscard]] bool at_end() const { return at == text.size(); }
 
   [[noreturn]] void refuse_nul() const {
-    throw Error(Fault::input, fmt::format("{}:{}: holds a NUL byte, so it is not a text table; save it as UTF-8 text", owner.file_, line));
+    throw Error(Fault::input, fmt::format("{}:{}: holds a NUL byte, so it is not a text table; save it as UTF-8 text",
+                                          owner.file_, line));
   }
 
   void skip_blanks() {
@@ -83,7 +84,8 @@ struct CsvTokenizer::Pass {
   bool unclosed(std::size_t opened) const {
     owner.open_quote_line_ = opened;
     if (!whole) return false;
-    throw Error(Fault::input, fmt::format("{}:{}: a quote opens here and never closes; close it or take it out", owner.file_, opened));
+    throw Error(Fault::input, fmt::format("{}:{}: a quote opens here and never closes; close it or take it out",
+                                          owner.file_, opened));
   }
 
   // At a line end or the end of the text: passes it. False when CR LF may be cut in two.

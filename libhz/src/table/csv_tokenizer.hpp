@@ -18,16 +18,16 @@ struct CsvRow {
 
 /// RFC 4180, and what people do beyond it: any separator, rows that end in LF, CRLF or CR, blanks around quoted cells.
 ///
-/// It works in place: cells are views into the text, and doubled quotes are made single there, so the text must be writable
-/// and must stay.
+/// It works in place: cells are views into the text, and doubled quotes are made single there, so the text must be
+/// writable and must stay.
 class CsvTokenizer {
 public:
   /// `file` names the text in messages; `line` is the number of its first line.
   CsvTokenizer(std::string file, char separator, std::size_t line = 1);
 
-  /// Reads the row that starts at `from` (an index into `text`) and returns where the next one starts; nullopt, changing
-  /// nothing, when the text ends within the row and is not `whole`. Throws hz::Error (input) for a NUL byte and, when
-  /// `whole`, for a quote that never closes.
+  /// Reads the row that starts at `from` (an index into `text`) and returns where the next one starts; nullopt,
+  /// changing nothing, when the text ends within the row and is not `whole`. Throws hz::Error (input) for a NUL byte
+  /// and, when `whole`, for a quote that never closes.
   std::optional<std::size_t> row(std::string& text, std::size_t from, bool whole, CsvRow& row);
 
   /// Where the line that starts at `from` ends and the next one starts, counted as passed; nullopt as above.

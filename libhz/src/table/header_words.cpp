@@ -92,7 +92,8 @@ std::vector<Group> bracket_groups(std::string_view text) {
     for (auto at = open; at < text.size(); ++at) {
       if (text[at] == text[open]) ++depth;
       if (text[at] != closing || --depth > 0) continue;
-      groups.push_back({text.substr(open + 1, at - open - 1), std::string(text.substr(0, open)) + ' ' + std::string(text.substr(at + 1))});
+      groups.push_back({text.substr(open + 1, at - open - 1),
+                        std::string(text.substr(0, open)) + ' ' + std::string(text.substr(at + 1))});
       open = at;
       break;
     }
@@ -146,7 +147,8 @@ void HeaderWords::learn(std::string_view words, Quantity quantity) { words_[word
 // "X err" or "err X". "e_X" and its like need the other columns: match_prefixed().
 void HeaderWords::add_affix(std::string_view spelling, ColumnPart part) {
   if (spelling.starts_with("X ")) affixes_.push_back({words::folded(spelling.substr(2)), false, part});
-  if (spelling.ends_with(" X")) affixes_.push_back({words::folded(spelling.substr(0, spelling.size() - 2)), true, part});
+  if (spelling.ends_with(" X"))
+    affixes_.push_back({words::folded(spelling.substr(0, spelling.size() - 2)), true, part});
 }
 
 std::optional<HeaderMatch> HeaderWords::match(std::string_view text, std::string_view stated_unit) const {
@@ -175,11 +177,15 @@ std::optional<HeaderMatch> HeaderWords::match_canonical(std::string_view text, s
   return match;
 }
 
-std::optional<HeaderMatch> HeaderWords::match_prefixed(char prefix, std::string_view value_column, std::string_view stated_unit) const {
+std::optional<HeaderMatch> HeaderWords::match_prefixed(char prefix, std::string_view value_column,
+                                                       std::string_view stated_unit) const {
   auto found = match_canonical(value_column, {});
   if (!found) found = match(value_column, {});
-  if (!found || found->part != ColumnPart::value || !found->meanings.empty() || !is_numeric(found->quantity)) return std::nullopt;
-  found->part = prefix == 'e' ? ColumnPart::half_width : prefix == 'E' ? ColumnPart::upper_half_width : ColumnPart::limit_mark;
+  if (!found || found->part != ColumnPart::value || !found->meanings.empty() || !is_numeric(found->quantity))
+    return std::nullopt;
+  found->part = prefix == 'e'   ? ColumnPart::half_width
+                : prefix == 'E' ? ColumnPart::upper_half_width
+                                : ColumnPart::limit_mark;
   if (!stated_unit.empty()) found->unit = stated_unit;
   check_unit(*found);
   return found;
@@ -204,7 +210,8 @@ std::optional<HeaderMatch> HeaderWords::match_part(const std::string& folded, st
   for (const Affix& affix : affixes_) {
     const bool fits = affix.in_front ? folded.starts_with(affix.letters) : folded.ends_with(affix.letters);
     if (!fits) continue;
-    const auto base = affix.in_front ? folded.substr(affix.letters.size()) : folded.substr(0, folded.size() - affix.letters.size());
+    const auto base =
+        affix.in_front ? folded.substr(affix.letters.size()) : folded.substr(0, folded.size() - affix.letters.size());
     const auto found = words_.find(base);
     if (found == words_.end() || !is_numeric(found->second)) continue;
     return HeaderMatch{found->second, affix.part, std::string(unit), base, true, {}};

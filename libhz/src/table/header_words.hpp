@@ -17,7 +17,8 @@ struct HeaderMatch {
   std::string unit;  // as written; empty without one
   std::string base;  // the folded words of the quantity itself, without part and unit
   bool unit_known = true;
-  std::vector<Quantity> meanings;  // more than none: a bare letter or word that may mean any of these, `quantity` is unset
+  std::vector<Quantity>
+      meanings;  // more than none: a bare letter or word that may mean any of these, `quantity` is unset
 };
 
 /// The words of catalogs/columns.csv, and those a list adds for itself.
@@ -28,15 +29,16 @@ public:
   /// From now on these words mean this quantity in this list (a mapped header, so that "e_R" follows "R").
   void learn(std::string_view words, Quantity quantity);
 
-  /// "Teff [K]", "Planet Mass (RJ) Upper Unc.": words, part and unit in any of the accepted ways. `stated_unit` is what the
-  /// file says of the unit elsewhere; a unit in the text itself wins.
+  /// "Teff [K]", "Planet Mass (RJ) Upper Unc.": words, part and unit in any of the accepted ways. `stated_unit` is what
+  /// the file says of the unit elsewhere; a unit in the text itself wins.
   [[nodiscard]] std::optional<HeaderMatch> match(std::string_view text, std::string_view stated_unit) const;
 
   /// "teff", "teff_err_plus [K]": our own name, letter by letter.
   [[nodiscard]] std::optional<HeaderMatch> match_canonical(std::string_view text, std::string_view stated_unit) const;
 
   /// "e_Teff", "E_Teff", "l_Teff" beside a column "Teff" (CDS): the part of what `value_column` is.
-  [[nodiscard]] std::optional<HeaderMatch> match_prefixed(char prefix, std::string_view value_column, std::string_view stated_unit) const;
+  [[nodiscard]] std::optional<HeaderMatch> match_prefixed(char prefix, std::string_view value_column,
+                                                          std::string_view stated_unit) const;
 
 private:
   struct Affix {

@@ -49,7 +49,9 @@ std::unique_ptr<TableReader> open_table(const std::string& path) {
   for (const Format& format : formats) {
     if (!format.begins(start)) continue;
     if (format.open != nullptr) return format.open(std::move(source));
-    throw Error(Fault::input, fmt::format("{}: this is {}, not a text table; save it as comma-separated text (CSV, UTF-8)", source.name(), format.name));
+    throw Error(Fault::input,
+                fmt::format("{}: this is {}, not a text table; save it as comma-separated text (CSV, UTF-8)",
+                            source.name(), format.name));
   }
   throw std::logic_error("hz: a format that takes anything must stand last");
 }

@@ -43,8 +43,10 @@ PlanetMassKind mass_kind(std::string_view text) {
   const auto kind = words::folded(text);
   if (holds(kind, "relation") || holds(kind, "radius") || kind == "mr") return PlanetMassKind::from_radius;
   if (kind == "msinisini" || kind == "masssinisini") return PlanetMassKind::measured;
-  if (holds(kind, "sini") || holds(kind, "minimum") || kind == "minmass" || kind == "min") return PlanetMassKind::minimum;
-  if (kind == "mass" || kind == "truemass" || holds(kind, "measured") || holds(kind, "dynamical")) return PlanetMassKind::measured;
+  if (holds(kind, "sini") || holds(kind, "minimum") || kind == "minmass" || kind == "min")
+    return PlanetMassKind::minimum;
+  if (kind == "mass" || kind == "truemass" || holds(kind, "measured") || holds(kind, "dynamical"))
+    return PlanetMassKind::measured;
   return PlanetMassKind::unsaid;
 }
 
@@ -68,11 +70,13 @@ Problem problem(const std::string& column, const std::string& what, ProblemCode 
 // How many units of the value's column one unit of the half-width's is.
 double ratio(const Conversion& half_width, const Conversion& value) {
   if (half_width.kind == ConversionKind::offset) return 1;
-  return half_width.kind == ConversionKind::reciprocal ? value.number / half_width.number : half_width.number / value.number;
+  return half_width.kind == ConversionKind::reciprocal ? value.number / half_width.number
+                                                       : half_width.number / value.number;
 }
 
 bool is_finite(const Measured& measured) {
-  return std::isfinite(measured.value) && std::isfinite(measured.minus.value_or(0)) && std::isfinite(measured.plus.value_or(0));
+  return std::isfinite(measured.value) && std::isfinite(measured.minus.value_or(0)) &&
+         std::isfinite(measured.plus.value_or(0));
 }
 
 }  // namespace
@@ -84,7 +88,8 @@ struct ReadingPlan::Cell {
   [[nodiscard]] bool empty() const { return text.empty() && !number; }
 };
 
-ReadingPlan::ReadingPlan(const TableHead& head, const std::vector<UnderstoodColumn>& columns, const std::vector<std::string>& missing_values) {
+ReadingPlan::ReadingPlan(const TableHead& head, const std::vector<UnderstoodColumn>& columns,
+                         const std::vector<std::string>& missing_values) {
   for (const auto& column : head.columns) headers_.push_back(column.name);
   for (const auto& text : missing_values) missing_.push_back(words::lower_case(words::trimmed(text)));
   for (const auto& column : columns) {
@@ -106,13 +111,27 @@ void ReadingPlan::add(const UnderstoodColumn& column) {
       choice.column = column.column;
       choice.conversion = conversion.value_or(Conversion{});
       break;
-    case ColumnPart::half_width: choice.half_width = side; break;
-    case ColumnPart::upper_half_width: choice.upper_half_width = side; break;
-    case ColumnPart::lower_half_width: choice.lower_half_width = side; break;
-    case ColumnPart::lower_bound: choice.lower_bound = side; break;
-    case ColumnPart::upper_bound: choice.upper_bound = side; break;
-    case ColumnPart::limit_mark: choice.limit_mark = column.column; break;
-    case ColumnPart::route: choice.route = column.column; break;
+    case ColumnPart::half_width:
+      choice.half_width = side;
+      break;
+    case ColumnPart::upper_half_width:
+      choice.upper_half_width = side;
+      break;
+    case ColumnPart::lower_half_width:
+      choice.lower_half_width = side;
+      break;
+    case ColumnPart::lower_bound:
+      choice.lower_bound = side;
+      break;
+    case ColumnPart::upper_bound:
+      choice.upper_bound = side;
+      break;
+    case ColumnPart::limit_mark:
+      choice.limit_mark = column.column;
+      break;
+    case ColumnPart::route:
+      choice.route = column.column;
+      break;
   }
 }
 
@@ -149,7 +168,8 @@ Field ReadingPlan::field(const Chunk& chunk, std::size_t row, Quantity quantity)
 }
 
 // nullopt when this choice says nothing in this row.
-std::optional<Field> ReadingPlan::chosen(const Chunk& chunk, std::size_t row, Quantity quantity, const Choice& choice) const {
+std::optional<Field> ReadingPlan::chosen(const Chunk& chunk, std::size_t row, Quantity quantity,
+                                         const Choice& choice) const {
   const auto value = cell(chunk, row, choice.column);
   if (value.empty()) return std::nullopt;
   const auto& header = headers_[choice.column];
@@ -157,19 +177,27 @@ std::optional<Field> ReadingPlan::chosen(const Chunk& chunk, std::size_t row, Qu
     const auto route = cell(chunk, row, *choice.route);
     if (!route.empty() && route.text != "stated") return Field{};
   }
-  const auto parsed = value.number ? Result<MeasuredText>(MeasuredText{Measured{*value.number, {}, {}, LimitMark::none, false}, {}}) : parse_measured(value.text, header);
+  const auto parsed =
+      value.number ? Result<MeasuredText>(MeasuredText{Measured{*value.number, {}, {}, LimitMark::none, false}, {}})
+                   : parse_measured(value.text, header);
   if (!parsed) return Field{{}, parsed.error()};
   auto conversion = std::optional(choice.conversion);
   if (!parsed->unit.empty()) conversion = hz::conversion(quantity, parsed->unit);
-  if (!conversion) return Field{{}, problem(header, fmt::format("holds {}, whose unit is not one of {}", words::quoted(value.text), name(quantity)))};
+  if (!conversion)
+    return Field{{},
+                 problem(header, fmt::format("holds {}, whose unit is not one of {}", words::quoted(value.text),
+                                             name(quantity)))};
   const auto measured = with_sides(chunk, row, parsed->measured, choice, *conversion);
   if (!measured) return Field{{}, measured.error()};
   const auto shown = [&] { return words::quoted(chunk.text(choice.column, row)); };
   if (conversion->kind == ConversionKind::reciprocal && measured->value <= 0) {
-    return Field{{}, problem(header, fmt::format("holds {}, and a parallax that is not above 0 gives no distance", shown()), ProblemCode::out_of_range)};
+    return Field{{},
+                 problem(header, fmt::format("holds {}, and a parallax that is not above 0 gives no distance", shown()),
+                         ProblemCode::out_of_range)};
   }
   const auto converted = convert(*measured, *conversion);
-  if (!is_finite(converted)) return Field{{}, problem(header, fmt::format("holds {}, which is not a finite value", shown()))};
+  if (!is_finite(converted))
+    return Field{{}, problem(header, fmt::format("holds {}, which is not a finite value", shown()))};
   return Field{converted, {}};
 }
 
@@ -196,8 +224,9 @@ Result<Measured> ReadingPlan::with_sides(const Chunk& chunk, std::size_t row, Me
   if (!measured.plus && *upper) measured.plus = **upper - measured.value;
   if (!measured.minus && *lower) measured.minus = measured.value - **lower;
   if (measured.plus.value_or(0) >= 0 && measured.minus.value_or(0) >= 0) return measured;
-  return problem(headers_[choice.column], fmt::format("holds {} with a half-width below 0, or a bound on the wrong side of it",
-                                                      words::quoted(chunk.text(choice.column, row))));
+  return problem(headers_[choice.column],
+                 fmt::format("holds {} with a half-width below 0, or a bound on the wrong side of it",
+                             words::quoted(chunk.text(choice.column, row))));
 }
 
 // The number of a half-width or bound column in the unit of its value; empty when there is none.
@@ -222,7 +251,8 @@ Result<LimitMark> ReadingPlan::limit(const Chunk& chunk, std::size_t row, std::s
   if (code == 0) return LimitMark::none;
   if (code == 1) return LimitMark::upper;
   if (code == -1) return LimitMark::lower;
-  return problem(headers_[column], fmt::format("holds {}, which is not one of 1, 0, -1, < and >", words::quoted(chunk.text(column, row))));
+  return problem(headers_[column], fmt::format("holds {}, which is not one of 1, 0, -1, < and >",
+                                               words::quoted(chunk.text(column, row))));
 }
 
 ListRow ReadingPlan::read(const Chunk& chunk, std::size_t row) const {

@@ -14,7 +14,8 @@ namespace hz {
 
 class ReadingPlan {
 public:
-  ReadingPlan(const TableHead& head, const std::vector<UnderstoodColumn>& columns, const std::vector<std::string>& missing_values);
+  ReadingPlan(const TableHead& head, const std::vector<UnderstoodColumn>& columns,
+              const std::vector<std::string>& missing_values);
 
   [[nodiscard]] ListRow read(const Chunk& chunk, std::size_t row) const;
 
@@ -34,14 +35,17 @@ private:
   struct Cell;
 
   void add(const UnderstoodColumn& column);
-  [[nodiscard]] const std::vector<Choice>& choices(Quantity quantity) const { return choices_[static_cast<std::size_t>(quantity)]; }
+  [[nodiscard]] const std::vector<Choice>& choices(Quantity quantity) const {
+    return choices_[static_cast<std::size_t>(quantity)];
+  }
 
   [[nodiscard]] Cell cell(const Chunk& chunk, std::size_t row, std::size_t column) const;
   [[nodiscard]] std::string text(const Chunk& chunk, std::size_t row, Quantity quantity) const;
   [[nodiscard]] Field field(const Chunk& chunk, std::size_t row, Quantity quantity) const;
-  [[nodiscard]] std::optional<Field> chosen(const Chunk& chunk, std::size_t row, Quantity quantity, const Choice& choice) const;
-  [[nodiscard]] Result<Measured> with_sides(const Chunk& chunk, std::size_t row, Measured measured, const Choice& choice,
-                                            const Conversion& conversion) const;
+  [[nodiscard]] std::optional<Field> chosen(const Chunk& chunk, std::size_t row, Quantity quantity,
+                                            const Choice& choice) const;
+  [[nodiscard]] Result<Measured> with_sides(const Chunk& chunk, std::size_t row, Measured measured,
+                                            const Choice& choice, const Conversion& conversion) const;
   [[nodiscard]] Result<std::optional<double>> side(const Chunk& chunk, std::size_t row, const std::optional<Side>& side,
                                                    const Conversion& conversion) const;
   [[nodiscard]] Result<LimitMark> limit(const Chunk& chunk, std::size_t row, std::size_t column) const;

@@ -21,11 +21,26 @@ namespace hz {
 namespace {
 
 constexpr auto all_inputs = std::to_array<Quantity>({
-    Quantity::star, Quantity::teff, Quantity::luminosity, Quantity::log_luminosity, Quantity::stellar_radius,
-    Quantity::stellar_mass, Quantity::log_g, Quantity::distance,
+    Quantity::star,
+    Quantity::teff,
+    Quantity::luminosity,
+    Quantity::log_luminosity,
+    Quantity::stellar_radius,
+    Quantity::stellar_mass,
+    Quantity::log_g,
+    Quantity::distance,
     // of a planet
-    Quantity::planet, Quantity::orbital_period, Quantity::semi_major_axis, Quantity::scaled_semi_major_axis, Quantity::eccentricity,
-    Quantity::insolation, Quantity::planet_radius, Quantity::planet_mass, Quantity::min_mass, Quantity::planet_mass_kind, Quantity::adopted,
+    Quantity::planet,
+    Quantity::orbital_period,
+    Quantity::semi_major_axis,
+    Quantity::scaled_semi_major_axis,
+    Quantity::eccentricity,
+    Quantity::insolation,
+    Quantity::planet_radius,
+    Quantity::planet_mass,
+    Quantity::min_mass,
+    Quantity::planet_mass_kind,
+    Quantity::adopted,
 });
 constexpr std::size_t star_input_count = 8;
 
@@ -48,14 +63,16 @@ struct Group {
 template <class Condition>
 void narrow(std::vector<Group*>& pool, Condition condition) {
   std::vector<Group*> kept;
-  std::copy_if(pool.begin(), pool.end(), std::back_inserter(kept), [&](const Group* group) { return condition(*group); });
+  std::copy_if(pool.begin(), pool.end(), std::back_inserter(kept),
+               [&](const Group* group) { return condition(*group); });
   if (!kept.empty()) pool = std::move(kept);
 }
 
 // Compares the candidates and decides.
 class Assembly {
 public:
-  Assembly(const TableHead& head, const ColumnMap& map, std::span<const Quantity> needed) : head_(head), needed_(needed) {
+  Assembly(const TableHead& head, const ColumnMap& map, std::span<const Quantity> needed)
+      : head_(head), needed_(needed) {
     const auto candidates = match_columns(head, map);
     for (const auto& candidate : candidates) {
       if (is_settled(candidate) && candidate.part == ColumnPart::value) groups_.push_back({candidate, {}, {}});
@@ -80,7 +97,8 @@ private:
   [[nodiscard]] const std::string& header(std::size_t column) const { return head_.columns[column].name; }
   [[nodiscard]] bool needs(Quantity quantity) const { return contains(needed_, quantity); }
   [[nodiscard]] bool knows(Quantity quantity) const {
-    return std::any_of(columns_.begin(), columns_.end(), [&](const auto& column) { return column.quantity == quantity; });
+    return std::any_of(columns_.begin(), columns_.end(),
+                       [&](const auto& column) { return column.quantity == quantity; });
   }
 
   // The value a half-width, bound or mark belongs to: that with the same words, unit and beginning of the header, the
@@ -151,7 +169,8 @@ private:
   }
 
   void add(const ColumnCandidate& candidate, const std::string& value_unit, std::size_t choice) {
-    const bool has_unit = candidate.part != ColumnPart::limit_mark && candidate.part != ColumnPart::route && is_numeric(candidate.quantity);
+    const bool has_unit = candidate.part != ColumnPart::limit_mark && candidate.part != ColumnPart::route &&
+                          is_numeric(candidate.quantity);
     auto unit = candidate.unit.empty() ? value_unit : candidate.unit;
     if (unit.empty()) unit = info(candidate.quantity).unit;
     columns_.push_back({candidate.column, candidate.quantity, candidate.part, has_unit ? unit : std::string(),
@@ -160,7 +179,11 @@ private:
 
   void compete(Quantity quantity, ColumnPart part, std::array<std::size_t, 2> columns) {
     const auto key = canonical_name(quantity, part);
-    Doubt doubt{columns[1], fmt::format("columns {} and {} both look like {}", words::quoted(header(columns[0])), words::quoted(header(columns[1])), key), {}, needs(quantity)};
+    Doubt doubt{columns[1],
+                fmt::format("columns {} and {} both look like {}", words::quoted(header(columns[0])),
+                            words::quoted(header(columns[1])), key),
+                {},
+                needs(quantity)};
     for (const auto column : columns) doubt.map_lines.push_back(map_line(key, header(column), {}));
     doubts_.push_back(std::move(doubt));
   }
@@ -192,8 +215,10 @@ private:
     const auto key = canonical_name(candidate.quantity, candidate.part);
     Doubt doubt;
     doubt.column = candidate.column;
-    doubt.what = fmt::format("the unit {} of column {} is not one of {}", words::quoted(candidate.unit), words::quoted(header(candidate.column)), key);
-    doubt.map_lines = {map_line(key, header(candidate.column), canonical.empty() ? "1" : canonical), ignore_line(header(candidate.column))};
+    doubt.what = fmt::format("the unit {} of column {} is not one of {}", words::quoted(candidate.unit),
+                             words::quoted(header(candidate.column)), key);
+    doubt.map_lines = {map_line(key, header(candidate.column), canonical.empty() ? "1" : canonical),
+                       ignore_line(header(candidate.column))};
     const bool is_value = candidate.part == ColumnPart::value;
     doubt.blocks = needs(candidate.quantity) && (is_value ? !knows(candidate.quantity) : knows(candidate.quantity));
     doubts_.push_back(std::move(doubt));
@@ -223,8 +248,8 @@ void refuse_doubts(const TableHead& head, const std::vector<Doubt>& doubts) {
     if (doubt.blocks) blocking.push_back(&doubt);
   }
   if (blocking.empty()) return;
-  auto what = fmt::format("{}: {}; say which in a column map (--columns MAP.toml): {}", head.source, blocking.front()->what,
-                          fmt::join(blocking.front()->map_lines, "  or  "));
+  auto what = fmt::format("{}: {}; say which in a column map (--columns MAP.toml): {}", head.source,
+                          blocking.front()->what, fmt::join(blocking.front()->map_lines, "  or  "));
   for (std::size_t i = 1; i < blocking.size(); ++i) what += fmt::format("; also, {}", blocking[i]->what);
   throw Error(Fault::input, what);
 }
@@ -251,8 +276,9 @@ Understanding Understanding::of(const TableHead& head, const ColumnMap& map, std
 }
 
 bool Understanding::knows(Quantity quantity) const {
-  return std::any_of(columns_.begin(), columns_.end(),
-                     [&](const auto& column) { return column.quantity == quantity && column.part == ColumnPart::value; });
+  return std::any_of(columns_.begin(), columns_.end(), [&](const auto& column) {
+    return column.quantity == quantity && column.part == ColumnPart::value;
+  });
 }
 
 ListRow Understanding::row(const Chunk& chunk, std::size_t index) const {

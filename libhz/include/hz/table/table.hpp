@@ -1,4 +1,5 @@
-// The one idea of a table: a head, and chunks of typed columns that stream past. Every format reads into it and writes from it.
+// The one idea of a table: a head, and chunks of typed columns that stream past. Every format reads into it and writes
+// from it.
 #pragma once
 #include <cstddef>
 #include <cstdint>
@@ -15,7 +16,7 @@ namespace hz {
 
 /// What a file says of one column; text fields are empty where it says nothing.
 struct ColumnHead {
-  std::string name;         // as the file spells it
+  std::string name;  // as the file spells it
   std::string unit;
   std::string ucd;
   std::string description;
@@ -29,14 +30,15 @@ struct TableHead {
 
 /// The cells of one column of one chunk. NaN stands for "no value" in a column of numbers, as in the binary formats; it
 /// never leaves the table layer. Text cells are views into the chunk's own storage.
-using Cells = std::variant<std::vector<std::string_view>, std::vector<double>, std::vector<std::optional<std::int64_t>>>;
+using Cells =
+    std::variant<std::vector<std::string_view>, std::vector<double>, std::vector<std::optional<std::int64_t>>>;
 
 /// Some consecutive rows.
 class Chunk {
 public:
-  std::size_t first_row = 1;               // number of its first row, counting data rows from 1
-  std::vector<Cells> columns;              // one entry a column of the head, all of the same length
-  std::vector<std::size_t> lines;          // line of each row in a text file; empty where lines mean nothing
+  std::size_t first_row = 1;                         // number of its first row, counting data rows from 1
+  std::vector<Cells> columns;                        // one entry a column of the head, all of the same length
+  std::vector<std::size_t> lines;                    // line of each row in a text file; empty where lines mean nothing
   std::vector<std::optional<Problem>> row_problems;  // a ragged or over-long row keeps its place with its problem
 
   [[nodiscard]] std::size_t rows() const { return row_problems.size(); }

@@ -21,7 +21,16 @@ enum class KnownBy { map, name, ucd, words, comment };
 [[nodiscard]] std::string_view text(KnownBy known_by);
 
 /// What part of a quantity a column holds.
-enum class ColumnPart { value, half_width, upper_half_width, lower_half_width, lower_bound, upper_bound, limit_mark, route };
+enum class ColumnPart {
+  value,
+  half_width,
+  upper_half_width,
+  lower_half_width,
+  lower_bound,
+  upper_bound,
+  limit_mark,
+  route
+};
 
 /// "teff", "teff_err_plus", ...: the canonical column name of a part.
 [[nodiscard]] std::string canonical_name(Quantity quantity, ColumnPart part);
@@ -87,8 +96,9 @@ class ReadingPlan;
 /// A head understood: which columns give which quantity, in which unit, and how to read a row.
 class Understanding {
 public:
-  /// Throws hz::Error (input) when two columns compete for one needed quantity or a needed column's unit is unknown or its
-  /// header ambiguous; the message prints the map line to write. Also when the map names a column that is not there.
+  /// Throws hz::Error (input) when two columns compete for one needed quantity or a needed column's unit is unknown or
+  /// its header ambiguous; the message prints the map line to write. Also when the map names a column that is not
+  /// there.
   [[nodiscard]] static Understanding of(const TableHead& head, const ColumnMap& map = {},
                                         std::span<const Quantity> needed = planet_inputs());
 
@@ -104,11 +114,11 @@ public:
   /// Some column gives its value.
   [[nodiscard]] bool knows(Quantity quantity) const;
 
-  /// One row as records in canonical units; unreadable cells become problems in their fields. A row with a problem of its
-  /// own has empty records. `kept` stays empty: what travels along is the caller's choice.
+  /// One row as records in canonical units; unreadable cells become problems in their fields. A row with a problem of
+  /// its own has empty records. `kept` stays empty: what travels along is the caller's choice.
   ///
-  /// A unit in a cell ("1.2 RJ") wins over the column's. A derived value of an earlier run of ours (its X_route column is
-  /// filled and is not "stated") is left out, so that a ranked file is itself a list.
+  /// A unit in a cell ("1.2 RJ") wins over the column's. A derived value of an earlier run of ours (its X_route column
+  /// is filled and is not "stated") is left out, so that a ranked file is itself a list.
   [[nodiscard]] ListRow row(const Chunk& chunk, std::size_t index) const;
 
 private:

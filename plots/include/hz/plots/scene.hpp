@@ -80,10 +80,11 @@ struct BarMark {
   std::vector<ColorStop> stops;  // by rising x
 };
 
-/// A disc that holds water up to a height.
+/// A disc that holds water up to a height, and a ring about it.
 struct DiscMark {
   Point center;
-  double radius = 0;
+  double radius = 0;  // of the ring
+  double gap = 0;     // between the disc and the ring
   double filled = 0;  // share of the diameter, from below
   Color water;
   Color ground;
@@ -115,14 +116,17 @@ struct TextStyle {
   Color color;
   bool bold = false;
   bool italic = false;
-  std::optional<Color> halo = std::nullopt;  // the ground's colour, where lines pass behind the words
 };
+
+/// What lies behind everything else.
+using Ground = std::variant<SectorMark, BarMark>;
 
 struct TextMark {
   Text text;
   TextStyle style;
   Point baseline;  // its left end
   Box box;         // of the ink
+  std::optional<Ground> ground = std::nullopt;  // lines behind the words are interrupted, and this shows (white outside)
 };
 
 using Shape = std::variant<LineMark, ArcMark, SectorMark, BarMark, DiscMark, WhiskerMark, TextMark>;
