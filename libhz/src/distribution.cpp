@@ -64,6 +64,7 @@ Distribution Distribution::two_piece(double value, double minus, double plus, As
   }
   // A one-sided value at the very end of its domain has no room at all; it is then known.
   for (std::size_t i = 0; i < result.count_; ++i) result.pieces_[i].weight /= total;
+  result.find_half_widths();
   return result;
 }
 
@@ -88,6 +89,7 @@ Distribution Distribution::scaled(double factor) const {
     result.pieces_[result.count_++] = piece;
   }
   for (std::size_t i = 0; i < result.count_; ++i) result.pieces_[i].weight /= total;
+  result.find_half_widths();
   return result;
 }
 
@@ -115,15 +117,20 @@ double Distribution::quantile(double u) const {
     low = std::min({low, piece.centre, tip});
     high = std::max({high, piece.centre, tip});
   }
-  while (true) {
+  const double wanted = 1e-12 * (high - low);
+  while (high - low > wanted) {
     const double middle = low + (high - low) / 2;
-    if (middle <= low || middle >= high) return middle;
     (below(middle) < u ? low : high) = middle;
   }
+  return low + (high - low) / 2;
 }
 
-double Distribution::minus() const { return is_exact() ? 0 : std::max(0.0, central_ - quantile(low_tail)); }
-
-double Distribution::plus() const { return is_exact() ? 0 : std::max(0.0, quantile(1 - low_tail) - central_); }
+void Distribution::find_half_widths() {
+  minus_ = plus_ = 0;
+  if (is_exact()) return;
+  const bool as_quoted = count_ == 2 && std::abs(pieces_[0].weight - 0.5) < 1e-9;  // medians that no domain cuts
+  minus_ = as_quoted ? pieces_[0].sigma : std::max(0.0, central_ - quantile(low_tail));
+  plus_ = as_quoted ? pieces_[1].sigma : std::max(0.0, quantile(1 - low_tail) - central_);
+}
 
 }  // namespace hz

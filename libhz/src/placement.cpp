@@ -2,195 +2,67 @@
 
 #include <algorithm>
 #include <cmath>
-#include <limits>
 
-#include "gauss_rules.hpp"
 #include "hz/require.hpp"
-#include "insolation_sum.hpp"
+#include "sum_term.hpp"
+#include "threshold.hpp"
 
 namespace hz {
 namespace {
 
-constexpr double infinity = std::numeric_limits<double>::infinity();
 constexpr double one_sigma_tail = 0.15865525393145705;  // Phi(-1)
 constexpr double ln10 = 2.302585092994045684;
 
-double half_normal_mass(double z) { return std::erf(z / std::sqrt(2.0)); }
-
-double reach(const Piece& piece) { return std::min(piece.end, integrated_sigmas); }
-
-/// The Teff for which the limits answer under a policy, and the fitted part of it.
-struct Answered {
-  Range fitted;
-  Range answered;
-};
-
-Answered answered_range(const std::optional<Range>& fitted, BeyondRange beyond) {
-  if (!fitted) return {{0, infinity}, {0, infinity}};
-  const double reach = beyond == BeyondRange::hold ? hold_reach : 0;
-  return {*fitted, {fitted->low - reach, fitted->high + reach}};
-}
-
-/// Planet masses as a few nodes; one where the limit does not depend on the mass.
-///
-/// The limit is linear in ln(mass) between its fitted masses and held outside, so the Gauss rule is taken in the clamped
-/// ln(mass): the runaway greenhouse of 2014 is nearly straight in it, and what lies outside becomes weight at the ends.
-Rule planet_mass_nodes(const PlacementInput& input, const FluxLimit& limit, double smoothness) {
-  const Distribution& x = input.planet_mass;
-  const double ln_per_unit = input.planet_mass_decadic ? ln10 : 0;
-  const auto ln_mass = [&](double value) { return ln_per_unit > 0 ? ln_per_unit * value : std::log(value); };
-  if (!limit.depends_on_planet_mass() || x.is_exact()) return {{std::exp(ln_mass(x.central())), 1}};
-
-  const Range fitted = *limit.planet_mass_range();
-  const double low = std::log(fitted.low);
-  const double high = std::log(fitted.high);
-  const auto unit_of = [&](double mass) { return input.planet_mass_decadic ? std::log10(mass) : mass; };
-  Rule dense;
-  for (const Piece& piece : x.pieces()) {
-    const double last = reach(piece);
-    Cuts cuts(last);
-    for (const double corner : {unit_of(fitted.low), unit_of(fitted.high)}) {
-      cuts.add(piece.direction * (corner - piece.centre) / piece.sigma);
-    }
-    double below = 0;
-    for (const double above : cuts.ends()) {
-      visit_half_normal(below, above, 10, [&](double z, double weight) {
-        const double mass = ln_mass(piece.centre + piece.direction * piece.sigma * z);
-        dense.push_back({std::clamp(mass, low, high), piece.weight * weight / half_normal_mass(last)});
-      });
-      below = above;
-    }
-  }
-  const double teff = input.teff.central();
-  const double span = std::abs(std::log(limit.clamped_insolation(teff, fitted.high) / limit.clamped_insolation(teff, fitted.low)));
-  const auto order = static_cast<std::size_t>(std::min(40.0, 3 + 4 * span / std::max(smoothness, 1e-3)));
-  Rule nodes = gauss_rule_of(dense, order);
-  for (Node& node : nodes) node.x = std::exp(node.x);
-  return nodes;
-}
-
 /// P(answered, ln S - ln S_limit >= shift) for one limit.
+///
+/// The widest of the inputs is taken in closed form through its own distribution function; all others are summed into one
+/// measure of a few hundred points beforehand, so that a shift costs as many distribution functions as there are points.
 class HotSide {
 public:
-  HotSide(const PlacementInput& input, const InsolationSum& sum, const FluxLimit& limit, const Answered& range, Effort effort)
-      : input_(input), sum_(sum), limit_(limit), range_(range), effort_(effort),
-        masses_(planet_mass_nodes(input, limit, effort == Effort::coarse ? 1 : sum.smoothness())) {}
-
-  [[nodiscard]] double probability(double shift) const {
-    if (input_.teff.is_exact()) return over_masses(input_.teff.central(), shift);
-    if (const std::optional<double> certain = certain_share(shift)) return *certain;
-    double sum = 0;
-    for (const Piece& piece : input_.teff.pieces()) sum += piece.weight * over_piece(piece, shift);
-    return sum;
+  HotSide(const PlacementInput& input, const TermSum& sum, const FluxLimit& limit, const AnsweredRange& range, Effort effort)
+      : sum_(sum), threshold_(input, limit, range, effort), answered_(share_in(input.teff, range.answered)) {
+    const std::size_t most = effort == Effort::coarse ? 48 : 256;
+    through_threshold_ = sum.terms.empty() || threshold_.width() > sum.terms.front().width();
+    if (is_certain(0) && effort == Effort::full) return;
+    if (through_threshold_) threshold_.make_tracks();
+    const double inner = through_threshold_ ? threshold_.width() : sum.terms.front().width();
+    const bool corners = through_threshold_ || sum.terms.front().has_corners();
+    rest_ = {{sum.constant, 1}};
+    for (std::size_t i = through_threshold_ ? 0 : 1; i < sum.terms.size(); ++i) {
+      rest_ = sum_of(rest_, sum.terms[i].points({sum.terms[i].width() / inner, corners}, effort), most);
+    }
+    if (through_threshold_) return;
+    Rule lowered = threshold_.points({threshold_.width() / inner, corners});
+    for (Node& node : lowered) node.x = -node.x;
+    rest_ = lowered.empty() ? lowered : sum_of(rest_, lowered, most);
   }
 
-  /// How far the threshold moves over a 68 per cent half-width of Teff.
-  [[nodiscard]] double teff_width() const {
-    double width = 0;
-    for (const Piece& piece : input_.teff.pieces()) width = std::max(width, threshold_shift(piece));
-    return width;
+  [[nodiscard]] double probability(double shift) const {
+    if (is_certain(shift)) return sum_.least > threshold_.greatest() + shift ? answered_ : 0;
+    double sum = 0;
+    for (const Node& node : rest_) {
+      sum += node.weight * (through_threshold_ ? threshold_.at_most(node.x - shift) : sum_.terms.front().tail(shift - node.x));
+    }
+    return std::clamp(sum, 0.0, answered_);
+  }
+
+  [[nodiscard]] double width() const {
+    double square = threshold_.width() * threshold_.width();
+    for (const SumTerm& term : sum_.terms) square += term.width() * term.width();
+    return std::sqrt(square);
   }
 
 private:
-  /// ln of what the Teff-free part of S must reach.
-  [[nodiscard]] double threshold(double teff, double planet_mass, double shift) const {
-    return std::log(limit_.clamped_insolation(teff, planet_mass)) + shift - input_.teff_power * std::log(teff);
+  /// Far from the limit the answer is the whole answered share or nothing.
+  [[nodiscard]] bool is_certain(double shift) const {
+    return sum_.least > threshold_.greatest() + shift || sum_.greatest < threshold_.least() + shift;
   }
 
-  [[nodiscard]] double over_masses(double teff, double shift) const {
-    double sum = 0;
-    for (const Node& node : masses_) sum += node.weight * sum_.tail(threshold(teff, node.x, shift));
-    return sum;
-  }
-
-  /// Far from the limit the answer is the whole answered share or nothing; seen from a few Teff, with room to spare.
-  [[nodiscard]] std::optional<double> certain_share(double shift) const {
-    double least = infinity;
-    double greatest = -infinity;
-    for (const Piece& piece : input_.teff.pieces()) {
-      for (const double part : {0.0, 0.5, 1.0}) {
-        const double teff = piece.centre + piece.direction * piece.sigma * part * reach(piece);
-        for (const Node& node : {masses_.front(), masses_.back()}) {
-          const double y = threshold(std::max(teff, 1.0), node.x, shift);
-          least = std::min(least, y);
-          greatest = std::max(greatest, y);
-        }
-      }
-    }
-    constexpr double room = 0.02;
-    if (sum_.least() > greatest + room) {
-      return input_.teff.below(range_.answered.high) - input_.teff.below(range_.answered.low);
-    }
-    if (sum_.greatest() < least - room) return 0;
-    return std::nullopt;
-  }
-
-  /// One half of the Teff distribution, cut at the ends of the fitted and of the answered range.
-  [[nodiscard]] double over_piece(const Piece& piece, double shift) const {
-    const double last = reach(piece);
-    Cuts cuts(last);
-    for (const double end : {range_.answered.low, range_.fitted.low, range_.fitted.high, range_.answered.high}) {
-      cuts.add(piece.direction * (end - piece.centre) / piece.sigma);
-    }
-    const auto at = [&](double z) { return over_masses(piece.centre + piece.direction * piece.sigma * z, shift); };
-    const auto is_answered = [&](double low, double high) {
-      return range_.answered.contains(piece.centre + piece.direction * piece.sigma * (low + high) / 2);
-    };
-    if (cuts.ends().size() == 1 && is_answered(0, last) && smooth_over(piece)) return over_whole(piece, last, at);
-    double sum = 0;
-    double low = 0;
-    for (const double high : cuts.ends()) {
-      if (is_answered(low, high)) sum += adaptive(low, high, at, 0);
-      low = high;
-    }
-    return sum / half_normal_mass(last);
-  }
-
-  [[nodiscard]] double threshold_shift(const Piece& piece) const {
-    const double mass = masses_.front().x;
-    const double tip = std::max(piece.centre + piece.direction * piece.sigma, 1.0);
-    return std::abs(threshold(tip, mass, 0) - threshold(piece.centre, mass, 0));
-  }
-
-  /// That shift over one sigma, against the scale on which the tail bends.
-  [[nodiscard]] double ratio(const Piece& piece) const {
-    return threshold_shift(piece) / std::max(sum_.smoothness(), 1e-300);
-  }
-
-  [[nodiscard]] bool smooth_over(const Piece& piece) const { return effort_ == Effort::coarse || ratio(piece) < 0.4; }
-
-  template <class Function>
-  [[nodiscard]] double over_whole(const Piece& piece, double last, const Function& at) const {
-    const std::size_t order = effort_ == Effort::coarse ? 4 : (ratio(piece) < 0.1 ? 4 : 8);
-    double sum = 0;
-    if (piece.end > integrated_sigmas) {
-      for (const Node& node : half_normal_rule(order)) sum += node.weight * at(node.x);
-      return sum;
-    }
-    visit_half_normal(0, last, order, [&](double z, double weight) { sum += weight * at(z); });
-    return sum / half_normal_mass(last);
-  }
-
-  /// Halves the interval until two rules agree: the integrand may be as sharp as a step.
-  template <class Function>
-  [[nodiscard]] double adaptive(double low, double high, const Function& at, int depth) const {
-    double fine = 0;
-    double rough = 0;
-    visit_half_normal(low, high, 10, [&](double z, double weight) { fine += weight * at(z); });
-    visit_half_normal(low, high, 7, [&](double z, double weight) { rough += weight * at(z); });
-    constexpr double wanted = 2e-6;
-    constexpr int deepest = 18;
-    if (std::abs(fine - rough) < wanted || depth == deepest) return fine;
-    const double middle = (low + high) / 2;
-    return adaptive(low, middle, at, depth + 1) + adaptive(middle, high, at, depth + 1);
-  }
-
-  const PlacementInput& input_;
-  const InsolationSum& sum_;
-  const FluxLimit& limit_;
-  Answered range_;
-  Effort effort_;
-  Rule masses_;
+  const TermSum& sum_;
+  Threshold threshold_;
+  double answered_;
+  bool through_threshold_ = false;
+  Rule rest_;  // everything but the variable in closed form
 };
 
 /// Where a falling function of a distance above 0 crosses zero, to a thousandth; 0 when it starts below. `scale` is a guess.
@@ -225,11 +97,6 @@ double falling_root(const Function& f, double scale) {
   return (low + high) / 2;
 }
 
-double share_in(const Distribution& teff, const Range& range) {
-  if (teff.is_exact()) return range.contains(teff.central()) ? 1 : 0;
-  return std::clamp(teff.below(range.high) - teff.below(range.low), 0.0, 1.0);
-}
-
 }  // namespace
 
 double central_insolation(const PlacementInput& input) {
@@ -243,12 +110,12 @@ double central_insolation(const PlacementInput& input) {
 
 Probabilities place(const PlacementInput& input, const LimitSet& set, BeyondRange beyond) {
   HZ_REQUIRE(set.bounds_a_zone());
-  const Answered range = answered_range(set.teff_range(), beyond);
-  const InsolationSum sum(input, Effort::full);
+  const AnsweredRange range = answered_range(set.teff_range(), beyond);
+  const TermSum sum(input);
   const double answered = share_in(input.teff, range.answered);
   const auto hot = [&](std::size_t limit) {
     if (answered == 0) return 0.0;
-    return std::clamp(HotSide(input, sum, set.limits[limit], range, Effort::full).probability(0), 0.0, answered);
+    return HotSide(input, sum, set.limits[limit], range, Effort::full).probability(0);
   };
 
   Probabilities p;
@@ -275,10 +142,10 @@ Probabilities place(const PlacementInput& input, const LimitSet& set, BeyondRang
 }
 
 double log_margin_width(const PlacementInput& input, const FluxLimit& limit, BeyondRange beyond, Towards towards) {
-  const Answered range = answered_range(limit.teff_range(), beyond);
+  const AnsweredRange range = answered_range(limit.teff_range(), beyond);
   const double answered = share_in(input.teff, range.answered);
   if (answered == 0) return 0;
-  const InsolationSum sum(input, Effort::coarse);
+  const TermSum sum(input);
   const HotSide side(input, sum, limit, range, Effort::coarse);
   const double mass = input.planet_mass_decadic ? std::pow(10, input.planet_mass.central()) : input.planet_mass.central();
   const double central = std::log(central_insolation(input) / limit.clamped_insolation(input.teff.central(), mass));
@@ -289,7 +156,7 @@ double log_margin_width(const PlacementInput& input, const FluxLimit& limit, Bey
     const double hotter = side.probability(central + sign * distance) / answered;
     return (sign > 0 ? hotter : 1 - hotter) - one_sigma_tail;
   };
-  return falling_root(excess, std::max(sum.width(), side.teff_width()));
+  return falling_root(excess, side.width());
 }
 
 }  // namespace hz

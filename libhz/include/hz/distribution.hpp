@@ -61,11 +61,15 @@ public:
   [[nodiscard]] double quantile(double u) const;
 
   /// Half-widths to the 16 and 84 per cent points of the distribution as it is, from the central value; at least 0.
-  [[nodiscard]] double minus() const;
-  [[nodiscard]] double plus() const;
+  [[nodiscard]] double minus() const { return minus_; }
+  [[nodiscard]] double plus() const { return plus_; }
 
 private:
+  void find_half_widths();
+
   double central_ = 0;
+  double minus_ = 0;
+  double plus_ = 0;
   std::array<Piece, 2> pieces_{};
   std::size_t count_ = 0;
 };
