@@ -118,7 +118,7 @@ std::string star_line(const ListRow& row, const Answer& answer) {
 
 std::string source_sentence(const LimitSet& set) {
   const bool by_mass = set.planet_mass_range().has_value();
-  return fmt::format("Limits: {}, {}{}.", set.key, set.citation, by_mass ? ", for a planet of 1 Earth mass" : "");
+  return fmt::format("Limits: {}, {}{}. A zone is a screening aid, not proof of habitability.", set.key, set.citation, by_mass ? ", for a planet of 1 Earth mass" : "");
 }
 
 }  // namespace

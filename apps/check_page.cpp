@@ -148,7 +148,7 @@ std::string assumed_line(const CheckReport& report) {
 
 std::string source_line(const CheckReport& report) {
   const LimitSet& set = *report.settings.limits;
-  return basis_sentence(report.settings) + (set.doi.empty() ? "" : " doi:" + set.doi + ".");
+  return basis_sentence(report.settings) + (set.doi.empty() ? "" : " (doi:" + set.doi + ")");
 }
 
 }  // namespace

@@ -68,7 +68,7 @@ std::vector<std::string> cells_of(const Candidate& candidate, const Place& place
 }
 
 AlignedTable empty_table() {
-  return AlignedTable({{"", Align::right},
+  return AlignedTable({{"place", Align::right},
                        {"planet"},
                        {"Teff (K)", Align::right},
                        {"S (S⊕)", Align::right},
@@ -131,7 +131,7 @@ std::string ranking_table(const std::vector<Candidate>& candidates, const std::v
 std::string basis_sentence(const Settings& settings) {
   const bool median = settings.asymmetry == Asymmetry::median;
   const std::string errors = settings.assumed_errors.empty() ? "missing errors taken as none" : "missing errors assumed and flagged";
-  return fmt::format("Limits: {}, {}. Asymmetric values read as {}; {}.", settings.limits->key, settings.limits->citation,
+  return fmt::format("Limits: {}, {}. Asymmetric values read as {}; {}. A zone is a screening aid, not proof of habitability.", settings.limits->key, settings.limits->citation,
                      median ? "medians" : "modes", errors);
 }
 
