@@ -14,6 +14,7 @@ namespace hz::plots {
 namespace {
 
 constexpr double whisker_distance = 3.4;  // from the disc
+constexpr double between_discs = 2.3;
 constexpr double widest_label = 60;
 
 Text p_text(const FigurePlanet& planet, const PlanetRowPlan& plan) {
@@ -92,15 +93,28 @@ std::optional<std::vector<Mark>> labels_beside(const Canvas& canvas, const std::
 /// By turns above and below.
 double turn(std::size_t index) { return index % 2 == 0 ? -1 : 1; }
 
-/// Neighbours that would cover each other step apart, by turns up and down.
-void step_apart(std::vector<PlanetSpot>& spots) {
+bool covers(const PlanetSpot& one, const PlanetSpot& other, const PlanetRowPlan& plan) {
+  const Point a = plan.position({one.x, one.y});
+  const Point b = plan.position({other.x, other.y});
+  return std::hypot(a.x - b.x, a.y - b.y) < one.size + other.size + between_discs;
+}
+
+/// Neighbours that would cover each other step apart, by turns up and down; where that is not enough, farther.
+void step_apart(std::vector<PlanetSpot>& spots, const PlanetRowPlan& plan) {
   for (std::size_t i = 1; i < spots.size(); ++i) {
-    const double apart = spots[i - 1].size + spots[i].size + 2.5;
+    if (!covers(spots[i - 1], spots[i], plan)) continue;
+    const double apart = spots[i - 1].size + spots[i].size + between_discs + 0.1;
     const double dx = spots[i].x - spots[i - 1].x;
-    if (dx >= apart) continue;
-    const double step = std::sqrt(apart * apart - dx * dx) / 2;
+    const double step = std::sqrt(std::max(0.0, apart * apart - dx * dx)) / 2;
     for (const std::size_t which : {i - 1, i})
       if (std::abs(spots[which].y) < step) spots[which].y = turn(which) * step;
+  }
+  for (std::size_t i = 1; i < spots.size(); ++i) {
+    const auto free = [&] {
+      return std::none_of(spots.begin(), spots.begin() + static_cast<std::ptrdiff_t>(i),
+                          [&](const PlanetSpot& before) { return covers(before, spots[i], plan); });
+    };
+    while (!free()) spots[i].y += 0.5 * turn(i);
   }
 }
 
@@ -147,7 +161,7 @@ std::optional<std::vector<Mark>> labels_on_shelves(const Canvas& canvas, const s
 
 /// Above and below by turns; where something hangs in the way above, all below.
 std::vector<Mark> labels_apart(const Canvas& canvas, std::vector<PlanetSpot>& spots, const PlanetRowPlan& plan) {
-  step_apart(spots);
+  step_apart(spots, plan);
   for (const bool all_below : {false, true}) {
     for (std::size_t i = 0; i < spots.size(); ++i) spots[i].side = all_below ? 1 : turn(i);
     place_whiskers(spots, plan);

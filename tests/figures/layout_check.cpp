@@ -45,6 +45,7 @@ public:
     for (const Mark& mark : scene_.marks) {
       check_page(mark);
       check_line_width(mark);
+      check_disc(mark);
       if (const TextMark* text = std::get_if<TextMark>(&mark.shape)) check_text(mark, *text);
     }
     return std::move(faults_);
@@ -59,6 +60,19 @@ private:
   void check_line_width(const Mark& mark) {
     const Stroke* stroke = std::visit(Widths{}, mark.shape);
     if (stroke && stroke->width < 0.5) faults_.push_back(mark.tag + " is a line under 0.5 pt");
+  }
+
+  /// Discs of planets do not cover each other.
+  void check_disc(const Mark& mark) {
+    const DiscMark* disc = std::get_if<DiscMark>(&mark.shape);
+    if (!disc || mark.tag.rfind("disc:", 0) != 0) return;
+    for (const Mark& other : scene_.marks) {
+      const DiscMark* second = std::get_if<DiscMark>(&other.shape);
+      if (!second || &other <= &mark || other.tag.rfind("disc:", 0) != 0) continue;
+      if (std::hypot(disc->center.x - second->center.x, disc->center.y - second->center.y) <
+          disc->radius + second->radius)
+        faults_.push_back(mark.tag + " covers " + other.tag);
+    }
   }
 
   void check_text(const Mark& mark, const TextMark& text) {

@@ -7,8 +7,8 @@
 
 namespace hz::plots::testing {
 
-/// Sentences about words that overlap words, discs or leaders, about marks that leave the page, and about words under
-/// 7 pt or lines under 0.5 pt; empty when all is well.
+/// Sentences about words that overlap words, discs or leaders, about planets that cover each other, marks that leave
+/// the page, words under 7 pt and lines under 0.5 pt; empty when all is well.
 std::vector<std::string> layout_faults(const Scene& scene);
 
 /// The shapes of one kind whose tag begins so.
