@@ -80,7 +80,7 @@ void add_decision(std::vector<OutputColumn>& columns) {
   columns.push_back({head("note"), [](const RankedRow& row) { return text(row.candidate.answer.note); }});
 }
 
-/// X_used with its half-widths, and X_route.
+/// X_used with its half-widths and route. X itself stays what the list states, so that the file is itself a list.
 template <class Get>
 void add_used(std::vector<OutputColumn>& columns, Quantity quantity, Get get) {
   const QuantityInfo& about = info(quantity);
@@ -95,7 +95,7 @@ void add_used(std::vector<OutputColumn>& columns, Quantity quantity, Get get) {
   part("", about.description + ", as used", [](const Measured& m) { return std::optional(m.value); });
   part("_err_minus", "lower half-width of " + used, [](const Measured& m) { return m.minus; });
   part("_err_plus", "upper half-width of " + used, [](const Measured& m) { return m.plus; });
-  columns.push_back({{about.name + "_route", "", "meta.note", "how " + used + " was obtained"}, [get](const RankedRow& row) {
+  columns.push_back({{used + "_route", "", "meta.note", "how " + used + " was obtained"}, [get](const RankedRow& row) {
                        const std::optional<Derived> derived = get(row.candidate.answer);
                        return derived ? text(derived->route) : CellValue();
                      }});
