@@ -19,8 +19,9 @@ double size_for(double width) {
 double checked(double width) {
   constexpr double rounding = 1e-6;
   if (width > narrowest_page - rounding && width < widest_page + rounding) return width;
-  throw Error(Fault::usage, fmt::format("a figure {:.4g} mm wide cannot be drawn; choose a width from {:.4g} to {:.4g} mm",
-                                        width / mm, narrowest_page / mm, widest_page / mm));
+  throw Error(Fault::usage,
+              fmt::format("a figure {:.4g} mm wide cannot be drawn; choose a width from {:.4g} to {:.4g} mm",
+                          width / mm, narrowest_page / mm, widest_page / mm));
 }
 
 }  // namespace

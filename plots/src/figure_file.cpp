@@ -72,7 +72,8 @@ int pixels(double points, double dpi) {
   const double count = std::ceil(points * dpi / 72 - 1e-6);
   if (count > largest_side)
     throw Error(Fault::usage, fmt::format("a PNG of this size at {:g} dpi would be {:.0f} pixels long (at most {}); "
-                                          "choose a smaller --dpi or write PDF or SVG", dpi, count, largest_side));
+                                          "choose a smaller --dpi or write PDF or SVG",
+                                          dpi, count, largest_side));
   return static_cast<int>(count);
 }
 
@@ -97,15 +98,18 @@ FigureFormat figure_format(const std::filesystem::path& path) {
   if (ending == ".svg") return FigureFormat::svg;
   if (ending == ".pdf") return FigureFormat::pdf;
   if (ending == ".png") return FigureFormat::png;
-  throw Error(Fault::usage, "cannot tell the kind of figure from '" + path.string() +
-                                "'; let its name end in .svg, .pdf or .png");
+  throw Error(Fault::usage,
+              "cannot tell the kind of figure from '" + path.string() + "'; let its name end in .svg, .pdf or .png");
 }
 
 std::string render(const Scene& scene, FigureFormat format, const FigureFile& about) {
   switch (format) {
-    case FigureFormat::svg: return svg_bytes(scene, about);
-    case FigureFormat::pdf: return pdf_bytes(scene, about);
-    case FigureFormat::png: return png_bytes(scene, about);
+    case FigureFormat::svg:
+      return svg_bytes(scene, about);
+    case FigureFormat::pdf:
+      return pdf_bytes(scene, about);
+    case FigureFormat::png:
+      return png_bytes(scene, about);
   }
   HZ_REQUIRE(!"a known format");
   return {};

@@ -14,14 +14,14 @@ namespace {
 /// Everything the key can say, about one set of systems.
 class KeyWriter {
 public:
-  KeyWriter(Canvas& canvas, const std::vector<FigureStar>& stars, const FigureOptions& options,
-            const KeyPlan& plan)
+  KeyWriter(Canvas& canvas, const std::vector<FigureStar>& stars, const FigureOptions& options, const KeyPlan& plan)
       : canvas_(canvas), key_(canvas), stars_(stars), options_(options), plan_(plan), unit_(plan.unit) {}
 
   double draw(double top) {
     if (any_planet([](const FigurePlanet&) { return true; })) add_planets();
     add_zones();
-    if (plan_.kind == FigureKind::wedge && any_planet([](const FigurePlanet& planet) { return planet.span.has_value(); }))
+    if (plan_.kind == FigureKind::wedge &&
+        any_planet([](const FigurePlanet& planet) { return planet.span.has_value(); }))
       add_line({palette::grey, 0.7, {}}, span_stroke());
     add_notes();
     return key_.draw(top);
@@ -51,9 +51,8 @@ private:
   void add_planets() {
     add_fillings();
     add_sizes();
-    if (any_planet([](const FigurePlanet& planet) {
-          return planet.semi_major_axis.minus || planet.semi_major_axis.plus;
-        })) {
+    if (any_planet(
+            [](const FigurePlanet& planet) { return planet.semi_major_axis.minus || planet.semi_major_axis.plus; })) {
       key_.start_group();
       key_.add_sample({WhiskerMark{-8, 8, 0, whisker_cap, false, false, {palette::ink, 0.7, {}}}}, {{"68 %"}});
     }
@@ -89,10 +88,10 @@ private:
   /// Two edges with the shade between them, the outer one fading.
   void add_zone(const Color& shade, const Stroke& stroke, const std::string& words) {
     const double half = 0.5 * canvas_.size();
-    const BarMark bar{{-9, -half, 18, 2 * half},
-                      {{-9, palette::white}, {-5, shade}, {5, shade}, {9, palette::white}}};
+    const BarMark bar{{-8, -half, 16, 2 * half},
+                      {{-8, palette::white}, {-4.5, shade}, {4.5, shade}, {8, palette::white}}};
     const auto edge = [&](double x) { return LineMark{{{x, -half}, {x, half}}, stroke}; };
-    key_.add_sample({bar, edge(-7), edge(7)}, {{words}});
+    key_.add_sample({bar, edge(-6.2), edge(6.2)}, {{words}});
   }
 
   void add_zones() {
@@ -135,7 +134,9 @@ private:
     const auto replaced = [&](const std::string& name) {
       return plain(canvas_.measure().printable(name)).find(replacement_sign) != std::string::npos;
     };
-    return any_planet([&](const FigurePlanet& planet) { return replaced(planet.label.empty() ? planet.name : planet.label); }) ||
+    return any_planet([&](const FigurePlanet& planet) {
+             return replaced(planet.label.empty() ? planet.name : planet.label);
+           }) ||
            any_limit([&](const FigureLimit& limit) { return replaced(limit.title); }) ||
            std::any_of(stars_.begin(), stars_.end(), [&](const FigureStar& star) { return replaced(star.name); });
   }
@@ -152,8 +153,8 @@ private:
 
 Stroke span_stroke() { return {palette::grey, 0.7, {0, 2}}; }
 
-double draw_key(Canvas& canvas, const std::vector<FigureStar>& stars, const FigureOptions& options,
-                const KeyPlan& plan, double top) {
+double draw_key(Canvas& canvas, const std::vector<FigureStar>& stars, const FigureOptions& options, const KeyPlan& plan,
+                double top) {
   return KeyWriter(canvas, stars, options, plan).draw(top);
 }
 

@@ -3,8 +3,8 @@
 #include <string>
 #include <vector>
 
-#include "hz/plots/system.hpp"
 #include "canvas.hpp"
+#include "hz/plots/system.hpp"
 
 namespace hz::plots {
 
@@ -16,12 +16,12 @@ enum class FigureKind { wedge, lanes };
 /// What the key must know beside the systems and the options.
 struct KeyPlan {
   FigureKind kind = FigureKind::wedge;
-  double unit = 4;    // as for disc_radius
-  std::string note;   // a last sentence; may be empty
+  double unit = 4;   // as for disc_radius
+  std::string note;  // a last sentence; may be empty
 };
 
 /// Draws what occurs in these systems, and names the limit set, below `top`; returns the lower end.
-double draw_key(Canvas& canvas, const std::vector<FigureStar>& stars, const FigureOptions& options,
-                const KeyPlan& plan, double top);
+double draw_key(Canvas& canvas, const std::vector<FigureStar>& stars, const FigureOptions& options, const KeyPlan& plan,
+                double top);
 
 }  // namespace hz::plots

@@ -38,9 +38,9 @@ struct Obstacle {
   std::size_t from_row = 0;
 };
 
-/// Labels in as few rows as keep every shift within `most_shift`, else in those with the smallest largest shift; leaders
-/// pass between the labels of nearer rows and never cross. Obstacles (by rising `low`) are kept clear of; those outside the
-/// space do not count. nullopt when no number of rows has room.
+/// Labels in as few rows as keep every shift within `most_shift`, else in those with the smallest largest shift;
+/// leaders pass between the labels of nearer rows and never cross. Obstacles (by rising `low`) are kept clear of; those
+/// outside the space do not count. nullopt when no number of rows has room.
 [[nodiscard]] std::optional<std::vector<LabelPath>> label_rows(const std::vector<Label>& labels,
                                                                const LabelSpace& space, double most_shift,
                                                                const std::vector<Obstacle>& obstacles = {});

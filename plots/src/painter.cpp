@@ -153,7 +153,8 @@ private:
   void fill_water(const DiscMark& disc) const {
     const double half = chord_half_angle(disc.filled);
     cairo_new_path(cr_);
-    cairo_arc(cr_, disc.center.x, disc.center.y, disc.radius - disc.gap, full_circle / 4 - half, full_circle / 4 + half);
+    cairo_arc(cr_, disc.center.x, disc.center.y, disc.radius - disc.gap, full_circle / 4 - half,
+              full_circle / 4 + half);
     cairo_close_path(cr_);
     set_source(disc.water);
     cairo_fill(cr_);

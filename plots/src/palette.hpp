@@ -17,12 +17,12 @@ constexpr Color mixed(const Color& first, const Color& second, double share) {
 constexpr Color rgb(int red, int green, int blue) { return {red / 255.0, green / 255.0, blue / 255.0}; }
 
 inline constexpr Color white = rgb(255, 255, 255);
-inline constexpr Color ink = rgb(34, 34, 34);          // words and whiskers
-inline constexpr Color grey = rgb(85, 85, 85);         // second words, orbits
-inline constexpr Color guide = rgb(119, 119, 119);     // thin lines that only lead the eye
-inline constexpr Color unknown = rgb(221, 221, 221);   // inside of a disc without a probability
-inline constexpr Color water = rgb(0, 68, 136);        // Tol high-contrast blue
-inline constexpr Color sky = rgb(86, 180, 233);        // Okabe-Ito sky blue
+inline constexpr Color ink = rgb(34, 34, 34);         // words and whiskers
+inline constexpr Color grey = rgb(85, 85, 85);        // second words, orbits
+inline constexpr Color guide = rgb(119, 119, 119);    // thin lines that only lead the eye
+inline constexpr Color unknown = rgb(221, 221, 221);  // inside of a disc without a probability
+inline constexpr Color water = rgb(0, 68, 136);       // Tol high-contrast blue
+inline constexpr Color sky = rgb(86, 180, 233);       // Okabe-Ito sky blue
 inline constexpr Color conservative = mixed(sky, white, 0.50);
 inline constexpr Color optimistic = mixed(sky, white, 0.22);
 

@@ -46,8 +46,8 @@ std::optional<WhiskerMark> whisker(const Measured& semi_major_axis, const LogSca
   const double near = semi_major_axis.value - semi_major_axis.minus.value_or(0);
   const double low = near > 0 ? axis.x(near) : axis.x0 - 1;
   const double high = axis.x(semi_major_axis.value + semi_major_axis.plus.value_or(0));
-  return WhiskerMark{std::max(low, axis.x0), std::min(high, axis.x1), y, whisker_cap, low < axis.x0, high > axis.x1,
-                     {palette::ink, 0.7, {}}};
+  return WhiskerMark{std::max(low, axis.x0),     std::min(high, axis.x1), y, whisker_cap,
+                     low<axis.x0, high> axis.x1, {palette::ink, 0.7, {}}};
 }
 
 Text label_text(const Canvas& canvas, const FigurePlanet& planet, const TextStyle& style, double width) {

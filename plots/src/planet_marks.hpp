@@ -2,8 +2,8 @@
 #pragma once
 #include <vector>
 
-#include "hz/plots/system.hpp"
 #include "canvas.hpp"
+#include "hz/plots/system.hpp"
 #include "log_scale.hpp"
 
 namespace hz::plots {
@@ -27,8 +27,7 @@ namespace hz::plots {
 inline constexpr double whisker_cap = 1.8;
 
 /// What is written beside the disc.
-[[nodiscard]] Text label_text(const Canvas& canvas, const FigurePlanet& planet, const TextStyle& style,
-                              double width);
+[[nodiscard]] Text label_text(const Canvas& canvas, const FigurePlanet& planet, const TextStyle& style, double width);
 
 /// By rising distance.
 [[nodiscard]] std::vector<const FigurePlanet*> by_distance(const FigureStar& star);

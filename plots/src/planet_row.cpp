@@ -2,7 +2,9 @@
 
 #include <algorithm>
 #include <cmath>
+#include <iterator>
 
+#include "hz/error.hpp"
 #include "number_text.hpp"
 #include "planet_marks.hpp"
 #include "planet_shelf.hpp"
@@ -12,6 +14,7 @@ namespace hz::plots {
 namespace {
 
 constexpr double whisker_distance = 3.4;  // from the disc
+constexpr double between_discs = 2.3;
 constexpr double widest_label = 60;
 
 Text p_text(const FigurePlanet& planet, const PlanetRowPlan& plan) {
@@ -26,8 +29,14 @@ double whisker_y(double size, const PlanetRowPlan& plan) {
 std::vector<PlanetSpot> spots_of(const Canvas& canvas, const FigureStar& star, const PlanetRowPlan& plan) {
   std::vector<PlanetSpot> spots;
   for (const FigurePlanet* planet : by_distance(star)) {
-    PlanetSpot spot{planet, plan.axis.x(planet->semi_major_axis.value),
-                    disc_radius(measured_radius(*planet), plan.unit), 0, {}, {}, {}};
+    PlanetSpot spot{planet,
+                    plan.axis.x(planet->semi_major_axis.value),
+                    disc_radius(measured_radius(*planet), plan.unit),
+                    0,
+                    1,
+                    {},
+                    {},
+                    {}};
     spot.letter = label_text(canvas, *planet, plan.letter, widest_label);
     spot.p = p_text(*planet, plan);
     spot.whisker = whisker(planet->semi_major_axis, plan.axis, whisker_y(spot.size, plan));
@@ -81,18 +90,31 @@ std::optional<std::vector<Mark>> labels_beside(const Canvas& canvas, const std::
   return all;
 }
 
-/// By turns above (-1) and below (1).
-double side_of(std::size_t index) { return index % 2 == 0 ? -1 : 1; }
+/// By turns above and below.
+double turn(std::size_t index) { return index % 2 == 0 ? -1 : 1; }
 
-/// Neighbours that would cover each other step apart, each to its own side.
-void step_apart(std::vector<PlanetSpot>& spots) {
+bool covers(const PlanetSpot& one, const PlanetSpot& other, const PlanetRowPlan& plan) {
+  const Point a = plan.position({one.x, one.y});
+  const Point b = plan.position({other.x, other.y});
+  return std::hypot(a.x - b.x, a.y - b.y) < one.size + other.size + between_discs;
+}
+
+/// Neighbours that would cover each other step apart, by turns up and down; where that is not enough, farther.
+void step_apart(std::vector<PlanetSpot>& spots, const PlanetRowPlan& plan) {
   for (std::size_t i = 1; i < spots.size(); ++i) {
-    const double apart = spots[i - 1].size + spots[i].size + 2.5;
+    if (!covers(spots[i - 1], spots[i], plan)) continue;
+    const double apart = spots[i - 1].size + spots[i].size + between_discs + 0.1;
     const double dx = spots[i].x - spots[i - 1].x;
-    if (dx >= apart) continue;
-    const double step = std::sqrt(apart * apart - dx * dx) / 2;
+    const double step = std::sqrt(std::max(0.0, apart * apart - dx * dx)) / 2;
     for (const std::size_t which : {i - 1, i})
-      if (std::abs(spots[which].y) < step) spots[which].y = side_of(which) * step;
+      if (std::abs(spots[which].y) < step) spots[which].y = turn(which) * step;
+  }
+  for (std::size_t i = 1; i < spots.size(); ++i) {
+    const auto free = [&] {
+      return std::none_of(spots.begin(), spots.begin() + static_cast<std::ptrdiff_t>(i),
+                          [&](const PlanetSpot& before) { return covers(before, spots[i], plan); });
+    };
+    while (!free()) spots[i].y += 0.5 * turn(i);
   }
 }
 
@@ -100,41 +122,52 @@ void step_apart(std::vector<PlanetSpot>& spots) {
 void place_whiskers(std::vector<PlanetSpot>& spots, const PlanetRowPlan& plan) {
   std::vector<Box> taken;
   for (const PlanetSpot& spot : spots) taken.push_back(disc_box(spot));
-  for (std::size_t i = 0; i < spots.size(); ++i) {
-    if (!spots[i].whisker) continue;
-    WhiskerMark& whisker = *spots[i].whisker;
-    whisker.y = spots[i].y + side_of(i) * whisker_y(spots[i].size, plan);
+  for (PlanetSpot& spot : spots) {
+    if (!spot.whisker) continue;
+    spot.whisker->y = spot.y + spot.side * whisker_y(spot.size, plan);
     const auto free = [&] {
       return std::none_of(taken.begin(), taken.end(),
-                          [&](const Box& box) { return box.overlaps(extent(whisker).grown(0.8)); });
+                          [&](const Box& box) { return box.overlaps(extent(*spot.whisker).grown(0.8)); });
     };
-    while (!free()) whisker.y += side_of(i);
-    taken.push_back(extent(whisker));
+    while (!free()) spot.whisker->y += spot.side;
+    taken.push_back(extent(*spot.whisker));
   }
 }
 
 /// How far the discs and whiskers of one side reach from the axis.
 double reach(const std::vector<PlanetSpot>& spots, double side, double clearance) {
   double farthest = clearance;
-  for (std::size_t i = 0; i < spots.size(); ++i) {
-    farthest = std::max(farthest, side * spots[i].y + spots[i].size);
-    if (spots[i].whisker && side_of(i) == side)
-      farthest = std::max(farthest, side * spots[i].whisker->y + whisker_cap);
+  for (const PlanetSpot& spot : spots) {
+    farthest = std::max(farthest, side * spot.y + spot.size);
+    if (spot.whisker && spot.side == side) farthest = std::max(farthest, side * spot.whisker->y + whisker_cap);
   }
   return farthest + 1;
 }
 
-std::vector<Mark> labels_on_shelves(const Canvas& canvas, const std::vector<PlanetSpot>& spots,
-                                    const PlanetRowPlan& plan) {
+/// Labels in rows on the sides that the planets have; nullopt when they find no room.
+std::optional<std::vector<Mark>> labels_on_shelves(const Canvas& canvas, const std::vector<PlanetSpot>& spots,
+                                                   const PlanetRowPlan& plan) {
   std::vector<Mark> marks;
   for (const double side : {-1.0, 1.0}) {
     std::vector<const PlanetSpot*> here;
-    for (std::size_t i = 0; i < spots.size(); ++i)
-      if (side_of(i) == side) here.push_back(&spots[i]);
-    for (Mark& mark : PlanetShelf(canvas, plan, side, reach(spots, side, plan.clearance)).filled(here))
-      marks.push_back(std::move(mark));
+    for (const PlanetSpot& spot : spots)
+      if (spot.side == side) here.push_back(&spot);
+    auto shelf = PlanetShelf(canvas, plan, side, reach(spots, side, plan.clearance)).filled(here);
+    if (!shelf) return std::nullopt;
+    std::move(shelf->begin(), shelf->end(), std::back_inserter(marks));
   }
   return marks;
+}
+
+/// Above and below by turns; where something hangs in the way above, all below.
+std::vector<Mark> labels_apart(const Canvas& canvas, std::vector<PlanetSpot>& spots, const PlanetRowPlan& plan) {
+  step_apart(spots, plan);
+  for (const bool all_below : {false, true}) {
+    for (std::size_t i = 0; i < spots.size(); ++i) spots[i].side = all_below ? 1 : turn(i);
+    place_whiskers(spots, plan);
+    if (auto labels = labels_on_shelves(canvas, spots, plan)) return std::move(*labels);
+  }
+  throw Error(Fault::usage, "the page is too narrow for the labels of so many planets; choose a larger --width");
 }
 
 Mark disc_mark(const PlanetSpot& spot, const PlanetRowPlan& plan) {
@@ -159,11 +192,7 @@ double room_at_side(const Canvas& canvas, const FigurePlanet& planet, const Plan
 std::vector<Mark> planet_row(const Canvas& canvas, const FigureStar& star, const PlanetRowPlan& plan) {
   std::vector<PlanetSpot> spots = spots_of(canvas, star, plan);
   auto labels = labels_beside(canvas, spots, plan);
-  if (!labels) {
-    step_apart(spots);
-    place_whiskers(spots, plan);
-    labels = labels_on_shelves(canvas, spots, plan);
-  }
+  if (!labels) labels = labels_apart(canvas, spots, plan);
   std::vector<Mark> marks;
   const auto is_leader = [](const Mark& mark) { return std::holds_alternative<LineMark>(mark.shape); };
   std::copy_if(labels->begin(), labels->end(), std::back_inserter(marks), is_leader);

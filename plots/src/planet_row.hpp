@@ -4,8 +4,8 @@
 #include <optional>
 #include <vector>
 
-#include "hz/plots/system.hpp"
 #include "canvas.hpp"
+#include "hz/plots/system.hpp"
 #include "log_scale.hpp"
 
 namespace hz::plots {
@@ -33,9 +33,9 @@ struct PlanetRowPlan {
 
 /// Discs, whiskers and labels of all planets.
 ///
-/// As long as nothing touches, labels stand beside their discs. Otherwise they go to rows above and below, by turns, with
-/// leaders; discs that would cover each other step apart. Throws hz::Error (usage) when the page is too narrow for so
-/// many labels.
+/// As long as nothing touches, labels stand beside their discs. Otherwise they go to rows above and below, by turns,
+/// with leaders; discs that would cover each other step apart. Throws hz::Error (usage) when the page is too narrow for
+/// so many labels.
 [[nodiscard]] std::vector<Mark> planet_row(const Canvas& canvas, const FigureStar& star, const PlanetRowPlan& plan);
 
 /// Room that a planet's label takes to the right of its place when it stands at the side of the disc, pt.

@@ -3,7 +3,6 @@
 #include <algorithm>
 #include <cmath>
 
-#include "hz/error.hpp"
 #include "palette.hpp"
 
 namespace hz::plots {
@@ -16,17 +15,17 @@ constexpr double slant = 5;            // height in which a leader moves sideway
 constexpr double before_words = 1.2;
 
 double cap(const TextStyle& style) { return cap_height * style.size; }
+double descent(const TextStyle& style) { return 0.24 * style.size; }
 
 }  // namespace
 
-std::vector<Mark> PlanetShelf::filled(const std::vector<const PlanetSpot*>& spots) const {
+std::optional<std::vector<Mark>> PlanetShelf::filled(const std::vector<const PlanetSpot*>& spots) const {
   std::vector<Label> labels;
   for (const PlanetSpot* spot : spots) labels.push_back({spot->x, width(*spot)});
-  const LabelSpace space{plan_.axis.x0 - 6, std::min(plan_.axis.x1 + 10, canvas_.width() - page_margin), between_labels};
-  auto paths = label_rows(labels, space, most_shift, obstacles());
-  if (!paths) paths = label_rows(labels, space, most_shift);
-  if (!paths)
-    throw Error(Fault::usage, "the page is too narrow for the labels of so many planets; choose a larger --width");
+  const LabelSpace space{plan_.axis.x0 - 6, std::min(plan_.axis.x1 + 10, canvas_.width() - page_margin),
+                         between_labels};
+  const auto paths = label_rows(labels, space, most_shift, obstacles());
+  if (!paths) return std::nullopt;
   std::vector<Mark> marks;
   for (std::size_t i = 0; i < spots.size(); ++i) marks.push_back(leader(*spots[i], (*paths)[i]));
   for (std::size_t i = 0; i < spots.size(); ++i) add_words(marks, *spots[i], (*paths)[i]);
@@ -50,7 +49,7 @@ double PlanetShelf::width(const PlanetSpot& spot) const {
 }
 
 double PlanetShelf::height() const {
-  return cap(plan_.letter) + (plan_.labels_at_side ? between_lines + cap(plan_.p) : 0);
+  return cap(plan_.letter) + (plan_.labels_at_side ? between_lines + cap(plan_.p) : descent(plan_.letter));
 }
 
 double PlanetShelf::near(std::size_t row) const {
@@ -71,9 +70,9 @@ void PlanetShelf::add_words(std::vector<Mark>& marks, const PlanetSpot& spot, co
   const double top = std::min(near(label.row()), far(label.row()));
   const double middle = label.path.back();
   const bool alone_above = spot.p.empty() && side_ < 0;  // then it stands where P would, at the end of its leader
-  const Point letter{middle, alone_above ? top + height() : top + cap(plan_.letter)};
+  const Point letter{middle, alone_above ? top + height() - descent(plan_.letter) : top + cap(plan_.letter)};
   marks.push_back(over_ground(plan_, "label:" + spot.planet->name,
-                         canvas_.text_at(spot.letter, plan_.letter, letter, Align::center)));
+                              canvas_.text_at(spot.letter, plan_.letter, letter, Align::center)));
   if (spot.p.empty()) return;
   const Point p{middle, top + height()};
   marks.push_back(over_ground(plan_, "p:" + spot.planet->name, canvas_.text_at(spot.p, plan_.p, p, Align::center)));

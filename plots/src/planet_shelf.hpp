@@ -1,5 +1,6 @@
 // Rows of labels on one side of an axis.
 #pragma once
+#include <optional>
 #include <vector>
 
 #include "label_rows.hpp"
@@ -15,8 +16,8 @@ public:
   PlanetShelf(const Canvas& canvas, const PlanetRowPlan& plan, double side, double reach)
       : canvas_(canvas), plan_(plan), side_(side), reach_(reach) {}
 
-  /// Leaders first. Throws hz::Error (usage) when no number of rows has room.
-  [[nodiscard]] std::vector<Mark> filled(const std::vector<const PlanetSpot*>& spots) const;
+  /// Leaders first; nullopt when no number of rows has room.
+  [[nodiscard]] std::optional<std::vector<Mark>> filled(const std::vector<const PlanetSpot*>& spots) const;
 
 private:
   [[nodiscard]] double width(const PlanetSpot& spot) const;

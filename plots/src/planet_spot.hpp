@@ -12,6 +12,7 @@ struct PlanetSpot {
   double x = 0;
   double size = 0;  // radius of the disc
   double y = 0;     // of the disc's centre
+  double side = 1;  // of the axis on which its whisker and label stand: -1 above, 1 below
   Text letter;
   Text p;  // empty where it is not written
   std::optional<WhiskerMark> whisker;

@@ -3,8 +3,8 @@
 #include <string>
 #include <vector>
 
-#include "hz/plots/system.hpp"
 #include "canvas.hpp"
+#include "hz/plots/system.hpp"
 #include "log_scale.hpp"
 
 namespace hz::plots {
@@ -12,8 +12,8 @@ namespace hz::plots {
 struct Ruler {
   std::string name;  // for the tags: "distance"
   LogScale scale;
-  double y = 0;               // of the line
-  std::string low_x_word;     // at the ends, below the line; they tell the direction of a scale that runs against habit
+  double y = 0;            // of the line
+  std::string low_x_word;  // at the ends, below the line; they tell the direction of a scale that runs against habit
   std::string high_x_word;
 };
 

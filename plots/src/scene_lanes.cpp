@@ -2,11 +2,11 @@
 
 #include <algorithm>
 
-#include "hz/plots/figures.hpp"
-#include "hz/require.hpp"
 #include "axis_fit.hpp"
 #include "canvas.hpp"
 #include "figure_key.hpp"
+#include "hz/plots/figures.hpp"
+#include "hz/require.hpp"
 #include "number_text.hpp"
 #include "palette.hpp"
 #include "planet_marks.hpp"

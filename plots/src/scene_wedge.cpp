@@ -2,11 +2,11 @@
 #include <array>
 #include <cmath>
 
-#include "hz/constants.hpp"
-#include "hz/plots/figures.hpp"
 #include "axis_fit.hpp"
 #include "canvas.hpp"
 #include "figure_key.hpp"
+#include "hz/constants.hpp"
+#include "hz/plots/figures.hpp"
 #include "number_text.hpp"
 #include "palette.hpp"
 #include "planet_marks.hpp"
@@ -40,7 +40,8 @@ const std::array<std::string, 4> column_words{"distance", "insolation", "Earth =
 
 double column_width(const Canvas& canvas, const StarWords& words) {
   double width = 0;
-  for (const std::string& word : column_words) width = std::max(width, canvas.measure().advance({{word}}, canvas.words()));
+  for (const std::string& word : column_words)
+    width = std::max(width, canvas.measure().advance({{word}}, canvas.words()));
   for (const Text& line : words.name) width = std::max(width, canvas.measure().advance(line, canvas.names()));
   for (const Text& line : words.facts) width = std::max(width, canvas.measure().advance(line, canvas.quiet_words()));
   return width;

@@ -18,12 +18,18 @@ std::uint64_t fingerprint(std::string_view bytes) {
 std::string escaped(std::string_view text) {
   std::string out;
   for (const char c : text) {
-    if (c == '&') out += "&amp;";
-    else if (c == '<') out += "&lt;";
-    else if (c == '>') out += "&gt;";
-    else if (c == '"') out += "&quot;";
-    else if (static_cast<unsigned char>(c) < 0x20) out += ' ';
-    else out += c;
+    if (c == '&')
+      out += "&amp;";
+    else if (c == '<')
+      out += "&lt;";
+    else if (c == '>')
+      out += "&gt;";
+    else if (c == '"')
+      out += "&quot;";
+    else if (static_cast<unsigned char>(c) < 0x20)
+      out += ' ';
+    else
+      out += c;
   }
   return out;
 }
@@ -33,11 +39,21 @@ void replace_all(std::string& text, std::string_view from, const std::string& to
     text.replace(at, from.size(), to);
 }
 
+/// Cairo numbers its surfaces through the life of a program; a figure must not depend on what was drawn before it.
+void renumber_surfaces(std::string& svg) {
+  constexpr std::string_view start = " id=\"surface";
+  for (std::size_t at = svg.find(start); at != svg.npos; at = svg.find(start, at + 1)) {
+    const std::size_t digits = at + start.size();
+    svg.erase(digits, svg.find('"', digits) - digits);
+  }
+}
+
 }  // namespace
 
 std::string finished_svg(const std::string& svg, const std::string& title, const std::string& description) {
-  const std::string prefix = fmt::format("hz{:016x}-", fingerprint(svg + title + description));
   std::string out = svg;
+  renumber_surfaces(out);
+  const std::string prefix = fmt::format("hz{:016x}-", fingerprint(out + title + description));
   replace_all(out, " id=\"", " id=\"" + prefix);
   replace_all(out, "href=\"#", "href=\"#" + prefix);
   replace_all(out, "url(#", "url(#" + prefix);

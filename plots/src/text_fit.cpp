@@ -18,8 +18,10 @@ std::vector<TextRun> letters_of(const Text& text) {
       const std::string letter(at, static_cast<const char*>(g_utf8_next_char(at)));
       const gunichar character = g_utf8_get_char(at);
       const bool joins = g_unichar_ismark(character) || g_unichar_iszerowidth(character);
-      if (joins && !letters.empty()) letters.back().text += letter;
-      else letters.push_back({letter, run.script, run.bold});
+      if (joins && !letters.empty())
+        letters.back().text += letter;
+      else
+        letters.push_back({letter, run.script, run.bold});
     }
   }
   return letters;

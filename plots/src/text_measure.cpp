@@ -75,7 +75,7 @@ void insert(PangoAttrList* list, PangoAttribute* attribute, std::size_t from, st
 void insert_script(PangoAttrList* list, Script script, double size, std::size_t from, std::size_t to) {
   if (script == Script::normal) return;
   const double rise = script == Script::sub ? -0.18 : 0.38;
-  insert(list, pango_attr_size_new_absolute(pango_units(0.72 * size)), from, to);
+  insert(list, pango_attr_size_new_absolute(pango_units(0.75 * size)), from, to);
   insert(list, pango_attr_rise_new(pango_units(rise * size)), from, to);
 }
 
@@ -160,10 +160,14 @@ Text TextMeasure::printable(std::string_view typed) const {
     const Script script = sun || character == 0x2295 ? Script::sub : Script::normal;
     if (text.empty() || text.back().script != script) text.push_back({"", script});
     std::string& words = text.back().text;
-    if (sun) words += "\u2299";
-    else if ((g_unichar_isspace(character) && character != no_break_space) || g_unichar_iscntrl(character)) words += ' ';
-    else if (pango_->holds(character)) words.append(at, static_cast<const char*>(g_utf8_next_char(at)));
-    else words += replacement_sign;
+    if (sun)
+      words += "\u2299";
+    else if ((g_unichar_isspace(character) && character != no_break_space) || g_unichar_iscntrl(character))
+      words += ' ';
+    else if (pango_->holds(character))
+      words.append(at, static_cast<const char*>(g_utf8_next_char(at)));
+    else
+      words += replacement_sign;
   }
   return text;
 }

@@ -20,15 +20,12 @@ LimitTitles::LimitTitles(const Canvas& canvas, const FigureStar& star, const Wed
     : canvas_(canvas), frame_(frame) {
   for (const FigureLimit& limit : star.limits)
     if (on_axis(frame.axis, limit.distance.value)) limits_.push_back(&limit);
-  std::stable_sort(limits_.begin(), limits_.end(), [](const FigureLimit* a, const FigureLimit* b) {
-    return a->distance.value < b->distance.value;
-  });
+  std::stable_sort(limits_.begin(), limits_.end(),
+                   [](const FigureLimit* a, const FigureLimit* b) { return a->distance.value < b->distance.value; });
   choose_lines();
 }
 
-double LimitTitles::height() const {
-  return limits_.empty() ? 0 : static_cast<double>(rows_) * row_height() + drop_;
-}
+double LimitTitles::height() const { return limits_.empty() ? 0 : static_cast<double>(rows_) * row_height() + drop_; }
 
 std::vector<Mark> LimitTitles::marks(double top, double star_y) const {
   std::vector<Mark> all;

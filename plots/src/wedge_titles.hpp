@@ -2,8 +2,8 @@
 #pragma once
 #include <vector>
 
-#include "hz/plots/system.hpp"
 #include "canvas.hpp"
+#include "hz/plots/system.hpp"
 #include "label_rows.hpp"
 #include "planet_row.hpp"
 #include "wedge_frame.hpp"

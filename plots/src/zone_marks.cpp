@@ -56,8 +56,7 @@ std::vector<ColorStop> zone_shade(const std::vector<FigureLimit>& limits, const 
   add_zone(zones, limits, axis, LimitRole::conservative_inner, LimitRole::conservative_outer, palette::conservative);
   std::vector<double> places;
   for (const ZoneRamps& zone : zones)
-    for (const Ramp& ramp : {zone.inner, zone.outer})
-      places.insert(places.end(), {ramp.low, ramp.middle, ramp.high});
+    for (const Ramp& ramp : {zone.inner, zone.outer}) places.insert(places.end(), {ramp.low, ramp.middle, ramp.high});
   std::sort(places.begin(), places.end());
 
   std::vector<ColorStop> shade;
@@ -69,9 +68,7 @@ std::vector<ColorStop> zone_shade(const std::vector<FigureLimit>& limits, const 
   return shade;
 }
 
-bool is_inner(LimitRole role) {
-  return role == LimitRole::optimistic_inner || role == LimitRole::conservative_inner;
-}
+bool is_inner(LimitRole role) { return role == LimitRole::optimistic_inner || role == LimitRole::conservative_inner; }
 
 bool is_conservative(LimitRole role) {
   return role == LimitRole::conservative_inner || role == LimitRole::conservative_outer;

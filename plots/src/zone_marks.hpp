@@ -7,8 +7,8 @@
 
 namespace hz::plots {
 
-/// The colours of the zone along x: white outside, two shades inside, each edge fading over the 68 % width of its limit.
-/// Rises in x, white at both ends; empty when no pair of limits bounds a zone.
+/// The colours of the zone along x: white outside, two shades inside, each edge fading over the 68 % width of its
+/// limit. Rises in x, white at both ends; empty when no pair of limits bounds a zone.
 [[nodiscard]] std::vector<ColorStop> zone_shade(const std::vector<FigureLimit>& limits, const LogScale& axis);
 
 [[nodiscard]] bool is_inner(LimitRole role);

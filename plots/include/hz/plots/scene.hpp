@@ -126,12 +126,14 @@ struct TextMark {
   TextStyle style;
   Point baseline;  // its left end
   Box box;         // of the ink
-  std::optional<Ground> ground = std::nullopt;  // lines behind the words are interrupted, and this shows (white outside)
+  std::optional<Ground> ground =
+      std::nullopt;  // lines behind the words are interrupted, and this shows (white outside)
 };
 
 using Shape = std::variant<LineMark, ArcMark, SectorMark, BarMark, DiscMark, WhiskerMark, TextMark>;
 
-/// What is drawn, and what it stands for: "limit:early Mars", "disc:d", "tick:distance". Later marks cover earlier ones.
+/// What is drawn, and what it stands for: "limit:early Mars", "disc:d", "tick:distance". Later marks cover earlier
+/// ones.
 struct Mark {
   std::string tag;
   Shape shape;

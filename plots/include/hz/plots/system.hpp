@@ -26,9 +26,9 @@ struct OrbitSpan {
 
 /// One planet, placed.
 struct FigurePlanet {
-  std::string name;           // "Lantern 27 d"
-  std::string label;          // "d"; empty: the name is written
-  Measured semi_major_axis;   // au, above 0
+  std::string name;          // "Lantern 27 d"
+  std::string label;         // "d"; empty: the name is written
+  Measured semi_major_axis;  // au, above 0
   std::optional<OrbitSpan> span;
   std::optional<double> radius;  // Earth radii
   bool radius_is_limit = false;  // drawn as an unmeasured radius
@@ -39,8 +39,8 @@ struct FigurePlanet {
 /// One system: a row of lanes, or a whole wedge.
 struct FigureStar {
   std::string name;
-  Measured teff;        // K, above 0
-  Measured luminosity;  // nominal solar, above 0
+  Measured teff;                       // K, above 0
+  Measured luminosity;                 // nominal solar, above 0
   std::optional<double> stellar_mass;  // solar; without it there is no period ruler
   std::vector<FigureLimit> limits;     // any order; roles may be missing
   std::vector<FigurePlanet> planets;   // any order
@@ -51,11 +51,11 @@ enum class FilledZone { conservative, optimistic };
 
 /// What a figure needs beside the systems.
 struct FigureOptions {
-  double width = 0;        // page, pt (hz/plots/length.hpp)
+  double width = 0;  // page, pt (hz/plots/length.hpp)
   FilledZone filled_by = FilledZone::conservative;
-  std::string limit_set;   // "Kopparapu et al. 2014"; named in the key; may be empty
+  std::string limit_set;            // "Kopparapu et al. 2014"; named in the key; may be empty
   std::string runaway_planet_mass;  // "1 M⊕", where a limit depends on it; may be empty
-  std::string order;       // lanes only, above the names: "hottest first"; may be empty
+  std::string order;                // lanes only, above the names: "hottest first"; may be empty
 };
 
 }  // namespace hz::plots
