@@ -109,8 +109,8 @@ void add_value(std::string& text, const char* name, const std::optional<Derived>
 std::string star_line(const ListRow& row, const Answer& answer) {
   std::string values;
   add_value(values, "Teff", answer.star.teff, "K");
-  add_value(values, "L", answer.star.luminosity, "Lsun");
-  add_value(values, "mass", answer.star.stellar_mass, "Msun");
+  add_value(values, "L", answer.star.luminosity, "L\u2609");
+  add_value(values, "mass", answer.star.stellar_mass, "M\u2609");
   add_value(values, "distance", answer.star.distance, "pc");
   const std::string name = row.star.name.empty() ? "Star" : printable(row.star.name);
   return name + ": " + values;

@@ -108,7 +108,7 @@ AlignedTable value_table(const LimitSet& set, const std::string& what, ValueOf v
 
 std::string in_full(const LimitSet& set, const Console& console, std::size_t width) {
   const auto insolation = value_table(set, "insolation (Earth = 1)", [](double s) { return s; });
-  const auto distance = value_table(set, "distance at 1 Lsun (au)", [](double s) { return 1 / std::sqrt(s); });
+  const auto distance = value_table(set, "distance at 1 L\u2609 (au)", [](double s) { return 1 / std::sqrt(s); });
   std::string result = console.styled(set.key, Style::strong) + ": " + set.title + "\n\n" + facts(set, width) + "\n";
   result += insolation.text(console) + "\n" + distance.text(console);
   if (result.find('*') != std::string::npos) result += "\n* held at the end of the fitted range\n";

@@ -52,7 +52,7 @@ std::string short_number(double value) {
 }
 
 std::string measured_text(const Measured& measured, int decimals) {
-  const std::string value = fixed(measured.value, decimals);
+  std::string value = fixed(measured.value, decimals);
   if (measured.limit != LimitMark::none) return (measured.limit == LimitMark::upper ? "< " : "> ") + value;
   const std::optional<double> minus = known(measured.minus), plus = known(measured.plus);
   if (!minus && !plus) return value;
