@@ -103,7 +103,7 @@ std::string planet_line(const CheckReport& report) {
                  fmt::format("equilibrium temperature {:.0f} K for a Bond albedo of {:g}", planet.equilibrium_temperature,
                              report.settings.bond_albedo),
                  planet.zone_position ? fmt::format("zone position {:.2f} (0 inner, 1 outer limit)", *planet.zone_position) : "",
-                 planet.orbit_share ? fmt::format("{:.0f} % of its time between the limits", 100 * *planet.orbit_share) : ""},
+                 planet.orbit_share ? fmt::format("{:.0f} % of its time between the {} limits", 100 * *planet.orbit_share, planet.optimistic ? "optimistic" : "conservative") : ""},
                 ", ") + ".";
 }
 

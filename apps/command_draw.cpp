@@ -6,7 +6,6 @@
 #include "closest.hpp"
 #include "commands.hpp"
 #include "figure_stars.hpp"
-#include "files.hpp"
 #include "hz/error.hpp"
 #include "hz/plots/figure_file.hpp"
 #include "hz/plots/length.hpp"
@@ -110,7 +109,6 @@ int run_draw(const Arguments& arguments, Console& console) {
     throw Error(Fault::usage, fmt::format("which star of {}? Give its name after the list", words[1]));
   }
   if (!typed && kind == Kind::lanes && words.size() > 2) throw Error(Fault::usage, "lanes draws every star of the list; leave the name out");
-  if (!typed) refuse_to_overwrite(words[1], *arguments.value("output"));
 
   const Choices choices = read_choices(arguments);
   std::vector<Candidate> candidates = typed ? typed_candidates(arguments, choices.settings)

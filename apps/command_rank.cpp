@@ -11,6 +11,7 @@
 #include "planet_list.hpp"
 #include "rank_page.hpp"
 #include "settings_options.hpp"
+#include "text_layout.hpp"
 
 namespace hz::app {
 namespace {
@@ -64,9 +65,7 @@ std::vector<RankedRow> output_rows(const std::vector<Candidate>& candidates, con
 }
 
 void write_ranking(const AnsweredList& list, const std::vector<Place>& places, const Settings& settings, const std::string& path) {
-  std::vector<ColumnHead> kept;
-  for (const KeptColumn& column : list.kept) kept.push_back(column.head);
-  const std::vector<OutputColumn> columns = ranked_columns(settings, list.stated, kept);
+  const std::vector<OutputColumn> columns = ranked_columns(settings, list.stated, heads_of(list.kept));
   const std::vector<RankedRow> rows = output_rows(list.candidates, places);
   const std::unique_ptr<TableWriter> writer = create_table(path, head_of(columns));
   constexpr std::size_t rows_at_a_time = 1000;
@@ -108,7 +107,7 @@ int run_rank(const Arguments& arguments, Console& console) {
   if (output) write_ranking(list, places, choices.settings, *output);
   if (output != "-") {
     console.print(ranking_table(list.candidates, places, shown, choices.settings, console));
-    console.print("\n" + basis_sentence(choices.settings) + "\n");
+    console.print("\n" + wrapped(basis_sentence(choices.settings), terminal_width()) + "\n");
   }
   for (const std::string& line : ranking_summary(list.candidates, places, choices.settings)) console.say(line);
   const bool any_set_aside = std::any_of(list.candidates.begin(), list.candidates.end(),

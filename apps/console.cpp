@@ -54,7 +54,9 @@ void Console::print(std::string_view text) {
 }
 
 void Console::say(std::string_view remark) {
-  if (!quiet_) fmt::print(stderr, "{}\n", remark);
+  if (quiet_) return;
+  std::fflush(stdout);  // where both go to one place, they stay in order
+  fmt::print(stderr, "{}\n", remark);
 }
 
 std::string Console::styled(std::string_view text, Style style) const {

@@ -68,7 +68,7 @@ std::span<const Option> reading_options() { return reading_table; }
 std::span<const Option> writing_options() { return writing_table; }
 
 OpenList open_list(const std::string& path, const Arguments& arguments, std::span<const Quantity> needed) {
-  const std::optional<std::string> output = arguments.value("output");
+  const std::optional<std::string> output = arguments.knows("output") ? arguments.value("output") : std::nullopt;
   if (output && *output != "-" && path != "-") refuse_to_overwrite(path, *output);
   OpenList list{column_map(arguments), open_table(path), {}};
   list.understanding = Understanding::of(list.reader->head(), list.map, needed);

@@ -53,9 +53,7 @@ Candidate candidate_of(const Chunk& chunk, std::size_t index, const OpenList& li
                        const std::optional<Preference>& preference, const Settings& settings) {
   Candidate candidate;
   candidate.row = list.understanding.row(chunk, index);
-  for (const KeptColumn& column : kept) {
-    candidate.row.kept.push_back(chunk.row_problems[index] ? "" : chunk.text(column.column, index));
-  }
+  candidate.row.kept = kept_cells(chunk, index, kept);
   candidate.preferred = preference && !chunk.row_problems[index] && chunk.text(preference->column, index) == preference->value;
   candidate.answer = answer(candidate.row, settings);
   return candidate;
