@@ -110,7 +110,7 @@ private:
     const double half = 0.55 * canvas_.size();
     std::vector<Shape> shapes{LineMark{{{0, -half}, {0, half}}, limit_stroke(LimitRole::conservative_inner)}};
     for (const double y : {-0.8 * half, 0.0, 0.8 * half})
-      shapes.push_back(LineMark{{{0, y}, {tooth_length, y}}, tooth_stroke()});
+      shapes.emplace_back(LineMark{{{0, y}, {tooth_length, y}}, tooth_stroke()});
     key_.start_group();
     key_.add_sample(shapes, {{"limit held at the end of its fitted range"}});
   }

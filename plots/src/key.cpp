@@ -29,17 +29,17 @@ void Key::append(Piece piece) {
   group.push_back(std::move(piece));
 }
 
-Key::Piece Key::piece(std::vector<Shape> shapes, const Text& words) const {
+Key::Piece Key::piece(const std::vector<Shape>& shapes, const Text& words) const {
   Piece piece;
   if (!shapes.empty()) {
     const Box box = common_extent(shapes);
-    for (Shape& shape : shapes) piece.shapes.push_back(shifted(shape, -box.x, 0));
+    for (const Shape& shape : shapes) piece.shapes.push_back(shifted(shape, -box.x, 0));
     piece.width = box.width + before_words;
     piece.half_height = std::max(-box.y, box.bottom());
   }
   const TextStyle style = canvas_.words();
   const Point baseline{piece.width, cap_height * style.size / 2};
-  piece.shapes.push_back(canvas_.measure().placed(words, style, baseline));
+  piece.shapes.emplace_back(canvas_.measure().placed(words, style, baseline));
   piece.width += canvas_.measure().advance(words, style);
   piece.half_height = std::max(piece.half_height, line_pitch * style.size / 2);
   return piece;
@@ -47,7 +47,7 @@ Key::Piece Key::piece(std::vector<Shape> shapes, const Text& words) const {
 
 void Key::add_words(const Text& words) { append(piece({}, words)); }
 
-void Key::add_sample(std::vector<Shape> shapes, const Text& words) { append(piece(std::move(shapes), words)); }
+void Key::add_sample(const std::vector<Shape>& shapes, const Text& words) { append(piece(shapes, words)); }
 
 void Key::add_note(const std::string& note) {
   start_group();

@@ -16,7 +16,7 @@ public:
   void start_group();
   void add_words(const Text& words);
   /// A sample drawn about the point (0, 0), and what it means.
-  void add_sample(std::vector<Shape> shapes, const Text& words);
+  void add_sample(const std::vector<Shape>& shapes, const Text& words);
   /// A group of its own that may break at any blank.
   void add_note(const std::string& note);
 
@@ -33,7 +33,7 @@ private:
   using Group = std::vector<Piece>;
   using Line = std::vector<Piece>;
 
-  [[nodiscard]] Piece piece(std::vector<Shape> shapes, const Text& words) const;
+  [[nodiscard]] Piece piece(const std::vector<Shape>& shapes, const Text& words) const;
   [[nodiscard]] std::vector<Line> lines() const;
   void append(Piece piece);
 

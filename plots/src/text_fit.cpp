@@ -63,7 +63,7 @@ Text shortened(const TextMeasure& measure, const Text& text, const TextStyle& st
   const std::vector<TextRun> letters = letters_of(text);
   if (letters.size() <= most_letters && measure.advance(text, style) <= width) return text;
   for (std::size_t kept = std::min(letters.size() - 1, most_letters); kept > 0; --kept) {
-    const Text shorter = joined(letters, (kept + 1) / 2, kept / 2);
+    Text shorter = joined(letters, (kept + 1) / 2, kept / 2);
     if (measure.advance(shorter, style) <= width) return shorter;
   }
   return {{"…"}};

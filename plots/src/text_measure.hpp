@@ -6,7 +6,7 @@
 
 #include "hz/plots/scene.hpp"
 
-typedef struct _cairo cairo_t;
+using cairo_t = struct _cairo;  // as cairo.h declares it
 
 namespace hz::plots {
 

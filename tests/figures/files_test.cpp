@@ -46,11 +46,11 @@ protected:
   Scene scene = wedge_scene(compact_in_zone(), options(88));
   fs::path folder = fs::path(::testing::TempDir()) / "hz_figures";
 
-  Files() {
+  void SetUp() override {
     fs::remove_all(folder);
     fs::create_directories(folder);
   }
-  ~Files() override { fs::remove_all(folder); }
+  void TearDown() override { fs::remove_all(folder); }
 
   static std::string bytes(const fs::path& path) {
     std::ifstream file(path, std::ios::binary);

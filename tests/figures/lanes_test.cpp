@@ -8,7 +8,6 @@ namespace hz::plots::testing {
 namespace {
 
 using ::testing::HasSubstr;
-using ::testing::IsEmpty;
 using ::testing::Not;
 using ::testing::SizeIs;
 

@@ -21,9 +21,10 @@ bool crosses(const LineMark& line, const Box& box) {
   for (std::size_t i = 1; i < line.points.size(); ++i) {
     const Point a = line.points[i - 1];
     const Point b = line.points[i];
-    const double steps = std::ceil(10 * std::hypot(b.x - a.x, b.y - a.y)) + 1;
-    for (double k = 0; k <= steps; ++k) {
-      const Point p{a.x + (b.x - a.x) * k / steps, a.y + (b.y - a.y) * k / steps};
+    const int steps = static_cast<int>(10 * std::hypot(b.x - a.x, b.y - a.y)) + 1;
+    for (int k = 0; k <= steps; ++k) {
+      const double share = static_cast<double>(k) / steps;
+      const Point p{a.x + (b.x - a.x) * share, a.y + (b.y - a.y) * share};
       if (box.x < p.x && p.x < box.right() && box.y < p.y && p.y < box.bottom()) return true;
     }
   }

@@ -4,6 +4,7 @@
 #include <cairo.h>
 #include <gmock/gmock.h>
 
+#include <cstddef>
 #include <cstdint>
 #include <memory>
 #include <string>
@@ -25,8 +26,8 @@ public:
   }
 
   [[nodiscard]] std::uint32_t rgb(int x, int y) const {
-    const unsigned char* row =
-        cairo_image_surface_get_data(surface_.get()) + y * cairo_image_surface_get_stride(surface_.get());
+    const std::ptrdiff_t stride = cairo_image_surface_get_stride(surface_.get());
+    const unsigned char* row = cairo_image_surface_get_data(surface_.get()) + y * stride;
     return reinterpret_cast<const std::uint32_t*>(row)[x] & 0xffffffU;
   }
 
