@@ -7,7 +7,7 @@
 
 #include "aligned_table.hpp"
 #include "bounds_page.hpp"
-#include "hz/flags.hpp"
+#include "flag_text.hpp"
 #include "numbers.hpp"
 #include "rank_page.hpp"
 #include "text_layout.hpp"
@@ -137,13 +137,9 @@ std::string exact_line(const CheckReport& report) {
   return exact.empty() ? "" : "Taken as exact, being typed without half-widths: " + exact + ".";
 }
 
-std::string assumed_line(const CheckReport& report) {
-  std::string text;
-  for (const std::string& word : report.answer.flags) text += (text.empty() ? "" : ", ") + word;
+std::string mass_line(const CheckReport& report) {
   const Derived& mass = report.answer.planet->planet_mass;
-  const std::string masses =
-      fmt::format("Planet mass {} M⊕ ({})", measured_text(mass.measured), mass.route);
-  return masses + (text.empty() ? "." : "; flags: " + text + ".");
+  return fmt::format("Planet mass {} M⊕ ({}).", measured_text(mass.measured), mass.route);
 }
 
 std::string source_line(const CheckReport& report) {
@@ -158,7 +154,8 @@ std::string check_page(const CheckReport& report, const Console& console, std::s
   std::string page = console.styled(wrapped(first_sentence(report), width), Style::strong) + "\n";
   page += paragraph(change_line(report)) + "\n" + limits_table(report).text(console) + "\n";
   page += paragraph(planet_line(report)) + paragraph(star_line(report)) + paragraph(decides_line(report));
-  page += paragraph(assumed_line(report)) + paragraph(exact_line(report));
+  page += paragraph(mass_line(report)) + paragraph(exact_line(report));
+  for (const std::string& flag : report.answer.flags) page += paragraph(flag_sentence(flag));
   page += paragraph(report.answer.note.empty() ? "" : "Note: " + report.answer.note + ".");
   page += paragraph(report.settings.limits->warning.empty() ? "" : "Warning: " + report.settings.limits->warning);
   return page + paragraph(source_line(report));

@@ -4,7 +4,6 @@
 
 #include <algorithm>
 
-#include "hz/flags.hpp"
 #include "hz/require.hpp"
 
 namespace hz::app {
@@ -17,6 +16,10 @@ std::string flag_sentence(std::string_view flag) {
   const auto found = std::find_if(infos.begin(), infos.end(), matches);
   HZ_REQUIRE(found != infos.end());
   return fmt::format("{}: {}.", flag, found->meaning);
+}
+
+std::string flag_word(const FlagInfo& flag) {
+  return std::string(flag.word) + (flag.word.ends_with(':') ? "QUANTITY" : "");
 }
 
 }  // namespace hz::app

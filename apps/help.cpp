@@ -4,6 +4,8 @@
 
 #include <algorithm>
 
+#include "flag_text.hpp"
+#include "hz/flags.hpp"
 #include "text_layout.hpp"
 
 namespace hz::app {
@@ -97,6 +99,9 @@ std::string program_help(const Console& console, std::size_t width) {
       "\n" + wrapped("`hzmap COMMAND --help` has its options and two examples; `hzmap --version` the version.", width);
   result += "\n\n" + console.styled("Exit codes", Style::strong) + "\n";
   for (const ExitMeaning& each : exit_meanings()) result += entry(each.code, each.meaning, column, width);
+  result += "\n" + console.styled("Flags, in every answer that needs them", Style::strong) + "\n";
+  constexpr std::size_t flag_column = 22;
+  for (const FlagInfo& each : all_flags()) result += entry(flag_word(each), each.meaning, flag_column, width);
   return result + "\n" + wrapped(screening_note, width) + "\n";
 }
 

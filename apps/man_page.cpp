@@ -6,6 +6,7 @@
 #include <array>
 
 #include "commands.hpp"
+#include "flag_text.hpp"
 #include "help.hpp"
 #include "hz/require.hpp"
 #include "text_layout.hpp"
@@ -115,6 +116,12 @@ std::string exit_status() {
   return result + ".El\n";
 }
 
+std::string flag_list() {
+  std::string result = ".Sh FLAGS\n.Bl -tag -width \"planet_mass_assumed\" -compact\n";
+  for (const FlagInfo& each : all_flags()) result += fmt::format(".It {}\n{}", argument(flag_word(each)), sentence(each.meaning));
+  return result + ".El\n";
+}
+
 }  // namespace
 
 std::string man_page(const std::string& version, const std::string& date) {
@@ -129,7 +136,7 @@ std::string man_page(const std::string& version, const std::string& date) {
   for (const Command& command : commands()) result += command_section(command);
   result +=
       ".Sh ENVIRONMENT\n.Bl -tag -width NO_COLOR\n.It Ev NO_COLOR\nIf set and not empty, no colour is used.\n.El\n";
-  return result + exit_status() + examples() +
+  return result + exit_status() + flag_list() + examples() +
          fmt::format(".Sh CAVEATS\n{}.Pp\nThis page describes hzmap {}.\n", sentence(screening_note), version);
 }
 

@@ -10,12 +10,12 @@
 #include <cmath>
 #include <memory>
 
+#include "hz/atomic_file.hpp"
 #include "hz/error.hpp"
 #include "hz/require.hpp"
 #include "painter.hpp"
 #include "png_chunks.hpp"
 #include "svg_finish.hpp"
-#include "write_aside.hpp"
 
 namespace hz::plots {
 namespace {
@@ -109,7 +109,7 @@ std::string render(const Scene& scene, FigureFormat format, const FigureFile& ab
 }
 
 void write_figure(const Scene& scene, const FigureFile& file) {
-  write_aside(file.path, render(scene, figure_format(file.path), file));
+  write_file(file.path.string(), render(scene, figure_format(file.path), file));
 }
 
 }  // namespace hz::plots
