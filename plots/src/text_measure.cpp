@@ -117,6 +117,12 @@ struct TextMeasure::Pango {
     context.reset(pango_font_map_create_context(map.get()));
     make_scalable(context.get());
   }
+  /// pango 1.50 does not let go of a map's configuration when the map ends.
+  ~Pango() { pango_fc_font_map_set_config(PANGO_FC_FONT_MAP(map.get()), nullptr); }
+  Pango(const Pango&) = delete;
+  Pango& operator=(const Pango&) = delete;
+  Pango(Pango&&) = delete;
+  Pango& operator=(Pango&&) = delete;
 
   /// The words laid out for a surface and its scale.
   [[nodiscard]] Owned<PangoLayout> on(cairo_t* cr, const TextMark& mark) const {
