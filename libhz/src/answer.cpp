@@ -386,10 +386,7 @@ Answer answer_star(const ListRow& row, const Settings& settings) {
   Work work(row, settings);
   std::optional<Problem> problem = row.problem;
   if (!problem) problem = answer_light(work, answer);
-  if (!problem && !work.light) {
-    problem = Problem{ProblemCode::missing, "luminosity",
-                      "no luminosity (luminosity, log_luminosity, or stellar_radius with teff)"};
-  }
+  if (!problem && !work.light) problem = no_luminosity(row.star);
   if (problem) {
     set_aside(answer, *problem);
   } else {

@@ -29,4 +29,10 @@ void Flags::raise(std::string_view word) {
 
 void Flags::raise(std::string_view word, Quantity quantity) { raise(std::string(word) + std::string(name(quantity))); }
 
+void Flags::forget_assumptions_since(std::size_t count) {
+  const auto first = words_.begin() + static_cast<std::ptrdiff_t>(count);
+  const auto is_assumption = [](const std::string& word) { return word.starts_with(flag::assumed_error); };
+  words_.erase(std::remove_if(first, words_.end(), is_assumption), words_.end());
+}
+
 }  // namespace hz

@@ -35,7 +35,8 @@ Rule half_points(const Piece& piece, const Smoothness& smoothness, Effort effort
   }
   const std::size_t order = gauss_order(smoothness.ratio, effort);
   if (piece.end > integrated_sigmas) return half_normal_rule(order);
-  visit_half_normal(0, piece.end, order, [&](double z, double weight) { rule.push_back({z, weight}); });
+  // Gauss-Legendre on a cut half misses its mean by 0.04 of a width with two nodes a panel, by 0.0014 with three.
+  visit_half_normal(0, piece.end, std::max<std::size_t>(order, 3), [&](double z, double weight) { rule.push_back({z, weight}); });
   return rule;
 }
 

@@ -69,7 +69,7 @@ PlanetMassRoute one_earth_mass(const RowInputs& row) {
   row.inputs.flags().raise(flag::planet_mass_assumed);
   PlanetMassRoute assumed;
   assumed.derived.measured = {1, 0, 0, LimitMark::none, false};
-  assumed.derived.route = "assumed";
+  assumed.derived.route = assumed_route;
   assumed.limit = limit_of(row.planet);
   return assumed;
 }

@@ -44,14 +44,17 @@ const OutputColumn* column_named(const std::string& name) {
   return found == known_columns().end() ? nullptr : &*found;
 }
 
-CellValue value_of(const std::string& name, const RankedRow& row) {
-  for (const std::string& column : {name + "_used", name}) {
-    const OutputColumn* found = column_named(column);
-    if (found == nullptr) continue;
-    CellValue value = found->value(row);
-    if (!std::holds_alternative<std::monostate>(value)) return value;
-  }
-  return {};
+CellValue cell(const std::string& name, const RankedRow& row) {
+  const OutputColumn* column = column_named(name);
+  return column ? column->value(row) : CellValue();
+}
+
+bool is_known(const CellValue& value) { return !std::holds_alternative<std::monostate>(value); }
+
+/// What was used of a quantity; nothing where that was assumed, for want of knowledge.
+CellValue used_value(const std::string& name, const RankedRow& row) {
+  if (cell(name + "_route", row) == CellValue(std::string(assumed_route))) return {};
+  return cell(name + "_used", row);
 }
 
 bool holds(double x, Comparison comparison, double bound) {
@@ -113,8 +116,10 @@ Requirement parse_requirement(std::string_view text) {
 }
 
 std::string why_not_met(const Requirement& requirement, const Candidate& candidate) {
-  const CellValue value = value_of(requirement.name, {candidate, 0});
-  const Measured* limit = limit_of(requirement, candidate);
+  const RankedRow row{candidate, 0};
+  CellValue value = used_value(requirement.name, row);
+  const Measured* limit = is_known(value) ? nullptr : limit_of(requirement, candidate);
+  if (!is_known(value)) value = cell(requirement.name, row);
   if (limit && requirement.number) {
     if (limit_settles_it(*limit, requirement)) return "";
     return fmt::format("{} is not known to be met: only a limit, {} {:.6g}", requirement.text,
@@ -125,6 +130,8 @@ std::string why_not_met(const Requirement& requirement, const Candidate& candida
     return why_number_fails(requirement, *x);
   }
   if (const std::string* words = std::get_if<std::string>(&value)) {
+    const std::optional<double> count = requirement.number ? parse_number(*words) : std::nullopt;  // number_of_stars
+    if (count) return why_number_fails(requirement, *count);
     return *words == requirement.value ? "" : fmt::format("{} is not met: {}", requirement.text, *words);
   }
   return fmt::format("{} is not known to be met: no {}", requirement.text, requirement.name);

@@ -128,7 +128,51 @@ Result<std::optional<InsolationRoute>> stated_insolation(const RowInputs& row) {
   return std::optional(found);
 }
 
+using NamedFields = std::vector<std::pair<Quantity, const Field*>>;
+
+/// The first of these fields that is only a limit, as the reason why a row has no answer.
+std::optional<Problem> only_a_limit(const NamedFields& fields) {
+  for (const auto& [quantity, field] : fields) {
+    if (!field->stated || field->stated->limit == LimitMark::none) continue;
+    const std::string column(name(quantity));
+    return Problem{ProblemCode::only_a_limit, column, column + " is only a limit, and nothing else stands in for it"};
+  }
+  return std::nullopt;
+}
+
+NamedFields light_fields(const StarRecord& star) {
+  return {{Quantity::luminosity, &star.luminosity},
+          {Quantity::log_luminosity, &star.log_luminosity},
+          {Quantity::stellar_radius, &star.stellar_radius}};
+}
+
+NamedFields orbit_fields(const RowInputs& row) {
+  return {{Quantity::semi_major_axis, &row.planet.semi_major_axis},
+          {Quantity::orbital_period, &row.planet.orbital_period},
+          {Quantity::stellar_mass, &row.star.stellar_mass}};
+}
+
+Problem no_insolation(const RowInputs& row) {
+  const MaybeRoute light = luminosity_route(row);
+  const bool dark = light && !*light;
+  NamedFields fields = dark ? light_fields(row.star) : orbit_fields(row);
+  fields.emplace_back(Quantity::scaled_semi_major_axis, &row.planet.scaled_semi_major_axis);
+  fields.emplace_back(Quantity::insolation, &row.planet.insolation);
+  if (auto limit = only_a_limit(fields)) return *limit;
+  return {ProblemCode::missing, dark ? "luminosity" : "semi_major_axis",
+          dark ? "no luminosity (luminosity, log_luminosity, or stellar_radius with teff), and neither "
+                 "scaled_semi_major_axis nor insolation"
+               : "no orbit (semi_major_axis, orbital_period with stellar_mass, or scaled_semi_major_axis), and no "
+                 "insolation"};
+}
+
 }  // namespace
+
+Problem no_luminosity(const StarRecord& star) {
+  return only_a_limit(light_fields(star))
+      .value_or(Problem{ProblemCode::missing, "luminosity",
+                        "no luminosity (luminosity, log_luminosity, or stellar_radius with teff)"});
+}
 
 Measured product(double constant, const std::vector<Factor>& factors) {
   double log_value = std::log(constant);
@@ -171,15 +215,9 @@ Result<InsolationRoute> insolation_route(const RowInputs& row) {
     const Result<std::optional<InsolationRoute>> found = way(row);
     if (!found) return found.error();
     if (*found) return **found;
-    row.inputs.flags().forget_since(raised);
+    row.inputs.flags().forget_assumptions_since(raised);
   }
-  const MaybeRoute light = luminosity_route(row);
-  const bool dark = light && !*light;
-  return Problem{ProblemCode::missing, dark ? "luminosity" : "semi_major_axis",
-                 dark ? "no luminosity (luminosity, log_luminosity, or stellar_radius with teff), and neither "
-                        "scaled_semi_major_axis nor insolation"
-                      : "no orbit (semi_major_axis, orbital_period with stellar_mass, or scaled_semi_major_axis), and no "
-                        "insolation"};
+  return no_insolation(row);
 }
 
 }  // namespace hz

@@ -30,6 +30,9 @@ struct RowInputs {
 /// ln L: as stated, else from radius and Teff (settings turn the order round). Empty when neither can be had.
 [[nodiscard]] Result<std::optional<Route>> luminosity_route(const RowInputs& row);
 
+/// Why a star has none: it is only a limit, or nothing gives it.
+[[nodiscard]] Problem no_luminosity(const StarRecord& star);
+
 /// -2 ln a: from period and stellar mass, else as stated, else a/R with R (settings turn the first two round).
 [[nodiscard]] Result<std::optional<Route>> orbit_route(const RowInputs& row);
 

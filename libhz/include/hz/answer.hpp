@@ -17,6 +17,9 @@ struct Derived {
   std::string route;
 };
 
+/// The route of a value that nothing in the row gives: 1 Earth mass.
+inline constexpr std::string_view assumed_route = "assumed";
+
 /// What a row's star comes to.
 struct StarAnswer {
   std::optional<Derived> teff;

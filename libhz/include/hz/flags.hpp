@@ -35,8 +35,10 @@ class Flags {
 public:
   void raise(std::string_view word);
   void raise(std::string_view word, Quantity quantity);
-  /// Forgets what was raised since there were `count` words: a route that led nowhere leaves no flags.
+  /// Forgets what was raised since there were `count` words: a value that was only looked at leaves no flags.
   void forget_since(std::size_t count) { words_.resize(count); }
+  /// Forgets the errors assumed since then: a route that led nowhere used none. The limits that barred it stay flagged.
+  void forget_assumptions_since(std::size_t count);
   [[nodiscard]] const std::vector<std::string>& words() const { return words_; }
 
 private:
