@@ -62,7 +62,11 @@ std::string change_line(const CheckReport& report) {
     if (each.changes_optimistic) zones.push_back(fmt::format("{} (optimistic)", word(*each.optimistic)));
     parts.push_back(fmt::format("{}: {}", each.what, joined(zones, ", ")));
   }
-  if (parts.empty()) return "No other current limit set, asymmetry convention or plausible planet mass changes a verdict.";
+  if (parts.empty()) {
+    std::vector<std::string> tried;
+    for (const Alternative& each : report.alternatives) tried.push_back(each.what);
+    return tried.empty() ? "" : "No verdict changes under " + joined(tried, ", ") + ".";
+  }
   return "Would change: " + joined(parts, "; ") + ".";
 }
 

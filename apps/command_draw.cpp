@@ -19,12 +19,20 @@ enum class Kind { wedge, lanes };
 
 constexpr auto kind_words = std::to_array<OptionWord<Kind>>({{"wedge", Kind::wedge}, {"lanes", Kind::lanes}});
 
+/// "Underwood, Jones & Sleep 2003": a citation as far as its year.
+std::string authors_and_year(const std::string& citation) {
+  for (std::size_t comma = citation.find(','); comma != std::string::npos; comma = citation.find(',', comma + 1)) {
+    if (comma > 0 && citation[comma - 1] >= '0' && citation[comma - 1] <= '9') return citation.substr(0, comma);
+  }
+  return citation;
+}
+
 plots::FigureOptions figure_options(const Arguments& arguments, const Settings& settings) {
   const LimitSet& set = *settings.limits;
   plots::FigureOptions options;
   options.width = plots::parse_length(arguments.value("width").value_or("180mm"));
   options.filled_by = set.conservative ? plots::FilledZone::conservative : plots::FilledZone::optimistic;
-  options.limit_set = set.citation.substr(0, set.citation.find(','));
+  options.limit_set = authors_and_year(set.citation);
   if (set.planet_mass_range()) options.runaway_planet_mass = "1 M⊕";
   options.order = "hottest first";
   return options;
