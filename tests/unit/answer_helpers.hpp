@@ -55,7 +55,8 @@ inline bool has_flag(const Answer& answer, std::string_view word) {
 
 /// A flag that begins so.
 inline bool has_flag_like(const Answer& answer, std::string_view start) {
-  return std::any_of(answer.flags.begin(), answer.flags.end(), [&](const std::string& f) { return f.starts_with(start); });
+  return std::any_of(answer.flags.begin(), answer.flags.end(),
+                     [&](const std::string& f) { return f.starts_with(start); });
 }
 
 }  // namespace hz::testing

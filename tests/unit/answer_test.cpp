@@ -13,13 +13,13 @@ namespace hz {
 namespace {
 
 using testing::earth;
+using ::testing::ElementsAre;
 using testing::exactly;
 using testing::has_flag;
+using ::testing::HasSubstr;
 using testing::set_named;
 using testing::settings_of;
 using testing::value;
-using ::testing::ElementsAre;
-using ::testing::HasSubstr;
 
 Answer at_teff(double teff, const Settings& settings = settings_of()) {
   ListRow row = earth();
@@ -38,7 +38,8 @@ Answer at_axis(const Field& axis, const Settings& settings = settings_of()) {
 // ---- Teff outside the fits ----------------------------------------------------------------------------------------
 
 TEST(BeyondRange, HeldUpTo300KAndSaysSo) {
-  for (const double teff : {2566.0, 2300.0, 7201.0, 7500.0}) {  // 2566 K: TRAPPIST-1 (Agol et al. 2021, PSJ 2, 1; from memory)
+  for (const double teff :
+       {2566.0, 2300.0, 7201.0, 7500.0}) {  // 2566 K: TRAPPIST-1 (Agol et al. 2021, PSJ 2, 1; from memory)
     const Answer held = at_teff(teff);
     EXPECT_EQ(held.status, Status::answered) << held.reason;
     EXPECT_TRUE(has_flag(held, "held")) << teff;
@@ -56,7 +57,8 @@ TEST(BeyondRange, FartherOutIsSetAsideWithAReason) {
     EXPECT_TRUE(refused.limits.empty());
   }
   EXPECT_EQ(at_teff(2299).reason,
-            "teff 2299 K lies 301 K outside the fits of K14 (2600-7200 K), farther than the 300 K over which a limit is held");
+            "teff 2299 K lies 301 K outside the fits of K14 (2600-7200 K), farther than the 300 K over which a limit "
+            "is held");
 }
 
 TEST(BeyondRange, RefuseSetsAsideWhatHoldAnswers) {
@@ -64,7 +66,8 @@ TEST(BeyondRange, RefuseSetsAsideWhatHoldAnswers) {
   settings.beyond = BeyondRange::refuse;
   const Answer refused = at_teff(2566, settings);
   EXPECT_EQ(refused.status, Status::set_aside);
-  EXPECT_THAT(refused.reason, HasSubstr("2566 K lies 34 K outside the fits of K14 (2600-7200 K), and limits beyond them are refused"));
+  EXPECT_THAT(refused.reason,
+              HasSubstr("2566 K lies 34 K outside the fits of K14 (2600-7200 K), and limits beyond them are refused"));
   EXPECT_EQ(at_teff(2600, settings).status, Status::answered);
 }
 
@@ -120,7 +123,8 @@ TEST(Evolved, ByTheRadiusThatFollowsFromTheLuminosity) {
   EXPECT_FALSE(has_flag(answer(row, settings_of()), "evolved"));
 }
 
-// ---- stars without planets, sets of other shapes ---------------------------------------------------------------------
+// ---- stars without planets, sets of other shapes
+// ---------------------------------------------------------------------
 
 TEST(StarWithoutPlanet, IsAnsweredWithItsZone) {
   ListRow row;
@@ -295,7 +299,8 @@ TEST(Verdict, HasFiveWordsAndItsThresholdsIncludeTheirEnds) {
 
 TEST(Verdict, WordsAreThoseOfTheFiles) {
   std::vector<std::string_view> words;
-  for (const Verdict v : {Verdict::inside, Verdict::likely_inside, Verdict::open, Verdict::likely_outside, Verdict::outside}) {
+  for (const Verdict v :
+       {Verdict::inside, Verdict::likely_inside, Verdict::open, Verdict::likely_outside, Verdict::outside}) {
     words.push_back(word(v));
   }
   EXPECT_THAT(words, ElementsAre("inside", "likely inside", "open", "likely outside", "outside"));

@@ -16,7 +16,8 @@ using testing::settings_of;
 using testing::value;
 
 /// An input of a planet about a star like the Sun.
-PlacementInput input_of(const Field& luminosity, const Field& axis, const Field& teff = exactly(5780), const Field& mass = exactly(1)) {
+PlacementInput input_of(const Field& luminosity, const Field& axis, const Field& teff = exactly(5780),
+                        const Field& mass = exactly(1)) {
   ListRow row = earth();
   row.star.teff = teff;
   row.star.luminosity = luminosity;
@@ -57,7 +58,8 @@ TEST(VarianceShares, SumToOneGreatestFirst) {
 
 TEST(VarianceShares, OfAProductGoAsTheSquaresOfItsWidths) {
   // ln S = ln L - 2 ln a: 0.04 against 2 * 0.03.
-  const std::vector<VarianceShare> shares = variance_shares(input_of(value(1, 0.04, 0.04), value(1, 0.03, 0.03)), settings_of());
+  const std::vector<VarianceShare> shares =
+      variance_shares(input_of(value(1, 0.04, 0.04), value(1, 0.03, 0.03)), settings_of());
   EXPECT_NEAR(share_of(shares, Quantity::luminosity), 0.0016 / (0.0016 + 0.0036), 0.005);
   EXPECT_EQ(shares.front().quantity, Quantity::semi_major_axis);
 }
@@ -65,7 +67,9 @@ TEST(VarianceShares, OfAProductGoAsTheSquaresOfItsWidths) {
 /// Zone position straight from its definition, with the formula of the limits left to FluxLimit.
 double position(double luminosity, double axis, double teff, double mass) {
   const LimitSet& set = testing::set_named("K14");
-  const auto ln_limit = [&](std::size_t i) { return std::log(set.limits[i].insolation(teff, mass, BeyondRange::hold)->value); };
+  const auto ln_limit = [&](std::size_t i) {
+    return std::log(set.limits[i].insolation(teff, mass, BeyondRange::hold)->value);
+  };
   const double inner = ln_limit(set.conservative->inner);
   return (inner - std::log(luminosity / (axis * axis))) / (inner - ln_limit(set.conservative->outer));
 }
@@ -92,8 +96,8 @@ double variance(const Varied& varied) {
 }
 
 TEST(VarianceShares, AgreeWithFixingOneInputAtATime) {
-  const std::vector<VarianceShare> shares =
-      variance_shares(input_of(value(1, 0.05, 0.05), value(1.1, 0.02, 0.02), value(5200, 400, 400), value(2, 0.3, 0.3)), settings_of());
+  const std::vector<VarianceShare> shares = variance_shares(
+      input_of(value(1, 0.05, 0.05), value(1.1, 0.02, 0.02), value(5200, 400, 400), value(2, 0.3, 0.3)), settings_of());
   const double all = variance({});
   EXPECT_NEAR(share_of(shares, Quantity::luminosity), 1 - variance({.luminosity = false}) / all, 0.05);
   EXPECT_NEAR(share_of(shares, Quantity::semi_major_axis), 1 - variance({.axis = false}) / all, 0.05);
@@ -106,7 +110,9 @@ TEST(VarianceShares, AreNoneWhenAllIsKnown) {
   EXPECT_TRUE(variance_shares(input_of(exactly(1), exactly(1)), settings_of()).empty());
 }
 
-double p_conservative(const PlacementInput& input) { return *place(input, testing::set_named("K14"), BeyondRange::hold).conservative; }
+double p_conservative(const PlacementInput& input) {
+  return *place(input, testing::set_named("K14"), BeyondRange::hold).conservative;
+}
 
 bool is_firm(const PlacementInput& input) { return p_conservative(input) >= 0.95 || p_conservative(input) <= 0.05; }
 
@@ -133,14 +139,17 @@ TEST(SettlingFactor, MakesTheVerdictFirmAndNoMoreThanThat) {
 TEST(SettlingFactor, FollowsTheErrorFunctionOfASingleInput) {
   // The limit lies 0.05 au from the planet: 95 per cent inside is 1.645 half-widths.
   const double limit = 1 / std::sqrt(1.107);
-  const std::optional<double> factor = settling_factor(input_of(exactly(1), value(limit + 0.05, 0.06, 0.06)), Quantity::semi_major_axis, settings_of());
+  const std::optional<double> factor =
+      settling_factor(input_of(exactly(1), value(limit + 0.05, 0.06, 0.06)), Quantity::semi_major_axis, settings_of());
   ASSERT_TRUE(factor);
   EXPECT_NEAR(*factor, 0.05 / 1.6449 / 0.06, 0.011);  // found to 0.01
 }
 
 TEST(SettlingFactor, IsEmptyWhenTheVerdictIsFirmAlready) {
-  EXPECT_FALSE(settling_factor(input_of(value(1, 0.01, 0.01), value(1.2, 0.01, 0.01)), Quantity::luminosity, settings_of()));
-  EXPECT_FALSE(settling_factor(input_of(value(1, 0.01, 0.01), value(0.3, 0.01, 0.01)), Quantity::luminosity, settings_of()));
+  EXPECT_FALSE(
+      settling_factor(input_of(value(1, 0.01, 0.01), value(1.2, 0.01, 0.01)), Quantity::luminosity, settings_of()));
+  EXPECT_FALSE(
+      settling_factor(input_of(value(1, 0.01, 0.01), value(0.3, 0.01, 0.01)), Quantity::luminosity, settings_of()));
 }
 
 TEST(SettlingFactor, IsEmptyWhenThisInputAloneCannotSettleIt) {

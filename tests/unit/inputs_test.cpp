@@ -10,16 +10,16 @@ namespace hz {
 namespace {
 
 using testing::above;
-using testing::below;
 using testing::bare_earth;
+using testing::below;
 using testing::earth;
 using testing::exactly;
 using testing::has_flag;
 using testing::has_flag_like;
+using ::testing::HasSubstr;
 using testing::settings_of;
 using testing::unreadable;
 using testing::value;
-using ::testing::HasSubstr;
 
 using FieldOf = Field& (*)(ListRow&);
 
@@ -302,11 +302,11 @@ TEST(NotConsulted, UnreadableCellsDoNoHarm) {
   ListRow row = earth();
   row.star.stellar_mass = exactly(1);
   row.planet.orbital_period = exactly(365.25);
-  row.star.stellar_radius = unreadable("stellar_radius");       // L is stated
-  row.planet.semi_major_axis = unreadable("semi_major_axis");   // a follows from the period
+  row.star.stellar_radius = unreadable("stellar_radius");      // L is stated
+  row.planet.semi_major_axis = unreadable("semi_major_axis");  // a follows from the period
   row.planet.scaled_semi_major_axis = unreadable("scaled_semi_major_axis");
   row.planet.insolation = unreadable("insolation");
-  row.planet.planet_radius = unreadable("planet_radius");       // the mass is stated
+  row.planet.planet_radius = unreadable("planet_radius");  // the mass is stated
   row.planet.min_mass = unreadable("min_mass");
   row.star.log_g = unreadable("log_g");
   row.star.distance = unreadable("distance");

@@ -76,7 +76,8 @@ TEST(PlanetMassRoute, KindOfMassIsHonoured) {
 }
 
 TEST(PlanetMassRoute, AListsOwnMassFromTheRadiusYieldsToOurs) {
-  const Answer ours = with({.planet_radius = exactly(1.008), .planet_mass = exactly(3), .planet_mass_kind = PlanetMassKind::from_radius});
+  const Answer ours = with(
+      {.planet_radius = exactly(1.008), .planet_mass = exactly(3), .planet_mass_kind = PlanetMassKind::from_radius});
   EXPECT_NEAR(mass(ours), 1, 1e-9);
   EXPECT_TRUE(has_flag(ours, "mass_from_radius"));
   const Answer theirs = with({.planet_mass = exactly(3), .planet_mass_kind = PlanetMassKind::from_radius});
@@ -90,7 +91,8 @@ TEST(PlanetMassRoute, ALimitNeverMovesTheInnerEdge) {
     const Answer a = with({.planet_mass = limit});
     EXPECT_EQ(mass(a), 1);
     EXPECT_TRUE(has_flag(a, "planet_mass_assumed"));
-    EXPECT_EQ(find_edge(a, ZoneEdge::conservative_inner)->insolation, find_edge(with({}), ZoneEdge::conservative_inner)->insolation);
+    EXPECT_EQ(find_edge(a, ZoneEdge::conservative_inner)->insolation,
+              find_edge(with({}), ZoneEdge::conservative_inner)->insolation);
   }
 }
 
@@ -136,7 +138,7 @@ TEST(PlanetMassRoute, MovesTheInnerEdgeAlone) {
   EXPECT_DOUBLE_EQ(inner(0.1), 0.99);
   EXPECT_DOUBLE_EQ(inner(1), 1.107);
   EXPECT_DOUBLE_EQ(inner(5), 1.188);
-  EXPECT_DOUBLE_EQ(inner(300), 1.188);                                   // held
+  EXPECT_DOUBLE_EQ(inner(300), 1.188);                           // held
   EXPECT_NEAR(inner(std::sqrt(5)), (1.107 + 1.188) / 2, 1e-12);  // linear in S against ln(planet mass)
   const auto outer = [](double m) {
     return find_edge(with({.planet_mass = exactly(m)}), ZoneEdge::conservative_outer)->insolation;

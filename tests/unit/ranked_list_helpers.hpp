@@ -43,8 +43,8 @@ inline std::vector<RankedRow> output_rows(const std::vector<Candidate>& candidat
   return rows;
 }
 
-inline void write_ranked(const std::string& path, const std::vector<Candidate>& candidates, const std::vector<Place>& places,
-                         const Settings& settings) {
+inline void write_ranked(const std::string& path, const std::vector<Candidate>& candidates,
+                         const std::vector<Place>& places, const Settings& settings) {
   const std::vector<OutputColumn> columns = ranked_columns(settings, every_quantity(), {});
   const auto writer = create_table(path, head_of(columns));
   writer->write(chunk_of(columns, output_rows(candidates, places)));

@@ -128,7 +128,8 @@ TEST(RankedTable, ReadBackItGivesTheSameAnswers) {
 std::map<std::string, CellValue> cells(const Candidate& candidate, const Settings& settings, std::size_t rank = 0) {
   std::map<std::string, CellValue> found;
   for (const OutputColumn& column : ranked_columns(settings, testing::every_quantity(), {})) {
-    EXPECT_TRUE(found.emplace(column.head.name, column.value({candidate, rank})).second) << "twice: " << column.head.name;
+    EXPECT_TRUE(found.emplace(column.head.name, column.value({candidate, rank})).second)
+        << "twice: " << column.head.name;
   }
   return found;
 }
@@ -166,7 +167,8 @@ TEST(RankedTable, MissingIsMissing) {
   EXPECT_EQ(std::get<std::string>(found.at("status")), "set aside");
   EXPECT_EQ(std::get<std::string>(found.at("reason")), "no effective temperature (teff)");
   for (const auto& [name, value] : found) {
-    const bool said = name == "planet" || name == "status" || name == "reason" || name == "limit_set" || name == "asymmetry";
+    const bool said =
+        name == "planet" || name == "status" || name == "reason" || name == "limit_set" || name == "asymmetry";
     EXPECT_EQ(std::holds_alternative<std::monostate>(value), !said) << name;
   }
 }

@@ -10,11 +10,11 @@
 namespace hz {
 namespace {
 
+using ::testing::ElementsAre;
 using testing::exactly;
+using ::testing::HasSubstr;
 using testing::settings_of;
 using testing::value;
-using ::testing::ElementsAre;
-using ::testing::HasSubstr;
 
 /// A planet of a star like the Sun with this insolation.
 Candidate candidate(const std::string& name, const Field& insolation, const Field& teff = value(5780, 60, 60)) {
@@ -42,7 +42,8 @@ Candidate of_merit(const std::string& name, double merit, double insolation = 0.
 std::vector<std::string> lines(const std::vector<Candidate>& candidates) {
   std::vector<std::string> shown;
   for (const Place& place : places_of(candidates)) {
-    shown.push_back(std::to_string(place.rank) + (place.shared ? "= " : " ") + candidates[place.candidate].row.planet.name);
+    shown.push_back(std::to_string(place.rank) + (place.shared ? "= " : " ") +
+                    candidates[place.candidate].row.planet.name);
   }
   return shown;
 }
@@ -62,14 +63,16 @@ TEST(Places, GoByMerit) {
 }
 
 TEST(Places, EqualMeritToTwoDecimalsSharesAPlace) {
-  EXPECT_THAT(lines({of_merit("a", 0.9), of_merit("b", 0.7), of_merit("c", 0.501), of_merit("d", 0.504), of_merit("e", 0.1)}),
-              ElementsAre("1 a", "2 b", "3= c", "3= d", "5 e"));
+  EXPECT_THAT(
+      lines({of_merit("a", 0.9), of_merit("b", 0.7), of_merit("c", 0.501), of_merit("d", 0.504), of_merit("e", 0.1)}),
+      ElementsAre("1 a", "2 b", "3= c", "3= d", "5 e"));
 }
 
 TEST(Places, WithinAPlaceTheMiddleOfTheZoneComesFirstAndThenTheName) {
   const double middle = std::sqrt(1.107 * 0.356);
-  EXPECT_THAT(lines({of_merit("z", 1, 0.9), of_merit("y", 0.999, middle), of_merit("b", 1, 0.8), of_merit("a", 1, 0.8)}),
-              ElementsAre("1= y", "1= a", "1= b", "1= z"));
+  EXPECT_THAT(
+      lines({of_merit("z", 1, 0.9), of_merit("y", 0.999, middle), of_merit("b", 1, 0.8), of_merit("a", 1, 0.8)}),
+      ElementsAre("1= y", "1= a", "1= b", "1= z"));
 }
 
 TEST(Places, BeyondTheFitsPlanetMassesIsASectionOfItsOwn) {
@@ -104,7 +107,8 @@ TEST(FoldedName, IgnoresBlanksAndCase) {
 }
 
 TEST(OneRowAPlanet, TheAdoptedOneWins) {
-  std::vector<Candidate> rows = {candidate("Lantern 4 b", value(0.6, 0.01, 0.01)), candidate("lantern 4B", exactly(0.9)),
+  std::vector<Candidate> rows = {candidate("Lantern 4 b", value(0.6, 0.01, 0.01)),
+                                 candidate("lantern 4B", exactly(0.9)),
                                  candidate("Lantern 4 c", value(0.6, 0.01, 0.01))};
   rows[0].preferred = true;
   rows[1].row.planet.adopted = true;
@@ -140,8 +144,9 @@ TEST(OneRowAPlanet, ThenTheSmallestRelativeUncertainty) {
 }
 
 TEST(OneRowAPlanet, AnAssumedErrorCountsAsInfinite) {
-  std::vector<Candidate> rows = {candidate("b2 b", value(0.6)), candidate("b2 b", value(0.6, 0.5, 0.5))};  // 6 per cent assumed
-  rows[0].row.star.stellar_radius = value(1, 0.1, 0.1);  // as many measured inputs
+  std::vector<Candidate> rows = {candidate("b2 b", value(0.6)),
+                                 candidate("b2 b", value(0.6, 0.5, 0.5))};  // 6 per cent assumed
+  rows[0].row.star.stellar_radius = value(1, 0.1, 0.1);                     // as many measured inputs
   keep_one_row_a_planet(rows);
   EXPECT_EQ(rows[0].answer.status, Status::set_aside);
   EXPECT_THAT(rows[0].answer.reason, HasSubstr("(smaller error of insolation)"));
@@ -199,8 +204,9 @@ TEST_P(RowsWithoutErrors, NeverStandAboveAnEqualRowThatHasThem) {
     for (const bool printed_zero : {false, true}) {
       const double s = GetParam();
       // "a" would come first by its name and by its place in the file.
-      std::vector<Candidate> rows = {candidate("a", printed_zero ? value(s, 0, 0) : value(s), teff_without(printed_zero)),
-                                     candidate("b", value(s, relative * s, relative * s))};
+      std::vector<Candidate> rows = {
+          candidate("a", printed_zero ? value(s, 0, 0) : value(s), teff_without(printed_zero)),
+          candidate("b", value(s, relative * s, relative * s))};
       rows[0].row.planet.planet_mass = value(1);
       rows[0].answer = answer(rows[0].row, settings_of());
       humble_rows_without_errors(rows);
@@ -213,7 +219,8 @@ TEST_P(RowsWithoutErrors, NeverStandAboveAnEqualRowThatHasThem) {
 }
 
 // In the middle, near both edges of the conservative zone on either side, and near those of the optimistic one.
-INSTANTIATE_TEST_SUITE_P(Insolations, RowsWithoutErrors, ::testing::Values(0.6, 1.05, 1.15, 1.7, 1.9, 0.37, 0.34, 0.31));
+INSTANTIATE_TEST_SUITE_P(Insolations, RowsWithoutErrors,
+                         ::testing::Values(0.6, 1.05, 1.15, 1.7, 1.9, 0.37, 0.34, 0.31));
 
 TEST(RowsWithoutErrors, NoteWhyTheirMeritWasCut) {
   std::vector<Candidate> rows = {candidate("a", value(1.0), value(5780)), candidate("b", value(1.0, 0.4, 0.4))};

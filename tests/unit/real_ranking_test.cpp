@@ -27,7 +27,8 @@ protected:
     const std::string path = list_path(list.name);
     if (!std::filesystem::exists(path)) GTEST_SKIP() << "the list " << list.name << " is not here";
     ColumnMap map;
-    if (list.needs_map) map = ColumnMap::parse(testing::bytes_of(HZ_TEST_DIR "/cli/worksheet_map.toml"), "worksheet_map.toml");
+    if (list.needs_map)
+      map = ColumnMap::parse(testing::bytes_of(HZ_TEST_DIR "/cli/worksheet_map.toml"), "worksheet_map.toml");
     candidates_ = testing::answered(testing::read_list(path, map), settings_);
   }
 
@@ -59,7 +60,8 @@ TEST_P(RealRanking, EveryRowIsAnsweredOrSetAsideWithAReason) {
     EXPECT_LE(*planet.probabilities.conservative, *planet.probabilities.optimistic) << name;
     EXPECT_TRUE(is_finite(planet.insolation.measured)) << name;
     EXPECT_TRUE(is_finite(planet.planet_mass.measured)) << name;
-    EXPECT_TRUE(std::isfinite(planet.zone_position.value_or(0)) && std::isfinite(planet.equilibrium_temperature)) << name;
+    EXPECT_TRUE(std::isfinite(planet.zone_position.value_or(0)) && std::isfinite(planet.equilibrium_temperature))
+        << name;
     ASSERT_TRUE(planet.margin) << name;
     EXPECT_TRUE(std::isfinite(planet.margin->widths)) << name;
     EXPECT_TRUE(c.answer.limits.size() == 4) << name;
@@ -108,7 +110,8 @@ INSTANTIATE_TEST_SUITE_P(Lists, RealRanking,
                                            RealList{"worksheet_mixed.csv", 78, true}),
                          [](const auto& instance) { return std::string(instance.param.name, 9); });
 
-// Source: the composite list's own row of TRAPPIST-1 e, Teff 2566 K (Agol et al. 2021, PSJ 2, 1): below the fits' 2600 K.
+// Source: the composite list's own row of TRAPPIST-1 e, Teff 2566 K (Agol et al. 2021, PSJ 2, 1): below the fits' 2600
+// K.
 TEST(RealLists, Trappist1eIsHeldOrRefused) {
   const std::string path = list_path("planets_composite_2023.csv");
   if (!std::filesystem::exists(path)) GTEST_SKIP() << "the list planets_composite_2023.csv is not here";

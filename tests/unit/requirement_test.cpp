@@ -13,10 +13,10 @@ namespace {
 using testing::above;
 using testing::below;
 using testing::exactly;
-using testing::settings_of;
-using testing::value;
 using ::testing::HasSubstr;
 using ::testing::IsEmpty;
+using testing::settings_of;
+using testing::value;
 
 Candidate planet() {
   Candidate made;

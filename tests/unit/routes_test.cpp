@@ -15,9 +15,9 @@ using testing::earth;
 using testing::exactly;
 using testing::has_flag;
 using testing::has_flag_like;
+using ::testing::HasSubstr;
 using testing::settings_of;
 using testing::value;
-using ::testing::HasSubstr;
 
 /// Nominal au over nominal solar radius: 149597870.7 / 695700.
 constexpr double au_in_radii = 215.032156;
@@ -30,8 +30,8 @@ Answer answered(const ListRow& row, const Settings& settings = settings_of()) {
 
 double insolation(const Answer& a) { return a.planet->insolation.measured.value; }
 
-/// A row that says everything, each way another number: L 1, or 4 from the radius; a 1 from the period, 2 stated, 3 from
-/// a/R (with the radius 2); S 7 stated.
+/// A row that says everything, each way another number: L 1, or 4 from the radius; a 1 from the period, 2 stated, 3
+/// from a/R (with the radius 2); S 7 stated.
 ListRow talkative() {
   ListRow row = bare_earth();
   row.star.luminosity = exactly(1);
