@@ -51,7 +51,8 @@ TEST(HalfNormalRule, HasTheMomentsOfAHalfNormal) {
 
 Rule uneven_measure() {
   Rule measure;
-  for (int i = 0; i < 40; ++i) measure.push_back({std::sin(1.7 * i) + 0.05 * i, 0.01 + 0.03 * std::abs(std::cos(2.3 * i))});
+  for (int i = 0; i < 40; ++i)
+    measure.push_back({std::sin(1.7 * i) + 0.05 * i, 0.01 + 0.03 * std::abs(std::cos(2.3 * i))});
   return measure;
 }
 
@@ -84,8 +85,11 @@ TEST(GaussRuleOf, RepeatedNodesAreOneNode) {
 }
 
 TEST(VisitHalfNormal, WeighsAPartByItsOwnMass) {
-  const auto between = [](double low, double high) { return std::erf(high / std::sqrt(2)) - std::erf(low / std::sqrt(2)); };
-  for (const auto& [low, high] : {std::pair(0.0, 5.2), std::pair(0.5, 3.1), std::pair(2.0, 2.001), std::pair(4.0, 9.0)}) {
+  const auto between = [](double low, double high) {
+    return std::erf(high / std::sqrt(2)) - std::erf(low / std::sqrt(2));
+  };
+  for (const auto& [low, high] :
+       {std::pair(0.0, 5.2), std::pair(0.5, 3.1), std::pair(2.0, 2.001), std::pair(4.0, 9.0)}) {
     Rule rule;
     visit_half_normal(low, high, 12, [&](double z, double weight) { rule.push_back({z, weight}); });
     EXPECT_NEAR(moment(rule, 0) / between(low, high), 1, 1e-12) << low;

@@ -55,10 +55,12 @@ TEST(PointsOf, KeepMassAndMean) {
         for (const Effort effort : {Effort::full, Effort::coarse}) {
           const Rule points = points_of(x, itself, {ratio, corners}, effort);
           EXPECT_NEAR(mass(points), 1, 1e-12);
-          // A cut half has panels of Gauss-Legendre nodes: three of them give its mean to 0.0014 of a width, five to 1e-5.
+          // A cut half has panels of Gauss-Legendre nodes: three of them give its mean to 0.0014 of a width, five to
+          // 1e-5.
           const bool rough = effort == Effort::coarse || ratio < 0.12;
           const double width = x.minus() + x.plus();
-          EXPECT_NEAR(mean(points), mean_of(x), (rough ? 0.002 : 1e-4) * width) << x.central() << " " << ratio << " " << corners;
+          EXPECT_NEAR(mean(points), mean_of(x), (rough ? 0.002 : 1e-4) * width)
+              << x.central() << " " << ratio << " " << corners;
         }
       }
     }
@@ -68,13 +70,15 @@ TEST(PointsOf, KeepMassAndMean) {
 TEST(PointsOf, UncutHalvesHaveTheirMeanToRounding) {
   const Distribution x = Distribution::two_piece(10, 0.5, 0.9, Asymmetry::median, positive);
   for (const double ratio : {0.01, 0.1, 0.5, 1.0}) {
-    EXPECT_NEAR(mean(points_of(x, itself, {ratio, false}, Effort::full)), 10 + std::sqrt(2 / constants::pi) * 0.2, 1e-8) << ratio;
+    EXPECT_NEAR(mean(points_of(x, itself, {ratio, false}, Effort::full)), 10 + std::sqrt(2 / constants::pi) * 0.2, 1e-8)
+        << ratio;
   }
 }
 
 TEST(PointsOf, AreTakenThroughTheFunction) {
   const Distribution x = Distribution::two_piece(10, 1, 1, Asymmetry::median, positive);
-  const Rule points = points_of(x, [](double v) { return v * v; }, {1, false}, Effort::full);
+  const Rule points = points_of(
+      x, [](double v) { return v * v; }, {1, false}, Effort::full);
   EXPECT_NEAR(mean(points), 101, 1e-6);  // E x^2 = mean^2 + sigma^2
 }
 

@@ -69,7 +69,8 @@ TEST(TimeShare, AgreesWithSteppingAlongTheOrbit) {
       int within = 0;
       for (int i = 0; i < steps; ++i) within += distance_at(constants::pi * (i + 0.5) / steps, e) < distance ? 1 : 0;
       // Half an orbit by its other half's symmetry; the crossing falls between two steps.
-      EXPECT_NEAR(time_share_within(distance, e), static_cast<double>(within) / steps, 1.0 / steps) << e << " " << distance;
+      EXPECT_NEAR(time_share_within(distance, e), static_cast<double>(within) / steps, 1.0 / steps)
+          << e << " " << distance;
     }
   }
 }

@@ -89,7 +89,7 @@ TEST(MainSequenceRadius, IsTheTablesAtItsRows) {
 }
 
 TEST(MainSequenceRadius, IsLinearBetweenRows) {
-  EXPECT_NEAR(*main_sequence_radius(5895), 1.080, 1e-12);          // half-way between G0V and G1V (5860 K, 1.060)
+  EXPECT_NEAR(*main_sequence_radius(5895), 1.080, 1e-12);           // half-way between G0V and G1V (5860 K, 1.060)
   EXPECT_NEAR(*main_sequence_radius(2300), 0.102 - 0.0005, 1e-12);  // half-way between L0V and M9.5V (2330 K, 0.101)
 }
 

@@ -176,6 +176,12 @@ TEST(RowReading, DerivedValuesOfAnEarlierRunAreLeftOut) {
   EXPECT_TRUE(rows[2].star.luminosity.stated.has_value());
 }
 
+// A ranked list states what its own list stated, whatever route was taken.
+TEST(RowReading, StatedValuesBesideUsedOnesAreKept) {
+  const auto row = row_of("planet,luminosity,luminosity_used,luminosity_route\na,0.2,0.3,stellar_radius and teff\n");
+  EXPECT_EQ(row.star.luminosity.stated, measured(0.2));
+}
+
 TEST(RowReading, KindsOfPlanetMass) {
   const auto kind_of = [](const std::string& text) {
     return row_of("planet,planet_mass,planet_mass_kind\na,3," + text + "\n").planet.planet_mass_kind;

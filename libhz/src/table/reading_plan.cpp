@@ -130,9 +130,14 @@ void ReadingPlan::add(const UnderstoodColumn& column) {
       choice.limit_mark = column.column;
       break;
     case ColumnPart::route:
-      choice.route = column.column;
+      // Beside an X_used the route tells of that, and X is what the list stated.
+      if (!has_header(std::string(name(column.quantity)) + "_used")) choice.route = column.column;
       break;
   }
+}
+
+bool ReadingPlan::has_header(const std::string& name) const {
+  return std::find(headers_.begin(), headers_.end(), name) != headers_.end();
 }
 
 bool ReadingPlan::is_no_value(std::string_view text) const {

@@ -49,6 +49,7 @@ private:
   [[nodiscard]] Result<std::optional<double>> side(const Chunk& chunk, std::size_t row, const std::optional<Side>& side,
                                                    const Conversion& conversion) const;
   [[nodiscard]] Result<LimitMark> limit(const Chunk& chunk, std::size_t row, std::size_t column) const;
+  [[nodiscard]] bool has_header(const std::string& name) const;
   [[nodiscard]] bool is_no_value(std::string_view text) const;
 
   std::vector<std::string> headers_;
