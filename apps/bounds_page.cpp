@@ -17,14 +17,10 @@ namespace {
 
 std::string_view words(ZoneEdge edge) {
   switch (edge) {
-    case ZoneEdge::optimistic_inner:
-      return "optimistic, inner";
-    case ZoneEdge::conservative_inner:
-      return "conservative, inner";
-    case ZoneEdge::conservative_outer:
-      return "conservative, outer";
-    case ZoneEdge::optimistic_outer:
-      break;
+    case ZoneEdge::optimistic_inner: return "optimistic, inner";
+    case ZoneEdge::conservative_inner: return "conservative, inner";
+    case ZoneEdge::conservative_outer: return "conservative, outer";
+    case ZoneEdge::optimistic_outer: break;
   }
   return "optimistic, outer";
 }
@@ -118,7 +114,8 @@ std::string star_line(const ListRow& row, const Answer& answer) {
 
 std::string source_sentence(const LimitSet& set) {
   const bool by_mass = set.planet_mass_range().has_value();
-  return fmt::format("Limits: {}, {}{}. A zone is a screening aid, not proof of habitability.", set.key, set.citation, by_mass ? ", for a planet of 1 Earth mass" : "");
+  return fmt::format("Limits: {}, {}{}. A zone is a screening aid, not proof of habitability.", set.key, set.citation,
+                     by_mass ? ", for a planet of 1 Earth mass" : "");
 }
 
 }  // namespace

@@ -17,8 +17,8 @@ namespace {
 
 std::string zone_verdict(const std::optional<Verdict>& verdict, const std::optional<double>& p, const char* zone) {
   if (!verdict) return "";
-  return fmt::format("{} {}the {} zone (P {})", word(*verdict),
-                     *verdict == Verdict::open ? "for " : "", zone, probability_text(p));
+  return fmt::format("{} {}the {} zone (P {})", word(*verdict), *verdict == Verdict::open ? "for " : "", zone,
+                     probability_text(p));
 }
 
 std::string joined(const std::vector<std::string>& parts, const char* between) {
@@ -32,13 +32,15 @@ std::string joined(const std::vector<std::string>& parts, const char* between) {
 /// "K13ERR and RK18", for the alternatives that change a zone's verdict.
 std::string change_phrase(const CheckReport& report) {
   const auto changes = [&](bool Alternative::*zone) {
-    return std::any_of(report.alternatives.begin(), report.alternatives.end(), [&](const Alternative& a) { return a.*zone; });
+    return std::any_of(report.alternatives.begin(), report.alternatives.end(),
+                       [&](const Alternative& a) { return a.*zone; });
   };
   const bool conservative = changes(&Alternative::changes_conservative);
   const bool optimistic = changes(&Alternative::changes_optimistic);
   if (!conservative && !optimistic) return "";
-  const char* which = conservative && optimistic ? "both verdicts would" : conservative ? "the conservative verdict would"
-                                                                                         : "the optimistic verdict would";
+  const char* which = conservative && optimistic ? "both verdicts would"
+                      : conservative             ? "the conservative verdict would"
+                                                 : "the optimistic verdict would";
   return fmt::format("; {} change under other plausible choices", which);
 }
 
@@ -46,7 +48,8 @@ std::string first_sentence(const CheckReport& report) {
   const PlanetAnswer& planet = *report.answer.planet;
   const std::string& name = report.row.planet.name;
   std::string verdicts = joined({zone_verdict(planet.conservative, planet.probabilities.conservative, "conservative"),
-                                 zone_verdict(planet.optimistic, planet.probabilities.optimistic, "optimistic")}, ", ");
+                                 zone_verdict(planet.optimistic, planet.probabilities.optimistic, "optimistic")},
+                                ", ");
   if (planet.side && (planet.conservative ? *planet.conservative : *planet.optimistic) != Verdict::inside) {
     verdicts += fmt::format("; what lies outside is on the {} side", word(*planet.side));
   }
@@ -86,7 +89,8 @@ AlignedTable limits_table(const CheckReport& report) {
   }
   const double insolation = report.answer.planet->insolation.measured.value;
   for (const LimitLine& line : report.limits) {
-    table.add({line.limit->title(), fixed(line.insolation, 3), line.limit_distance ? fixed(*line.limit_distance, decimals) : "",
+    table.add({line.limit->title(), fixed(line.insolation, 3),
+               line.limit_distance ? fixed(*line.limit_distance, decimals) : "",
                line.margin_distance ? signed_number(*line.margin_distance, decimals) : "",
                line.margin_widths ? signed_number(*line.margin_widths, 1) : "",
                insolation >= line.insolation ? "hotter" : "colder", line.held ? "held" : ""});
@@ -102,21 +106,29 @@ std::string quantity_text(const char* words, const std::optional<Derived>& deriv
 
 std::string planet_line(const CheckReport& report) {
   const PlanetAnswer& planet = *report.answer.planet;
-  return joined({quantity_text("Insolation", planet.insolation, " S⊕"),
-                 quantity_text("semi-major axis", planet.semi_major_axis, " au"),
-                 fmt::format("equilibrium temperature {:.0f} K for a Bond albedo of {:g}", planet.equilibrium_temperature,
-                             report.settings.bond_albedo),
-                 planet.zone_position ? fmt::format("zone position {:.2f} (0 inner, 1 outer limit)", *planet.zone_position) : "",
-                 planet.orbit_share ? fmt::format("{:.0f} % of its time between the {} limits", 100 * *planet.orbit_share, planet.optimistic ? "optimistic" : "conservative") : ""},
-                ", ") + ".";
+  return joined(
+             {quantity_text("Insolation", planet.insolation, " S⊕"),
+              quantity_text("semi-major axis", planet.semi_major_axis, " au"),
+              fmt::format("equilibrium temperature {:.0f} K for a Bond albedo of {:g}", planet.equilibrium_temperature,
+                          report.settings.bond_albedo),
+              planet.zone_position
+                  ? fmt::format("zone position {} (0 inner, 1 outer limit)", fixed(*planet.zone_position, 2))
+                  : "",
+              planet.orbit_share ? fmt::format("{:.0f} % of its time between the {} limits", 100 * *planet.orbit_share,
+                                               planet.optimistic ? "optimistic" : "conservative")
+                                 : ""},
+             ", ") +
+         ".";
 }
 
 std::string star_line(const CheckReport& report) {
   const StarAnswer& star = report.answer.star;
   const std::string& name = report.row.star.name;
-  return fmt::format("{}: {}.", name.empty() ? "Star" : printable(name),
-                     joined({quantity_text("Teff", star.teff, " K"), quantity_text("L", star.luminosity, " L☉"),
-                             quantity_text("mass", star.stellar_mass, " M☉"), quantity_text("distance", star.distance, " pc")}, ", "));
+  return fmt::format(
+      "{}: {}.", name.empty() ? "Star" : printable(name),
+      joined({quantity_text("Teff", star.teff, " K"), quantity_text("L", star.luminosity, " L☉"),
+              quantity_text("mass", star.stellar_mass, " M☉"), quantity_text("distance", star.distance, " pc")},
+             ", "));
 }
 
 std::string decides_line(const CheckReport& report) {
@@ -127,8 +139,8 @@ std::string decides_line(const CheckReport& report) {
   }
   std::string text = "Decided by (share of the variance of zone position): " + joined(parts, ", ");
   if (report.settling_factor) {
-    text += fmt::format("; an error of {} {:.2g} times as large would make the verdict firm", name(report.shares.front().quantity),
-                        *report.settling_factor);
+    text += fmt::format("; an error of {} {:.2g} times as large would make the verdict firm",
+                        name(report.shares.front().quantity), *report.settling_factor);
   } else if (report.answer.planet->conservative && *report.answer.planet->conservative != Verdict::inside &&
              *report.answer.planet->conservative != Verdict::outside) {
     text += fmt::format("; a better {} alone would not settle it", name(report.shares.front().quantity));

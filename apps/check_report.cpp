@@ -25,7 +25,8 @@ LimitLine line_of(const LimitAtStar& at, const Answer& answer, const Settings& s
   const PlanetAnswer& planet = *answer.planet;
   const double ratio = std::log(planet.insolation.measured.value / at.insolation);
   if (planet.semi_major_axis) line.margin_distance = planet.semi_major_axis->measured.value * std::expm1(ratio / 2);
-  const double width = log_margin_width(*answer.input, *at.limit, settings.beyond, ratio > 0 ? Towards::colder : Towards::hotter);
+  const double width =
+      log_margin_width(*answer.input, *at.limit, settings.beyond, ratio > 0 ? Towards::colder : Towards::hotter);
   if (width > 0) line.margin_widths = ratio / width;
   return line;
 }
@@ -33,11 +34,13 @@ LimitLine line_of(const LimitAtStar& at, const Answer& answer, const Settings& s
 std::vector<LimitLine> limit_lines(const Answer& answer, const Settings& settings) {
   std::vector<LimitLine> lines;
   for (const LimitAtStar& at : answer.limits) lines.push_back(line_of(at, answer, settings));
-  std::stable_sort(lines.begin(), lines.end(), [](const auto& a, const auto& b) { return a.insolation > b.insolation; });
+  std::stable_sort(lines.begin(), lines.end(),
+                   [](const auto& a, const auto& b) { return a.insolation > b.insolation; });
   return lines;
 }
 
-Alternative compared(std::string what, const Probabilities& p, const Answer& main, const VerdictThresholds& thresholds) {
+Alternative compared(std::string what, const Probabilities& p, const Answer& main,
+                     const VerdictThresholds& thresholds) {
   Alternative alternative{std::move(what), std::nullopt, std::nullopt, false, false};
   if (p.conservative) alternative.conservative = verdict_of(*p.conservative, thresholds);
   if (p.optimistic) alternative.optimistic = verdict_of(*p.optimistic, thresholds);
@@ -68,7 +71,8 @@ void try_other_sets(const ListRow& row, const Choices& choices, CheckReport& rep
     other.limits = &set;
     const Answer answered = answer(row, other);
     if (!answered.planet) continue;
-    report.alternatives.push_back(compared("limit set " + set.key, answered.planet->probabilities, report.answer, other.thresholds));
+    report.alternatives.push_back(
+        compared("limit set " + set.key, answered.planet->probabilities, report.answer, other.thresholds));
   }
 }
 
@@ -104,8 +108,8 @@ void try_other_masses(const Choices& choices, CheckReport& report) {
     input.planet_mass = Distribution::exact(mass);
     input.planet_mass_decadic = false;
     report.alternatives.push_back(compared(fmt::format("planet mass {:.2g} Earth masses", mass),
-                                           place(input, *choices.settings.limits, choices.settings.beyond), report.answer,
-                                           choices.settings.thresholds));
+                                           place(input, *choices.settings.limits, choices.settings.beyond),
+                                           report.answer, choices.settings.thresholds));
   }
 }
 
@@ -115,8 +119,9 @@ CheckReport make_report(const ListRow& row, const Choices& choices, Answer answe
   CheckReport report{row, choices.settings, std::move(answered), {}, {}, {}, std::nullopt};
   if (!report.answer.planet) {
     const std::string who = row.planet.name.empty() ? "this planet" : row.planet.name;
-    throw Error(Fault::input, fmt::format("no answer for {}: {}", who,
-                                          report.answer.reason.empty() ? "the row speaks of no planet" : report.answer.reason));
+    throw Error(Fault::input,
+                fmt::format("no answer for {}: {}", who,
+                            report.answer.reason.empty() ? "the row speaks of no planet" : report.answer.reason));
   }
   report.limits = limit_lines(report.answer, choices.settings);
   try_other_sets(row, choices, report);

@@ -34,10 +34,10 @@ struct CheckReport {
   const ListRow& row;
   const Settings& settings;
   Answer answer;
-  std::vector<LimitLine> limits;             // from the hottest to the coldest
-  std::vector<Alternative> alternatives;     // every one that was tried
+  std::vector<LimitLine> limits;          // from the hottest to the coldest
+  std::vector<Alternative> alternatives;  // every one that was tried
   std::vector<VarianceShare> shares;
-  std::optional<double> settling_factor;     // for the leading input
+  std::optional<double> settling_factor;  // for the leading input
 };
 
 /// Throws hz::Error (input) with the reason when the row has no answer.

@@ -25,7 +25,8 @@ bool is_called(const Candidate& candidate, const std::string& folded) {
     planets.push_back(planet);
     if (folded_name(candidate.row.star.name) == folded_name(name)) of_star += (of_star.empty() ? "" : ", ") + planet;
   }
-  if (!of_star.empty()) throw Error(Fault::usage, fmt::format("{} is a star; its planets in {}: {}", name, path, of_star));
+  if (!of_star.empty())
+    throw Error(Fault::usage, fmt::format("{} is a star; its planets in {}: {}", name, path, of_star));
   throw Error(Fault::usage, fmt::format("{} has no planet `{}`{}", path, name, did_you_mean(name, planets)));
 }
 
@@ -56,16 +57,18 @@ int print_report(const CheckReport& report, const Arguments& arguments, Console&
 int run_check(const Arguments& arguments, Console& console) {
   const std::vector<std::string>& words = arguments.words();
   if (has_typed_values(arguments) == !words.empty()) {
-    throw Error(Fault::usage, words.empty() ? "give a list and a planet's name, or type a planet such as --teff 4410+-70 "
-                                              "--luminosity 0.165 --semi-major-axis 0.412"
-                                            : "give a list or type a planet, not both");
+    throw Error(Fault::usage, words.empty()
+                                  ? "give a list and a planet's name, or type a planet such as --teff 4410+-70 "
+                                    "--luminosity 0.165 --semi-major-axis 0.412"
+                                  : "give a list or type a planet, not both");
   }
   const Choices choices = read_choices(arguments);
   if (words.empty()) {
     const ListRow row = typed_row(arguments);
     return print_report(make_report(row, choices, answer(row, choices.settings)), arguments, console);
   }
-  if (words.size() < 2) throw Error(Fault::usage, fmt::format("which planet of {}? Give its name after the list", words[0]));
+  if (words.size() < 2)
+    throw Error(Fault::usage, fmt::format("which planet of {}? Give its name after the list", words[0]));
   const Candidate planet = find_planet(answer_list(words[0], arguments, choices.settings, console), words[1], words[0]);
   return print_report(make_report(planet.row, choices, planet.answer), arguments, console);
 }

@@ -17,7 +17,11 @@ namespace {
 
 enum class Kind { wedge, lanes };
 
-constexpr auto kind_words = std::to_array<OptionWord<Kind>>({{"wedge", Kind::wedge}, {"lanes", Kind::lanes}});
+Kind kind_named(const std::string& word) {
+  if (word == "wedge") return Kind::wedge;
+  if (word == "lanes") return Kind::lanes;
+  throw Error(Fault::usage, fmt::format("draw has the kinds wedge and lanes, not `{}`", word));
+}
 
 /// "Underwood, Jones & Sleep 2003": a citation as far as its year.
 std::string authors_and_year(const std::string& citation) {
@@ -50,7 +54,8 @@ std::vector<Candidate> listed_candidates(const Arguments& arguments, const Setti
   std::vector<Candidate> candidates = answer_list(arguments.words()[1], arguments, settings, console).candidates;
   keep_one_row_a_planet(candidates);
   // A planet's other solutions are not missing from a figure.
-  std::erase_if(candidates, [](const Candidate& c) { return c.answer.reason_kind == "another row of this planet is used"; });
+  std::erase_if(candidates,
+                [](const Candidate& c) { return c.answer.reason_kind == "another row of this planet is used"; });
   return candidates;
 }
 
@@ -61,7 +66,8 @@ std::vector<Candidate> system_of(std::vector<Candidate> candidates, const std::s
   std::vector<std::string> names;
   for (const Candidate& candidate : candidates) {
     names.push_back(candidate.row.star.name);
-    const bool is_it = folded_name(candidate.row.star.name) == wanted || folded_name(candidate.row.planet.name) == wanted;
+    const bool is_it =
+        folded_name(candidate.row.star.name) == wanted || folded_name(candidate.row.planet.name) == wanted;
     if (star.empty() && is_it) star = folded_name(candidate.row.star.name);
   }
   std::erase_if(candidates, [&](const Candidate& c) { return folded_name(c.row.star.name) != star; });
@@ -77,28 +83,32 @@ void say_what_is_left_out(const std::vector<std::string>& left_out, Console& con
   if (left_out.size() > shown) console.say(fmt::format("not drawn: {} more", left_out.size() - shown));
 }
 
-plots::FigureFile figure_file(const Arguments& arguments, Kind kind, const FigureStars& stars, const Settings& settings) {
+plots::FigureFile figure_file(const Arguments& arguments, Kind kind, const FigureStars& stars,
+                              const Settings& settings) {
   plots::FigureFile file;
   file.path = *arguments.value("output");
   if (const auto dpi = arguments.value("dpi")) file.dpi = option_number("dpi", *dpi);
   const std::string& name = stars.stars.front().name;
-  const std::string of = kind == Kind::wedge ? (name.empty() ? "a star" : name) : fmt::format("{} stars", stars.stars.size());
+  const std::string of =
+      kind == Kind::wedge ? (name.empty() ? "a star" : name) : fmt::format("{} stars", stars.stars.size());
   file.title = fmt::format("Liquid-water zone of {}", of);
   std::size_t planets = 0;
   for (const plots::FigureStar& star : stars.stars) planets += star.planets.size();
-  file.description = fmt::format("{} with {} planets; limits of {}. A zone is a screening aid, not proof of habitability.",
-                                 of, planets, settings.limits->citation);
+  file.description =
+      fmt::format("{} with {} planets; limits of {}. A zone is a screening aid, not proof of habitability.", of,
+                  planets, settings.limits->citation);
   return file;
 }
 
-int write_drawing(Kind kind, FigureStars stars, const Arguments& arguments, const Settings& settings, Console& console) {
+int write_drawing(Kind kind, FigureStars stars, const plots::FigureOptions& options, const Arguments& arguments,
+                  const Settings& settings, Console& console) {
   say_what_is_left_out(stars.left_out, console);
-  if (stars.stars.empty()) throw Error(Fault::input, "there is nothing to draw: no star has an effective temperature and a luminosity");
+  if (stars.stars.empty())
+    throw Error(Fault::input, "there is nothing to draw: no star has an effective temperature and a luminosity");
   std::stable_sort(stars.stars.begin(), stars.stars.end(),
                    [](const auto& a, const auto& b) { return a.teff.value > b.teff.value; });
-  const plots::FigureOptions options = figure_options(arguments, settings);
-  const plots::Scene scene = kind == Kind::wedge ? plots::wedge_scene(stars.stars.front(), options)
-                                                 : plots::lanes_scene(stars.stars, options);
+  const plots::Scene scene =
+      kind == Kind::wedge ? plots::wedge_scene(stars.stars.front(), options) : plots::lanes_scene(stars.stars, options);
   plots::write_figure(scene, figure_file(arguments, kind, stars, settings));
   return exit_code::done;
 }
@@ -107,22 +117,27 @@ int write_drawing(Kind kind, FigureStars stars, const Arguments& arguments, cons
 
 int run_draw(const Arguments& arguments, Console& console) {
   const std::vector<std::string>& words = arguments.words();
-  const Kind kind = option_word<Kind>("KIND", words[0], kind_words);
+  const Kind kind = kind_named(words[0]);
   const bool typed = has_typed_values(arguments);
-  if (!arguments.has("output")) throw Error(Fault::usage, "where should the figure go? Add -o FILE.svg (or .pdf, .png)");
+  if (!arguments.has("output"))
+    throw Error(Fault::usage, "where should the figure go? Add -o FILE.svg (or .pdf, .png)");
   static_cast<void>(plots::figure_format(*arguments.value("output")));  // before the work
   const bool listed = words.size() > 1;
-  if (typed == listed) throw Error(Fault::usage, typed ? "give a list or type a star, not both" : "give a list, or type a star such as --teff 5780 --luminosity 1");
+  if (typed == listed)
+    throw Error(Fault::usage, typed ? "give a list or type a star, not both"
+                                    : "give a list, or type a star such as --teff 5780 --luminosity 1");
   if (!typed && kind == Kind::wedge && words.size() < 3) {
     throw Error(Fault::usage, fmt::format("which star of {}? Give its name after the list", words[1]));
   }
-  if (!typed && kind == Kind::lanes && words.size() > 2) throw Error(Fault::usage, "lanes draws every star of the list; leave the name out");
+  if (!typed && kind == Kind::lanes && words.size() > 2)
+    throw Error(Fault::usage, "lanes draws every star of the list; leave the name out");
 
   const Choices choices = read_choices(arguments);
-  std::vector<Candidate> candidates = typed ? typed_candidates(arguments, choices.settings)
-                                            : listed_candidates(arguments, choices.settings, console);
+  const plots::FigureOptions options = figure_options(arguments, choices.settings);
+  std::vector<Candidate> candidates =
+      typed ? typed_candidates(arguments, choices.settings) : listed_candidates(arguments, choices.settings, console);
   if (words.size() == 3) candidates = system_of(std::move(candidates), words[2], words[1]);
-  return write_drawing(kind, figure_stars(candidates, choices.settings), arguments, choices.settings, console);
+  return write_drawing(kind, figure_stars(candidates, choices.settings), options, arguments, choices.settings, console);
 }
 
 }  // namespace hz::app

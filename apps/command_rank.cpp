@@ -64,7 +64,8 @@ std::vector<RankedRow> output_rows(const std::vector<Candidate>& candidates, con
   return rows;
 }
 
-void write_ranking(const AnsweredList& list, const std::vector<Place>& places, const Settings& settings, const std::string& path) {
+void write_ranking(const AnsweredList& list, const std::vector<Place>& places, const Settings& settings,
+                   const std::string& path) {
   const std::vector<OutputColumn> columns = ranked_columns(settings, list.stated, heads_of(list.kept));
   const std::vector<RankedRow> rows = output_rows(list.candidates, places);
   const std::unique_ptr<TableWriter> writer = create_table(path, head_of(columns));
@@ -80,8 +81,10 @@ void write_ranking(const AnsweredList& list, const std::vector<Place>& places, c
 }
 
 void refuse_a_list_of_stars(const std::vector<Candidate>& candidates, const std::string& path) {
-  const bool any_planet = std::any_of(candidates.begin(), candidates.end(), [](const Candidate& c) { return is_planet(c.row) || c.row.problem; });
-  if (!any_planet) {
+  const auto any = [&](auto holds) { return std::any_of(candidates.begin(), candidates.end(), holds); };
+  const bool planets = any([](const Candidate& c) { return is_planet(c.row); });
+  const bool stars = any([](const Candidate& c) { return !is_planet(c.row) && !c.row.problem; });
+  if (stars && !planets) {
     throw Error(Fault::input, fmt::format("{} holds stars but no planets; `hzmap bounds {}` answers it", path, path));
   }
 }
@@ -93,7 +96,8 @@ int run_rank(const Arguments& arguments, Console& console) {
   const std::string& path = arguments.words().front();
   const std::optional<std::string> top = arguments.value("top");
   const std::size_t shown = top ? option_count("top", *top, 0) : 20;
-  for (const std::string& text : arguments.values("require")) static_cast<void>(parse_requirement(text));  // before the work
+  for (const std::string& text : arguments.values("require"))
+    static_cast<void>(parse_requirement(text));  // before the work
 
   AnsweredList list = answer_list(path, arguments, choices.settings, console, own_names());
   refuse_a_list_of_stars(list.candidates, path);

@@ -27,14 +27,10 @@ bool color_is_welcome() {
 
 const char* escape_of(Style style) {
   switch (style) {
-    case Style::strong:
-      return "\x1b[1m";
-    case Style::faint:
-      return "\x1b[2m";
-    case Style::water:
-      return "\x1b[34m";
-    case Style::plain:
-      break;
+    case Style::strong: return "\x1b[1m";
+    case Style::faint: return "\x1b[2m";
+    case Style::water: return "\x1b[34m";
+    case Style::plain: break;
   }
   return "";
 }

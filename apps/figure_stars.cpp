@@ -45,7 +45,9 @@ std::optional<Measured> place_of(const PlanetAnswer& planet, const Answer& star)
   if (!star.star.luminosity) return std::nullopt;
   const Measured& insolation = planet.insolation.measured;
   const double distance = std::sqrt(star.star.luminosity->measured.value / insolation.value);
-  const auto half = [&](const std::optional<double>& width) { return distance * width.value_or(0) / insolation.value / 2; };
+  const auto half = [&](const std::optional<double>& width) {
+    return distance * width.value_or(0) / insolation.value / 2;
+  };
   return Measured{distance, half(insolation.plus), half(insolation.minus), LimitMark::none, false};
 }
 
@@ -125,7 +127,8 @@ FigureStars figure_stars(const std::vector<Candidate>& candidates, const Setting
     std::optional<StarOfRows> star = star_of(rows, settings);
     if (!star) {
       const std::string reason = answer_star(rows.front()->row, settings).reason;
-      result.left_out.push_back(fmt::format("{}: {}", name_of(*rows.front()), reason.empty() ? "no effective temperature" : reason));
+      result.left_out.push_back(
+          fmt::format("{}: {}", name_of(*rows.front()), reason.empty() ? "no effective temperature" : reason));
       continue;
     }
     add_planets(rows, *star, result.left_out);

@@ -64,12 +64,9 @@ std::string examples_help(const Command& command, const Console& console, std::s
 
 std::string_view heading(OptionGroup group) {
   switch (group) {
-    case OptionGroup::input:
-      return "What goes in";
-    case OptionGroup::answer:
-      return "How it is answered";
-    case OptionGroup::output:
-      break;
+    case OptionGroup::input: return "What goes in";
+    case OptionGroup::answer: return "How it is answered";
+    case OptionGroup::output: break;
   }
   return "What comes out";
 }

@@ -19,23 +19,12 @@ std::string plain(std::string_view text) {
   std::string result;
   for (const char c : text) {
     switch (c) {
-      case '\\':
-        result += "\\e";
-        break;
-      case '`':
-        result += "\\(ga";
-        break;
-      case '\'':
-        result += "\\(aq";
-        break;
-      case '~':
-        result += "\\(ti";
-        break;
-      case '^':
-        result += "\\(ha";
-        break;
-      default:
-        result += c;
+      case '\\': result += "\\e"; break;
+      case '`': result += "\\(ga"; break;
+      case '\'': result += "\\(aq"; break;
+      case '~': result += "\\(ti"; break;
+      case '^': result += "\\(ha"; break;
+      default: result += c;
     }
   }
   return result;
@@ -118,7 +107,8 @@ std::string exit_status() {
 
 std::string flag_list() {
   std::string result = ".Sh FLAGS\n.Bl -tag -width \"planet_mass_assumed\" -compact\n";
-  for (const FlagInfo& each : all_flags()) result += fmt::format(".It {}\n{}", argument(flag_word(each)), sentence(each.meaning));
+  for (const FlagInfo& each : all_flags())
+    result += fmt::format(".It {}\n{}", argument(flag_word(each)), sentence(each.meaning));
   return result + ".El\n";
 }
 

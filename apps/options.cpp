@@ -54,12 +54,9 @@ std::string syntax_trouble(const po::invalid_command_line_syntax& error) {
   const std::string option = dashed(error.get_option_name());
   switch (error.kind()) {
     case po::invalid_syntax::missing_parameter:
-    case po::invalid_syntax::empty_adjacent_parameter:
-      return fmt::format("{} needs a value", option);
-    case po::invalid_syntax::extra_parameter:
-      return fmt::format("{} takes no value", option);
-    default:
-      return fmt::format("{} is not understood", option);
+    case po::invalid_syntax::empty_adjacent_parameter: return fmt::format("{} needs a value", option);
+    case po::invalid_syntax::extra_parameter: return fmt::format("{} takes no value", option);
+    default: return fmt::format("{} is not understood", option);
   }
 }
 

@@ -29,7 +29,8 @@ std::optional<Preference> read_preference(const Arguments& arguments, const Tabl
   if (!text) return std::nullopt;
   const std::size_t at = text->find('=');
   if (at == std::string::npos) {
-    throw Error(Fault::usage, fmt::format("--prefer '{}' has no =; write it like --prefer reference='Lantern DR1'", *text));
+    throw Error(Fault::usage,
+                fmt::format("--prefer '{}' has no =; write it like --prefer reference='Lantern DR1'", *text));
   }
   const std::string name = text->substr(0, at);
   std::vector<std::string> names;
@@ -37,7 +38,8 @@ std::optional<Preference> read_preference(const Arguments& arguments, const Tabl
     if (head.columns[column].name == name) return Preference{column, text->substr(at + 1)};
     names.push_back(head.columns[column].name);
   }
-  throw Error(Fault::usage, fmt::format("--prefer: {} has no column `{}`{}", head.source, name, did_you_mean(name, names)));
+  throw Error(Fault::usage,
+              fmt::format("--prefer: {} has no column `{}`{}", head.source, name, did_you_mean(name, names)));
 }
 
 std::vector<Quantity> stated_quantities(const Understanding& understanding) {
@@ -54,7 +56,8 @@ Candidate candidate_of(const Chunk& chunk, std::size_t index, const OpenList& li
   Candidate candidate;
   candidate.row = list.understanding.row(chunk, index);
   candidate.row.kept = kept_cells(chunk, index, kept);
-  candidate.preferred = preference && !chunk.row_problems[index] && chunk.text(preference->column, index) == preference->value;
+  candidate.preferred =
+      preference && !chunk.row_problems[index] && chunk.text(preference->column, index) == preference->value;
   candidate.answer = answer(candidate.row, settings);
   return candidate;
 }

@@ -16,8 +16,8 @@ namespace hz::app {
 [[nodiscard]] std::span<const Option> preference_options();
 
 struct AnsweredList {
-  std::vector<Candidate> candidates;   // one a row, in file order
-  std::vector<Quantity> stated;        // what the list speaks of
+  std::vector<Candidate> candidates;  // one a row, in file order
+  std::vector<Quantity> stated;       // what the list speaks of
   std::vector<KeptColumn> kept;
 };
 

@@ -18,13 +18,17 @@ struct ShortFlag {
   std::string_view start;
   std::string_view words;
 };
-constexpr ShortFlag short_words[] = {
-    {flag::evolved, "evolved"},           {flag::held, "held"},
-    {flag::inconsistent, "inconsistent"}, {flag::beyond_planet_mass, "beyond mass"},
-    {flag::min_mass_used, "m sin i"},     {flag::mass_from_radius, "mass from R"},
-    {flag::planet_mass_assumed, "mass 1"}, {flag::eccentricity_limit, "e limit"},
-    {flag::circular_assumed, "circular"}, {flag::limit_ignored, "limit ignored"},
-    {flag::assumed_error, "errors assumed"}};
+constexpr ShortFlag short_words[] = {{flag::evolved, "evolved"},
+                                     {flag::held, "held"},
+                                     {flag::inconsistent, "inconsistent"},
+                                     {flag::beyond_planet_mass, "beyond mass"},
+                                     {flag::min_mass_used, "m sin i"},
+                                     {flag::mass_from_radius, "mass from R"},
+                                     {flag::planet_mass_assumed, "mass 1"},
+                                     {flag::eccentricity_limit, "e limit"},
+                                     {flag::circular_assumed, "circular"},
+                                     {flag::limit_ignored, "limit ignored"},
+                                     {flag::assumed_error, "errors assumed"}};
 
 std::string size_text(const Candidate& candidate) {
   const PlanetRecord& planet = candidate.row.planet;
@@ -79,7 +83,8 @@ AlignedTable empty_table() {
                        {"flags"}});
 }
 
-std::string verdict_counts(const std::vector<Candidate>& candidates, const std::vector<Place>& places, bool conservative) {
+std::string verdict_counts(const std::vector<Candidate>& candidates, const std::vector<Place>& places,
+                           bool conservative) {
   std::map<Verdict, std::size_t> counts;
   for (const Place& place : places) {
     const PlanetAnswer& planet = *candidates[place.candidate].answer.planet;
@@ -116,7 +121,8 @@ std::string ranking_table(const std::vector<Candidate>& candidates, const std::v
   for (std::size_t i = 0; i < std::min(top, places.size()); ++i) {
     const Candidate& candidate = candidates[places[i].candidate];
     const bool water = candidate.answer.planet->merit >= 0.5;
-    (places[i].beyond_planet_mass ? beyond : within).add(cells_of(candidate, places[i]), water ? Style::water : Style::plain);
+    (places[i].beyond_planet_mass ? beyond : within)
+        .add(cells_of(candidate, places[i]), water ? Style::water : Style::plain);
   }
   std::string text;
   if (!within.empty()) text += within.text(console);
@@ -130,9 +136,11 @@ std::string ranking_table(const std::vector<Candidate>& candidates, const std::v
 
 std::string basis_sentence(const Settings& settings) {
   const bool median = settings.asymmetry == Asymmetry::median;
-  const std::string errors = settings.assumed_errors.empty() ? "missing errors taken as none" : "missing errors assumed and flagged";
-  return fmt::format("Limits: {}, {}. Asymmetric values read as {}; {}. A zone is a screening aid, not proof of habitability.", settings.limits->key, settings.limits->citation,
-                     median ? "medians" : "modes", errors);
+  const std::string errors =
+      settings.assumed_errors.empty() ? "missing errors taken as none" : "missing errors assumed and flagged";
+  return fmt::format(
+      "Limits: {}, {}. Asymmetric values read as {}; {}. A zone is a screening aid, not proof of habitability.",
+      settings.limits->key, settings.limits->citation, median ? "medians" : "modes", errors);
 }
 
 std::vector<std::string> ranking_summary(const std::vector<Candidate>& candidates, const std::vector<Place>& places,
@@ -155,9 +163,11 @@ std::vector<std::string> ranking_summary(const std::vector<Candidate>& candidate
   if (places.empty()) return lines;
   if (settings.limits->conservative) lines.push_back("conservative zone: " + verdict_counts(candidates, places, true));
   if (settings.limits->optimistic) lines.push_back("optimistic zone: " + verdict_counts(candidates, places, false));
-  const auto beyond = std::count_if(places.begin(), places.end(), [](const Place& place) { return place.beyond_planet_mass; });
+  const auto beyond =
+      std::count_if(places.begin(), places.end(), [](const Place& place) { return place.beyond_planet_mass; });
   lines.push_back(fmt::format("planets within the fits' planet masses: {}, beyond: {}",
-                              count_text(places.size() - static_cast<std::size_t>(beyond)), count_text(static_cast<std::size_t>(beyond))));
+                              count_text(places.size() - static_cast<std::size_t>(beyond)),
+                              count_text(static_cast<std::size_t>(beyond))));
   return lines;
 }
 

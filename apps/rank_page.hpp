@@ -10,15 +10,16 @@
 
 namespace hz::app {
 
-/// The first `top` places: place, planet, Teff, insolation, radius or mass, P of both zones, verdict, flags. A line marks
-/// where the planets beyond the fits' masses begin.
+/// The first `top` places: place, planet, Teff, insolation, radius or mass, P of both zones, verdict, flags. A line
+/// marks where the planets beyond the fits' masses begin.
 [[nodiscard]] std::string ranking_table(const std::vector<Candidate>& candidates, const std::vector<Place>& places,
                                         std::size_t top, const Settings& settings, const Console& console);
 
 /// "Limits: K14, …; asymmetric values read as medians; …": what every output of a placement names.
 [[nodiscard]] std::string basis_sentence(const Settings& settings);
 
-/// Rows read, answered, cut, set aside by reason; flags; planets per verdict; planets within and beyond the fits' masses.
+/// Rows read, answered, cut, set aside by reason; flags; planets per verdict; planets within and beyond the fits'
+/// masses.
 [[nodiscard]] std::vector<std::string> ranking_summary(const std::vector<Candidate>& candidates,
                                                        const std::vector<Place>& places, const Settings& settings);
 

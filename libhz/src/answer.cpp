@@ -25,7 +25,9 @@ void set_aside(Answer& answer, const Problem& problem) {
   answer.status = Status::set_aside;
   answer.reason = problem.what;
   switch (problem.code) {
-    case ProblemCode::unreadable: answer.reason_kind = "unreadable " + (problem.column.empty() ? "row" : problem.column); break;
+    case ProblemCode::unreadable:
+      answer.reason_kind = "unreadable " + (problem.column.empty() ? "row" : problem.column);
+      break;
     case ProblemCode::out_of_range: answer.reason_kind = problem.column + " out of range"; break;
     case ProblemCode::missing: answer.reason_kind = "no " + problem.column; break;
     case ProblemCode::only_a_limit: answer.reason_kind = problem.column + " is only a limit"; break;
@@ -53,8 +55,8 @@ std::optional<Problem> teff_refused(double teff, const LimitSet& set, BeyondRang
   const double outside = teff < fitted->low ? fitted->low - teff : teff - fitted->high;
   if (beyond == BeyondRange::hold && outside <= hold_reach) return std::nullopt;
   return Problem{ProblemCode::out_of_range, "teff",
-                 fmt::format("teff {:.0f} K lies {:.0f} K outside the fits of {} ({:.0f}-{:.0f} K){}", teff, outside, set.key,
-                             fitted->low, fitted->high,
+                 fmt::format("teff {:.0f} K lies {:.0f} K outside the fits of {} ({:.0f}-{:.0f} K){}", teff, outside,
+                             set.key, fitted->low, fitted->high,
                              beyond == BeyondRange::hold ? ", farther than the 300 K over which a limit is held"
                                                          : ", and limits beyond them are refused")};
 }
@@ -193,12 +195,14 @@ bool beyond_planet_mass(const PlanetMassRoute& mass, const LimitSet& set) {
 }
 
 /// ln S over ln S_limit at the central values, for a limit that answers.
-std::optional<double> log_ratio(const FluxLimit& limit, const PlacementInput& input, double insolation, BeyondRange beyond) {
+std::optional<double> log_ratio(const FluxLimit& limit, const PlacementInput& input, double insolation,
+                                BeyondRange beyond) {
   const Result<HeldValue> at = limit.insolation(input.teff.central(), central_planet_mass(input), beyond);
   return at ? std::optional(std::log(insolation / at->value)) : std::nullopt;
 }
 
-std::optional<double> zone_position(const Zone& zone, const PlacementInput& input, double insolation, const Settings& settings) {
+std::optional<double> zone_position(const Zone& zone, const PlacementInput& input, double insolation,
+                                    const Settings& settings) {
   const auto inner = log_ratio(settings.limits->limits[zone.inner], input, insolation, settings.beyond);
   const auto outer = log_ratio(settings.limits->limits[zone.outer], input, insolation, settings.beyond);
   if (!inner || !outer) return std::nullopt;
@@ -226,7 +230,8 @@ std::optional<Margin> margin_of(const PlacementInput& input, const PlanetAnswer&
   }
   if (!nearest) return std::nullopt;
   // The limit lies colder than the planet when the planet is hotter than it.
-  const double width = log_margin_width(input, *nearest->limit, settings.beyond, least > 0 ? Towards::colder : Towards::hotter);
+  const double width =
+      log_margin_width(input, *nearest->limit, settings.beyond, least > 0 ? Towards::colder : Towards::hotter);
   nearest->widths = width > 0 ? least / width : 0;
   // An eccentric orbit meets the limit's flux, on average, at another semi-major axis: a sqrt(S / S_limit).
   if (planet.semi_major_axis) nearest->distance = planet.semi_major_axis->measured.value * std::expm1(least / 2);
@@ -234,7 +239,8 @@ std::optional<Margin> margin_of(const PlacementInput& input, const PlanetAnswer&
 }
 
 /// Share of the orbit's time between a zone's limits at the central values.
-std::optional<double> orbit_share(const Zone& zone, const PlacementInput& input, double insolation, const Settings& settings) {
+std::optional<double> orbit_share(const Zone& zone, const PlacementInput& input, double insolation,
+                                  const Settings& settings) {
   const double e = input.eccentricity.central();
   if (!(e > 0)) return std::nullopt;
   const auto inner = log_ratio(settings.limits->limits[zone.inner], input, insolation, settings.beyond);
@@ -278,11 +284,12 @@ void judge(PlanetAnswer& planet, const PlacementInput& input, const Settings& se
   if (p.optimistic) planet.optimistic = verdict_of(*p.optimistic, settings.thresholds);
   planet.side = p.conservative ? side_of(p.too_hot_conservative, p.too_cold_conservative)
                                : side_of(p.too_hot.value_or(0), p.too_cold.value_or(0));
-  planet.zone_position = zone_position(set.conservative ? *set.conservative : *set.optimistic, input, insolation, settings);
+  planet.zone_position =
+      zone_position(set.conservative ? *set.conservative : *set.optimistic, input, insolation, settings);
   planet.orbit_share = orbit_share(set.optimistic ? *set.optimistic : *set.conservative, input, insolation, settings);
   planet.margin = margin_of(input, planet, settings);
-  planet.equilibrium_temperature = constants::equilibrium_temperature_1au *
-                                   std::pow((1 - settings.bond_albedo) * insolation, 0.25);
+  planet.equilibrium_temperature =
+      constants::equilibrium_temperature_1au * std::pow((1 - settings.bond_albedo) * insolation, 0.25);
   planet.merit = merit_of(p);
 }
 

@@ -64,12 +64,13 @@ std::optional<Measured> axis_from_period(const RowInputs& row) {
 
 std::string contradictions(const RowInputs& row, const Measured& insolation) {
   Comparison comparison(row.inputs.flags());
-  comparison.compare(Quantity::luminosity, stated_luminosity(row), luminosity_from_radius(row), "stellar_radius and teff");
+  comparison.compare(Quantity::luminosity, stated_luminosity(row), luminosity_from_radius(row),
+                     "stellar_radius and teff");
   comparison.compare(Quantity::semi_major_axis,
-                     used(row.inputs.peek(Quantity::semi_major_axis, row.planet.semi_major_axis)), axis_from_period(row),
-                     "orbital_period and stellar_mass");
-  comparison.compare(Quantity::insolation, used(row.inputs.peek(Quantity::insolation, row.planet.insolation)), insolation,
-                     "the route used");
+                     used(row.inputs.peek(Quantity::semi_major_axis, row.planet.semi_major_axis)),
+                     axis_from_period(row), "orbital_period and stellar_mass");
+  comparison.compare(Quantity::insolation, used(row.inputs.peek(Quantity::insolation, row.planet.insolation)),
+                     insolation, "the route used");
   return comparison.words();
 }
 

@@ -16,7 +16,8 @@ std::vector<std::pair<Quantity, Distribution*>> distributions_of(PlacementInput&
 }
 
 std::optional<double> log_limit(const FluxLimit& limit, const PlacementInput& input, const Settings& settings) {
-  const double mass = input.planet_mass_decadic ? std::pow(10, input.planet_mass.central()) : input.planet_mass.central();
+  const double mass =
+      input.planet_mass_decadic ? std::pow(10, input.planet_mass.central()) : input.planet_mass.central();
   const Result<HeldValue> at = limit.insolation(input.teff.central(), mass, settings.beyond);
   return at ? std::optional(std::log(at->value)) : std::nullopt;
 }

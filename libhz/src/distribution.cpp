@@ -120,6 +120,7 @@ double Distribution::quantile(double u) const {
   const double wanted = 1e-12 * (high - low);
   while (high - low > wanted) {
     const double middle = low + (high - low) / 2;
+    if (middle <= low || middle >= high) break;  // neighbouring numbers
     (below(middle) < u ? low : high) = middle;
   }
   return low + (high - low) / 2;

@@ -7,16 +7,21 @@ namespace {
 
 constexpr FlagInfo infos[] = {
     {flag::held, "Teff lies outside the fitted range by up to 300 K; the limits are held at its end"},
-    {flag::beyond_planet_mass, "the planet's mass lies outside the fits' 0.1-5 Earth masses, or only a limit that leaves it there is known"},
-    {flag::evolved, "the host is not on the main sequence (log g below 4.0 or radius above twice the main sequence's); the fits are for dwarfs"},
+    {flag::beyond_planet_mass,
+     "the planet's mass lies outside the fits' 0.1-5 Earth masses, or only a limit that leaves it there is known"},
+    {flag::evolved,
+     "the host is not on the main sequence (log g below 4.0 or radius above twice the main sequence's); the fits are "
+     "for dwarfs"},
     {flag::min_mass_used, "the minimum mass stands for the planet's mass"},
     {flag::mass_from_radius, "the planet's mass follows from its radius (Chen & Kipping 2017, with its scatter)"},
     {flag::planet_mass_assumed, "no usable mass or radius: 1 Earth mass assumed"},
     {flag::circular_assumed, "no eccentricity given: a circular orbit assumed"},
     {flag::eccentricity_limit, "the eccentricity is an upper limit: a half-normal with 95 % below it"},
-    {flag::assumed_error, "the list gives no half-width (or a printed 0) for this quantity; the documented one was assumed"},
+    {flag::assumed_error,
+     "the list gives no half-width (or a printed 0) for this quantity; the documented one was assumed"},
     {flag::limit_ignored, "this quantity is only a limit; another route was taken"},
-    {flag::inconsistent, "the list states this quantity twice, beyond 3 sigma and 10 % apart; both values stand in the note"},
+    {flag::inconsistent,
+     "the list states this quantity twice, beyond 3 sigma and 10 % apart; both values stand in the note"},
 };
 
 }  // namespace

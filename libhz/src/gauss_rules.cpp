@@ -81,7 +81,8 @@ Rule gauss_rule_of(std::span<const Node> measure, std::size_t order) {
   double norm = 0;
   for (Eigen::Index k = 0; k < n; ++k) {
     double alpha = 0;
-    for (std::size_t i = 0; i < measure.size(); ++i) alpha += measure[i].weight * measure[i].x * current[i] * current[i];
+    for (std::size_t i = 0; i < measure.size(); ++i)
+      alpha += measure[i].weight * measure[i].x * current[i] * current[i];
     diagonal(k) = alpha;
     if (k + 1 == n) break;
     double square = 0;

@@ -23,7 +23,8 @@ using Rule = std::vector<Node>;
 
 /// The Gauss rule of `order` nodes for a measure given as many nodes; the measure itself when it has no more than that.
 ///
-/// Exact for polynomials up to degree 2 order - 1 over the measure, so it serves where the integrand is smooth over its span.
+/// Exact for polynomials up to degree 2 order - 1 over the measure, so it serves where the integrand is smooth over its
+/// span.
 [[nodiscard]] Rule gauss_rule_of(std::span<const Node> measure, std::size_t order);
 
 /// Where a half-normal between 0 and `last` sigmas is cut: the few places where an integrand bends, in rising order.
@@ -45,8 +46,8 @@ private:
   std::size_t count_ = 1;
 };
 
-/// Nodes of a half-normal between z_low and z_high sigmas, in panels short enough that the density itself is integrated to
-/// 1e-7; the weights sum to the part's own mass, erf(z_high / sqrt 2) - erf(z_low / sqrt 2). Calls visit(z, weight).
+/// Nodes of a half-normal between z_low and z_high sigmas, in panels short enough that the density itself is integrated
+/// to 1e-7; the weights sum to the part's own mass, erf(z_high / sqrt 2) - erf(z_low / sqrt 2). Calls visit(z, weight).
 template <class Visit>
 void visit_half_normal(double z_low, double z_high, std::size_t order, Visit visit) {
   constexpr double longest_panel = 2.6;
@@ -56,7 +57,8 @@ void visit_half_normal(double z_low, double z_high, std::size_t order, Visit vis
     const double middle = z_low + (2 * panel + 1) * half;
     const double mass = std::erfc((middle - half) / std::sqrt(2.0)) - std::erfc((middle + half) / std::sqrt(2.0));
     double sum = 0;
-    for (const Node& node : gauss_legendre(order)) sum += node.weight * std::exp(-0.5 * std::pow(middle + half * node.x, 2));
+    for (const Node& node : gauss_legendre(order))
+      sum += node.weight * std::exp(-0.5 * std::pow(middle + half * node.x, 2));
     for (const Node& node : gauss_legendre(order)) {
       const double z = middle + half * node.x;
       visit(z, node.weight * std::exp(-z * z / 2) * mass / sum);

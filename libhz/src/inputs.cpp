@@ -35,11 +35,19 @@ bool gives_no_error(const Measured& measured) {
 }  // namespace
 
 AssumedErrors default_assumed_errors() {
-  // Medians of a public composite list of 2023 (luminosity from radius and Teff). For a/R the errors of a and R together.
-  return {{Quantity::teff, 0.016},          {Quantity::stellar_radius, 0.06},          {Quantity::stellar_mass, 0.056},
-          {Quantity::semi_major_axis, 0.023}, {Quantity::scaled_semi_major_axis, 0.064}, {Quantity::planet_radius, 0.09},
-          {Quantity::planet_mass, 0.13},    {Quantity::insolation, 0.06},              {Quantity::luminosity, 0.14},
-          {Quantity::distance, 0.012},      {Quantity::eccentricity, 0.05}};
+  // Medians of a public composite list of 2023 (luminosity from radius and Teff). For a/R the errors of a and R
+  // together.
+  return {{Quantity::teff, 0.016},
+          {Quantity::stellar_radius, 0.06},
+          {Quantity::stellar_mass, 0.056},
+          {Quantity::semi_major_axis, 0.023},
+          {Quantity::scaled_semi_major_axis, 0.064},
+          {Quantity::planet_radius, 0.09},
+          {Quantity::planet_mass, 0.13},
+          {Quantity::insolation, 0.06},
+          {Quantity::luminosity, 0.14},
+          {Quantity::distance, 0.012},
+          {Quantity::eccentricity, 0.05}};
 }
 
 Domain domain_of(Quantity quantity) {

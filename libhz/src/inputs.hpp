@@ -19,8 +19,9 @@ class Inputs {
 public:
   Inputs(const Settings& settings, Flags& flags) : settings_(settings), flags_(flags) {}
 
-  /// The field as an input; empty when it is absent, or only a limit (then flagged limit_ignored). An unreadable cell or a
-  /// value outside the quantity's domain is a Problem. A missing or zero error is replaced by the assumed one, and flagged.
+  /// The field as an input; empty when it is absent, or only a limit (then flagged limit_ignored). An unreadable cell
+  /// or a value outside the quantity's domain is a Problem. A missing or zero error is replaced by the assumed one, and
+  /// flagged.
   [[nodiscard]] Result<std::optional<Input>> take(Quantity quantity, const Field& field) const;
 
   /// The same without flags, and empty on any trouble: for comparing what a list says twice.

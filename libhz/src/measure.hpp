@@ -34,10 +34,11 @@ struct Smoothness {
 
 /// The distribution as weighted points of value(x), in units of whatever value() gives; weights sum to 1.
 ///
-/// A smooth function is served by a few Gauss nodes. Where its slope jumps, no Gauss rule is good: then the halves are cut
-/// into bins, each a point of the bin's own mass at its centre of mass, and the error falls with the square of the bin.
-[[nodiscard]] Rule points_of(const Distribution& x, const std::function<double(double)>& value, const Smoothness& smoothness,
-                             Effort effort);
+/// A smooth function is served by a few Gauss nodes. Where its slope jumps, no Gauss rule is good: then the halves are
+/// cut into bins, each a point of the bin's own mass at its centre of mass, and the error falls with the square of the
+/// bin.
+[[nodiscard]] Rule points_of(const Distribution& x, const std::function<double(double)>& value,
+                             const Smoothness& smoothness, Effort effort);
 
 /// The sum of two independent measures, gathered into at most `most` points.
 [[nodiscard]] Rule sum_of(const Rule& a, const Rule& b, std::size_t most);

@@ -15,11 +15,13 @@ constexpr double ln10 = 2.302585092994045684;
 
 /// P(answered, ln S - ln S_limit >= shift) for one limit.
 ///
-/// The widest of the inputs is taken in closed form through its own distribution function; all others are summed into one
-/// measure of a few hundred points beforehand, so that a shift costs as many distribution functions as there are points.
+/// The widest of the inputs is taken in closed form through its own distribution function; all others are summed into
+/// one measure of a few hundred points beforehand, so that a shift costs as many distribution functions as there are
+/// points.
 class HotSide {
 public:
-  HotSide(const PlacementInput& input, const TermSum& sum, const FluxLimit& limit, const AnsweredRange& range, Effort effort)
+  HotSide(const PlacementInput& input, const TermSum& sum, const FluxLimit& limit, const AnsweredRange& range,
+          Effort effort)
       : sum_(sum), threshold_(input, limit, range, effort), answered_(share_in(input.teff, range.answered)) {
     const std::size_t most = effort == Effort::coarse ? 48 : 256;
     through_threshold_ = sum.terms.empty() || threshold_.width() > sum.terms.front().width();
@@ -41,7 +43,8 @@ public:
     if (is_certain(shift)) return sum_.least > threshold_.greatest() + shift ? answered_ : 0;
     double sum = 0;
     for (const Node& node : rest_) {
-      sum += node.weight * (through_threshold_ ? threshold_.at_most(node.x - shift) : sum_.terms.front().tail(shift - node.x));
+      sum += node.weight *
+             (through_threshold_ ? threshold_.at_most(node.x - shift) : sum_.terms.front().tail(shift - node.x));
     }
     return std::clamp(sum, 0.0, answered_);
   }
@@ -65,7 +68,8 @@ private:
   Rule rest_;  // everything but the variable in closed form
 };
 
-/// Where a falling function of a distance above 0 crosses zero, to a thousandth; 0 when it starts below. `scale` is a guess.
+/// Where a falling function of a distance above 0 crosses zero, to a thousandth; 0 when it starts below. `scale` is a
+/// guess.
 template <class Function>
 double falling_root(const Function& f, double scale) {
   double low = 0;
@@ -147,7 +151,8 @@ double log_margin_width(const PlacementInput& input, const FluxLimit& limit, Bey
   if (answered == 0) return 0;
   const TermSum sum(input);
   const HotSide side(input, sum, limit, range, Effort::coarse);
-  const double mass = input.planet_mass_decadic ? std::pow(10, input.planet_mass.central()) : input.planet_mass.central();
+  const double mass =
+      input.planet_mass_decadic ? std::pow(10, input.planet_mass.central()) : input.planet_mass.central();
   const double central = std::log(central_insolation(input) / limit.clamped_insolation(input.teff.central(), mass));
 
   // How much of the answered distribution still lies beyond a distance from the centre, against what a sigma leaves.

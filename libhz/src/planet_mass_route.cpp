@@ -12,7 +12,8 @@ PlanetMassRoute as_stated(const Input& input, std::string route) {
 
 using MaybeMass = Result<std::optional<PlanetMassRoute>>;
 
-MaybeMass take_mass(const RowInputs& row, Quantity quantity, const Field& field, std::string_view raise, const char* route) {
+MaybeMass take_mass(const RowInputs& row, Quantity quantity, const Field& field, std::string_view raise,
+                    const char* route) {
   const auto mass = row.inputs.take(quantity, field);
   if (!mass) return mass.error();
   if (!*mass) return std::optional<PlanetMassRoute>();

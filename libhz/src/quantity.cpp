@@ -107,10 +107,8 @@ bool is_numeric(Quantity quantity) {
     case Quantity::planet_mass_kind:
     case Quantity::adopted:
     case Quantity::reference:
-    case Quantity::note:
-      return false;
-    default:
-      return true;
+    case Quantity::note: return false;
+    default: return true;
   }
 }
 

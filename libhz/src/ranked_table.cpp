@@ -67,8 +67,10 @@ void add_decision(std::vector<OutputColumn>& columns) {
   add("p_too_hot", [](const PlanetAnswer& p) { return probability(p.probabilities.too_hot); });
   add("p_too_cold", [](const PlanetAnswer& p) { return probability(p.probabilities.too_cold); });
   add("p_unanswered", [](const PlanetAnswer& p) { return probability(p.probabilities.unanswered); });
-  add("verdict_conservative", [](const PlanetAnswer& p) { return p.conservative ? text(word(*p.conservative)) : CellValue(); });
-  add("verdict_optimistic", [](const PlanetAnswer& p) { return p.optimistic ? text(word(*p.optimistic)) : CellValue(); });
+  add("verdict_conservative",
+      [](const PlanetAnswer& p) { return p.conservative ? text(word(*p.conservative)) : CellValue(); });
+  add("verdict_optimistic",
+      [](const PlanetAnswer& p) { return p.optimistic ? text(word(*p.optimistic)) : CellValue(); });
   add("side", [](const PlanetAnswer& p) { return p.side ? text(word(*p.side)) : CellValue(); });
   add("zone_position", [](const PlanetAnswer& p) { return number(p.zone_position); });
   add("nearest_limit", [](const PlanetAnswer& p) { return p.margin ? text(p.margin->limit->key()) : CellValue(); });
@@ -76,7 +78,9 @@ void add_decision(std::vector<OutputColumn>& columns) {
   add("margin_widths", [](const PlanetAnswer& p) { return p.margin ? number(p.margin->widths) : CellValue(); });
   add("orbit_share", [](const PlanetAnswer& p) { return probability(p.orbit_share); });
   add("equilibrium_temperature_used", [](const PlanetAnswer& p) { return number(p.equilibrium_temperature); });
-  columns.push_back({head("flags"), [](const RankedRow& row) { return text(fmt::format("{}", fmt::join(row.candidate.answer.flags, ";"))); }});
+  columns.push_back({head("flags"), [](const RankedRow& row) {
+                       return text(fmt::format("{}", fmt::join(row.candidate.answer.flags, ";")));
+                     }});
   columns.push_back({head("note"), [](const RankedRow& row) { return text(row.candidate.answer.note); }});
 }
 
@@ -103,9 +107,12 @@ void add_used(std::vector<OutputColumn>& columns, Quantity quantity, Get get) {
 
 void add_all_used(std::vector<OutputColumn>& columns) {
   add_used(columns, Quantity::luminosity, [](const Answer& a) { return a.star.luminosity; });
-  add_used(columns, Quantity::semi_major_axis, [](const Answer& a) { return a.planet ? a.planet->semi_major_axis : std::nullopt; });
-  add_used(columns, Quantity::insolation, [](const Answer& a) { return a.planet ? std::optional(a.planet->insolation) : std::nullopt; });
-  add_used(columns, Quantity::planet_mass, [](const Answer& a) { return a.planet ? std::optional(a.planet->planet_mass) : std::nullopt; });
+  add_used(columns, Quantity::semi_major_axis,
+           [](const Answer& a) { return a.planet ? a.planet->semi_major_axis : std::nullopt; });
+  add_used(columns, Quantity::insolation,
+           [](const Answer& a) { return a.planet ? std::optional(a.planet->insolation) : std::nullopt; });
+  add_used(columns, Quantity::planet_mass,
+           [](const Answer& a) { return a.planet ? std::optional(a.planet->planet_mass) : std::nullopt; });
 }
 
 /// The zone limits' distances and insolations at the star, for this planet's mass.
@@ -136,7 +143,8 @@ void add_basis(std::vector<OutputColumn>& columns, const Settings& settings) {
     columns.push_back({{name, "", "meta.note", words}, [value](const RankedRow&) { return text(value); }});
   };
   add("limit_set", "key of the limit set", settings.limits ? settings.limits->key : "");
-  add("asymmetry", "what an asymmetric value is taken for: median or mode", settings.asymmetry == Asymmetry::median ? "median" : "mode");
+  add("asymmetry", "what an asymmetric value is taken for: median or mode",
+      settings.asymmetry == Asymmetry::median ? "median" : "mode");
 }
 
 Getter stated_part(Quantity quantity, std::function<CellValue(const Measured&)> part) {
@@ -152,14 +160,17 @@ CellValue exact_number(const std::optional<double>& x) { return x ? CellValue(*x
 void add_stated(std::vector<OutputColumn>& columns, Quantity quantity) {
   const ColumnHead about = head(name(quantity));
   if (!is_numeric(quantity)) {
-    columns.push_back({about, [quantity](const RankedRow& row) { return text(stated_text(row.candidate.row, quantity)); }});
+    columns.push_back(
+        {about, [quantity](const RankedRow& row) { return text(stated_text(row.candidate.row, quantity)); }});
     return;
   }
-  const auto part = [&](const std::string& suffix, const std::string& words, std::function<CellValue(const Measured&)> of) {
+  const auto part = [&](const std::string& suffix, const std::string& words,
+                        std::function<CellValue(const Measured&)> of) {
     const bool number_like = suffix != "_limit";
-    columns.push_back({{about.name + suffix, number_like ? about.unit : "",
-                        suffix.empty() ? about.ucd : (number_like ? "stat.error;" : "meta.code.error;") + about.ucd, words},
-                       stated_part(quantity, std::move(of))});
+    columns.push_back(
+        {{about.name + suffix, number_like ? about.unit : "",
+          suffix.empty() ? about.ucd : (number_like ? "stat.error;" : "meta.code.error;") + about.ucd, words},
+         stated_part(quantity, std::move(of))});
   };
   part("", about.description, [](const Measured& m) { return exact_number(m.value); });
   part("_err_minus", "lower half-width of " + about.name, [](const Measured& m) { return exact_number(m.minus); });

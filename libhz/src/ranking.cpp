@@ -30,17 +30,18 @@ long measured_inputs(const ListRow& row) {
   const StarRecord& star = row.star;
   const PlanetRecord& planet = row.planet;
   const std::array<const Field*, 13> fields = {
-      &star.teff, &star.luminosity, &star.log_luminosity, &star.stellar_radius, &star.stellar_mass,
-      &planet.orbital_period, &planet.semi_major_axis, &planet.scaled_semi_major_axis, &planet.eccentricity,
-      &planet.insolation, &planet.planet_radius, &planet.planet_mass, &planet.min_mass};
+      &star.teff,           &star.luminosity,       &star.log_luminosity,    &star.stellar_radius,
+      &star.stellar_mass,   &planet.orbital_period, &planet.semi_major_axis, &planet.scaled_semi_major_axis,
+      &planet.eccentricity, &planet.insolation,     &planet.planet_radius,   &planet.planet_mass,
+      &planet.min_mass};
   return std::count_if(fields.begin(), fields.end(), [](const Field* field) { return is_measured(*field); });
 }
 
 /// Infinite where an error of the insolation's inputs had to be assumed.
 double insolation_uncertainty(const Candidate& candidate) {
   static constexpr std::array inputs = {
-      Quantity::teff, Quantity::luminosity, Quantity::log_luminosity, Quantity::stellar_radius, Quantity::stellar_mass,
-      Quantity::semi_major_axis, Quantity::scaled_semi_major_axis, Quantity::insolation};
+      Quantity::teff,         Quantity::luminosity,      Quantity::log_luminosity,         Quantity::stellar_radius,
+      Quantity::stellar_mass, Quantity::semi_major_axis, Quantity::scaled_semi_major_axis, Quantity::insolation};
   for (const Quantity quantity : inputs) {
     if (has_flag(candidate.answer, std::string(flag::assumed_error) + std::string(name(quantity)))) return infinity;
   }
@@ -51,8 +52,8 @@ double insolation_uncertainty(const Candidate& candidate) {
 
 /// Better rows sort first.
 auto solution_key(const Candidate& candidate) {
-  return std::tuple(!candidate.row.planet.adopted.value_or(false), !candidate.preferred, -measured_inputs(candidate.row),
-                    insolation_uncertainty(candidate), candidate.row.number);
+  return std::tuple(!candidate.row.planet.adopted.value_or(false), !candidate.preferred,
+                    -measured_inputs(candidate.row), insolation_uncertainty(candidate), candidate.row.number);
 }
 
 std::string_view why_it_wins(const Candidate& winner, const Candidate& other) {
@@ -136,7 +137,8 @@ std::string folded_name(std::string_view name) {
 void keep_one_row_a_planet(std::vector<Candidate>& candidates) {
   std::map<std::string, std::vector<Candidate*>> rows_of;
   for (Candidate& candidate : candidates) {
-    if (candidate.in_the_running() && !candidate.row.planet.name.empty()) rows_of[planet_key(candidate.row)].push_back(&candidate);
+    if (candidate.in_the_running() && !candidate.row.planet.name.empty())
+      rows_of[planet_key(candidate.row)].push_back(&candidate);
   }
   for (const auto& [key, rows] : rows_of) {
     if (rows.size() > 1) keep_one(rows);
@@ -144,7 +146,8 @@ void keep_one_row_a_planet(std::vector<Candidate>& candidates) {
 }
 
 void humble_rows_without_errors(std::vector<Candidate>& candidates) {
-  std::map<decltype(central_key(candidates.front())), const Candidate*> least;  // the least merit among equal rows with errors
+  std::map<decltype(central_key(candidates.front())), const Candidate*>
+      least;  // the least merit among equal rows with errors
   for (const Candidate& candidate : candidates) {
     if (!candidate.in_the_running() || measured_inputs(candidate.row) == 0) continue;
     const Candidate*& known = least[central_key(candidate)];
@@ -155,14 +158,16 @@ void humble_rows_without_errors(std::vector<Candidate>& candidates) {
     const auto equal = least.find(central_key(candidate));
     if (equal == least.end() || equal->second->answer.planet->merit >= candidate.answer.planet->merit) continue;
     candidate.answer.planet->merit = equal->second->answer.planet->merit;
-    add_note(candidate.answer, fmt::format("merit cut to that of an equal row with errors ({})", place_in_file(equal->second->row)));
+    add_note(candidate.answer,
+             fmt::format("merit cut to that of an equal row with errors ({})", place_in_file(equal->second->row)));
   }
 }
 
 std::vector<Place> places_of(const std::vector<Candidate>& candidates) {
   std::vector<Place> places;
   for (std::size_t i = 0; i < candidates.size(); ++i) {
-    if (candidates[i].in_the_running()) places.push_back({i, 0, false, has_flag(candidates[i].answer, flag::beyond_planet_mass)});
+    if (candidates[i].in_the_running())
+      places.push_back({i, 0, false, has_flag(candidates[i].answer, flag::beyond_planet_mass)});
   }
   std::sort(places.begin(), places.end(), [&](const Place& a, const Place& b) {
     return order_key(candidates[a.candidate]) < order_key(candidates[b.candidate]);

@@ -1,10 +1,11 @@
 #include "hz/relations.hpp"
 
+#include <toml++/toml.h>
+
 #include <algorithm>
 #include <charconv>
 #include <cmath>
 #include <string_view>
-#include <toml++/toml.h>
 #include <vector>
 
 #include "hz/require.hpp"

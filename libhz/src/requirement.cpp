@@ -68,7 +68,9 @@ bool holds(double x, Comparison comparison, double bound) {
   return false;
 }
 
-bool wants_less(Comparison comparison) { return comparison == Comparison::less || comparison == Comparison::less_or_equal; }
+bool wants_less(Comparison comparison) {
+  return comparison == Comparison::less || comparison == Comparison::less_or_equal;
+}
 
 bool wants_more(Comparison comparison) {
   return comparison == Comparison::greater || comparison == Comparison::greater_or_equal;
@@ -96,7 +98,8 @@ std::string why_number_fails(const Requirement& requirement, double x) {
 Requirement parse_requirement(std::string_view text) {
   const std::size_t at = text.find_first_of("<>=");
   if (at == std::string_view::npos || at == 0) {
-    throw Error(Fault::usage, fmt::format("--require '{}' has no comparison; write it like 'planet_radius<1.8' (< <= > >= =)", text));
+    throw Error(Fault::usage,
+                fmt::format("--require '{}' has no comparison; write it like 'planet_radius<1.8' (< <= > >= =)", text));
   }
   Requirement requirement;
   requirement.text = trimmed(text);
@@ -107,7 +110,8 @@ Requirement parse_requirement(std::string_view text) {
   requirement.value = trimmed(text.substr(at + spelling->sign.size()));
   requirement.number = parse_number(requirement.value);
   if (column_named(requirement.name) == nullptr && column_named(requirement.name + "_used") == nullptr) {
-    throw Error(Fault::usage, fmt::format("--require '{}': there is no quantity or column `{}`", text, requirement.name));
+    throw Error(Fault::usage,
+                fmt::format("--require '{}': there is no quantity or column `{}`", text, requirement.name));
   }
   if (!requirement.number && requirement.comparison != Comparison::equal) {
     throw Error(Fault::usage, fmt::format("--require '{}': `{}` is not a number", text, requirement.value));

@@ -25,7 +25,10 @@ MaybeRoute stated_luminosity(const RowInputs& row) {
   const auto decadic = row.inputs.take(Quantity::log_luminosity, row.star.log_luminosity);
   if (!decadic) return decadic.error();
   if (!*decadic) return std::optional<Route>();
-  return std::optional(Route{"stated logarithm", 0, 0, {term(Quantity::log_luminosity, **decadic, 1, true)},
+  return std::optional(Route{"stated logarithm",
+                             0,
+                             0,
+                             {term(Quantity::log_luminosity, **decadic, 1, true)},
                              product(1, {{(*decadic)->used, 1, true}})});
 }
 
@@ -35,7 +38,10 @@ MaybeRoute luminosity_from_radius(const RowInputs& row) {
   if (!radius) return radius.error();
   if (!*radius) return std::optional<Route>();
   const double offset = -4 * std::log(constants::solar_teff);
-  return std::optional(Route{"stellar_radius and teff", offset, 4, {term(Quantity::stellar_radius, **radius, 2)},
+  return std::optional(Route{"stellar_radius and teff",
+                             offset,
+                             4,
+                             {term(Quantity::stellar_radius, **radius, 2)},
                              product(std::exp(offset), {{(*radius)->used, 2}, {row.teff->used, 4}})});
 }
 
@@ -47,9 +53,12 @@ MaybeRoute orbit_from_period(const RowInputs& row) {
   if (!mass) return mass.error();
   if (!*mass) return std::optional<Route>();
   const double years = 1 / constants::period_1au_d;
-  return std::optional(Route{"orbital_period and stellar_mass", -4.0 / 3 * std::log(years), 0,
-                             {term(Quantity::orbital_period, **period, -4.0 / 3), term(Quantity::stellar_mass, **mass, -2.0 / 3)},
-                             product(std::cbrt(years * years), {{(*period)->used, 2.0 / 3}, {(*mass)->used, 1.0 / 3}})});
+  return std::optional(
+      Route{"orbital_period and stellar_mass",
+            -4.0 / 3 * std::log(years),
+            0,
+            {term(Quantity::orbital_period, **period, -4.0 / 3), term(Quantity::stellar_mass, **mass, -2.0 / 3)},
+            product(std::cbrt(years * years), {{(*period)->used, 2.0 / 3}, {(*mass)->used, 1.0 / 3}})});
 }
 
 MaybeRoute stated_orbit(const RowInputs& row) {
@@ -67,7 +76,9 @@ MaybeRoute orbit_from_scaled(const RowInputs& row) {
   if (!radius) return radius.error();
   if (!*radius) return std::optional<Route>();
   return std::optional(
-      Route{"scaled_semi_major_axis and stellar_radius", 2 * std::log(constants::au_in_solar_radii), 0,
+      Route{"scaled_semi_major_axis and stellar_radius",
+            2 * std::log(constants::au_in_solar_radii),
+            0,
             {term(Quantity::scaled_semi_major_axis, **scaled, -2), term(Quantity::stellar_radius, **radius, -2)},
             product(1 / constants::au_in_solar_radii, {{(*scaled)->used, 1}, {(*radius)->used, 1}})});
 }
@@ -113,7 +124,10 @@ Result<std::optional<InsolationRoute>> from_scaled_and_teff(const RowInputs& row
   if (!*scaled) return std::optional<InsolationRoute>();
   const double offset = 2 * std::log(constants::au_in_solar_radii) - 4 * std::log(constants::solar_teff);
   InsolationRoute found;
-  found.route = {"scaled_semi_major_axis and teff", offset, 4, {term(Quantity::scaled_semi_major_axis, **scaled, -2)},
+  found.route = {"scaled_semi_major_axis and teff",
+                 offset,
+                 4,
+                 {term(Quantity::scaled_semi_major_axis, **scaled, -2)},
                  product(std::exp(offset), {{(*scaled)->used, -2}, {row.teff->used, 4}})};
   return std::optional(found);
 }
@@ -195,7 +209,8 @@ Measured product(double constant, const std::vector<Factor>& factors) {
 }
 
 MaybeRoute luminosity_route(const RowInputs& row) {
-  if (row.settings.luminosity_from == LuminosityFrom::radius) return first_of(row, luminosity_from_radius, stated_luminosity);
+  if (row.settings.luminosity_from == LuminosityFrom::radius)
+    return first_of(row, luminosity_from_radius, stated_luminosity);
   return first_of(row, stated_luminosity, luminosity_from_radius);
 }
 

@@ -11,11 +11,11 @@ namespace hz {
 
 /// Part of ln S by one route, with the value of the quantity behind it.
 struct Route {
-  std::string name;                    // "stated", "radius and teff", …
+  std::string name;  // "stated", "radius and teff", …
   double offset = 0;
   double teff_power = 0;
   std::vector<InsolationTerm> terms;
-  Measured value;                      // first-order half-widths
+  Measured value;  // first-order half-widths
 };
 
 /// What the resolver reads from.
@@ -46,11 +46,12 @@ struct InsolationRoute {
 };
 [[nodiscard]] Result<InsolationRoute> insolation_route(const RowInputs& row);
 
-/// The planet's mass for limits that depend on it: stated, minimum, from the radius, else 1 Earth mass; raises its flags.
+/// The planet's mass for limits that depend on it: stated, minimum, from the radius, else 1 Earth mass; raises its
+/// flags.
 struct PlanetMassRoute {
   Distribution x = Distribution::exact(1);
   bool decadic = false;
-  Derived derived;                        // Earth masses
+  Derived derived;              // Earth masses
   std::optional<double> limit;  // the end that a limit leaves possible, where nothing better is known; Earth masses
 };
 [[nodiscard]] Result<PlanetMassRoute> planet_mass_route(const RowInputs& row);
@@ -63,8 +64,8 @@ struct Factor {
 };
 [[nodiscard]] Measured product(double constant, const std::vector<Factor>& factors);
 
-/// Compares what the list says twice (luminosity, semi_major_axis, and insolation against the one that was used); raises
-/// inconsistent: flags beyond 3 sigma and 10 per cent, and returns both values in words.
+/// Compares what the list says twice (luminosity, semi_major_axis, and insolation against the one that was used);
+/// raises inconsistent: flags beyond 3 sigma and 10 per cent, and returns both values in words.
 [[nodiscard]] std::string contradictions(const RowInputs& row, const Measured& insolation);
 
 }  // namespace hz

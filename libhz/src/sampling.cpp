@@ -53,8 +53,8 @@ Drawn draw_all(const PlacementInput& input, Generator& generator) {
 
 }  // namespace
 
-Probabilities place_by_sampling(const PlacementInput& input, const LimitSet& set, BeyondRange beyond, std::uint64_t draws,
-                                std::uint64_t seed) {
+Probabilities place_by_sampling(const PlacementInput& input, const LimitSet& set, BeyondRange beyond,
+                                std::uint64_t draws, std::uint64_t seed) {
   HZ_REQUIRE(set.bounds_a_zone() && draws > 0);
   Generator generator(seed);
   const std::optional<Range> fitted = set.teff_range();

@@ -58,7 +58,8 @@ double SumTerm::tail(double y) const {
 }
 
 Rule SumTerm::points(const Smoothness& smoothness, Effort effort) const {
-  return points_of(x_, [this](double x) { return value(x); }, smoothness, effort);
+  return points_of(
+      x_, [this](double x) { return value(x); }, smoothness, effort);
 }
 
 TermSum::TermSum(const PlacementInput& input) : constant(input.offset) {

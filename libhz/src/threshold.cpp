@@ -11,7 +11,9 @@ constexpr double infinity = std::numeric_limits<double>::infinity();
 constexpr double ln10 = 2.302585092994045684;
 constexpr std::size_t most_points = 128;
 
-double planet_mass_at(const PlacementInput& input, double x) { return input.planet_mass_decadic ? std::exp(ln10 * x) : x; }
+double planet_mass_at(const PlacementInput& input, double x) {
+  return input.planet_mass_decadic ? std::exp(ln10 * x) : x;
+}
 
 double unit_of(const PlacementInput& input, double planet_mass) {
   return input.planet_mass_decadic ? std::log10(planet_mass) : planet_mass;
@@ -71,7 +73,8 @@ Threshold::Threshold(const PlacementInput& input, const FluxLimit& limit, const 
       for (const double part : {0.25, 0.5, 0.75, 1.0}) see(at(piece, part * reach(piece)));
     }
   }
-  // Between the places seen, and between two mass nodes and the ends of the masses, the threshold may go a little further.
+  // Between the places seen, and between two mass nodes and the ends of the masses, the threshold may go a little
+  // further.
   const double room = 0.02 + 6 * mass_width_;
   least_ -= room;
   greatest_ += room;
@@ -83,8 +86,9 @@ double Threshold::value(double teff, const LimitCurve& curve) const {
   return input_.teff_power > 0 ? flux - input_.teff_power * std::log(above_zero) : flux;
 }
 
-/// The limit is linear in ln(mass) between its fitted masses and held outside, so the Gauss rule is taken in the clamped
-/// ln(mass): the runaway greenhouse of 2014 is nearly straight in it, and what lies outside becomes weight at the ends.
+/// The limit is linear in ln(mass) between its fitted masses and held outside, so the Gauss rule is taken in the
+/// clamped ln(mass): the runaway greenhouse of 2014 is nearly straight in it, and what lies outside becomes weight at
+/// the ends.
 Rule Threshold::mass_points(std::size_t order) const {
   const Distribution& x = input_.planet_mass;
   if (!limit_.depends_on_planet_mass() || x.is_exact()) return {{planet_mass_at(input_, x.central()), 1}};
@@ -108,7 +112,9 @@ Rule Threshold::teff_points(const Smoothness& smoothness) const {
   if (teff.is_exact()) return range_.answered.contains(teff.central()) ? Rule{{teff.central(), 1}} : Rule{};
   const Range& answered = range_.answered;
   const Range& fitted = range_.fitted;
-  if (share_in(teff, fitted) > 1 - 1e-7) return points_of(teff, [](double t) { return t; }, smoothness, effort_);
+  if (share_in(teff, fitted) > 1 - 1e-7)
+    return points_of(
+        teff, [](double t) { return t; }, smoothness, effort_);
 
   // The ends of the fitted range are bends (held) or steps (refused): each half is cut there.
   Rule points;
@@ -164,16 +170,20 @@ Threshold::Track Threshold::mass_track(double teff, double weight) const {
   Track track{weight, {}};
   const Distribution& x = input_.planet_mass;
   const Range fitted = *limit_.planet_mass_range();
-  const auto y_at = [&](double u) { return value(teff, limit_.at_planet_mass(std::max(planet_mass_at(input_, u), 1e-9))); };
+  const auto y_at = [&](double u) {
+    return value(teff, limit_.at_planet_mass(std::max(planet_mass_at(input_, u), 1e-9)));
+  };
   constexpr double steps = 20;
   for (const Piece& piece : x.pieces()) {
-    visit_parts(piece, {unit_of(input_, fitted.low), unit_of(input_, 1), unit_of(input_, fitted.high)}, [&](double low, double high) {
-      for (double i = 0; i < steps; ++i) {
-        const double x_low = at(piece, low + (high - low) * i / steps);
-        const double x_high = at(piece, low + (high - low) * (i + 1) / steps);
-        track.steps.push_back({x_low, x_high, y_at(x_low), y_at(x_high), std::abs(x.below(x_high) - x.below(x_low))});
-      }
-    });
+    visit_parts(piece, {unit_of(input_, fitted.low), unit_of(input_, 1), unit_of(input_, fitted.high)},
+                [&](double low, double high) {
+                  for (double i = 0; i < steps; ++i) {
+                    const double x_low = at(piece, low + (high - low) * i / steps);
+                    const double x_high = at(piece, low + (high - low) * (i + 1) / steps);
+                    track.steps.push_back(
+                        {x_low, x_high, y_at(x_low), y_at(x_high), std::abs(x.below(x_high) - x.below(x_low))});
+                  }
+                });
   }
   return track;
 }
@@ -193,7 +203,8 @@ double Threshold::at_most_on(const Track& track, const Distribution& x, double y
 
 void Threshold::make_tracks() {
   if (teff_width_ >= mass_width_) {
-    for (const Node& mass : mass_points(effort_ == Effort::coarse ? 2 : 6)) tracks_.push_back(teff_track(mass.x, mass.weight));
+    for (const Node& mass : mass_points(effort_ == Effort::coarse ? 2 : 6))
+      tracks_.push_back(teff_track(mass.x, mass.weight));
   } else {
     const Smoothness smoothness{teff_width_ / mass_width_, true};
     for (const Node& teff : teff_points(smoothness)) tracks_.push_back(mass_track(teff.x, teff.weight));

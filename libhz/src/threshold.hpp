@@ -34,8 +34,8 @@ public:
   /// Prepares at_most().
   void make_tracks();
 
-  /// Probability that the limit answers and the threshold is at most y, through the distribution function of whichever of
-  /// Teff and planet mass moves the threshold more.
+  /// Probability that the limit answers and the threshold is at most y, through the distribution function of whichever
+  /// of Teff and planet mass moves the threshold more.
   [[nodiscard]] double at_most(double y) const;
 
 private:

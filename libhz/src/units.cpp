@@ -16,42 +16,30 @@ namespace {
 std::optional<Dimension> dimension_of(Quantity quantity) {
   switch (quantity) {
     case Quantity::teff:
-    case Quantity::equilibrium_temperature:
-      return Dimension::temperature;
-    case Quantity::luminosity:
-      return Dimension::power;
+    case Quantity::equilibrium_temperature: return Dimension::temperature;
+    case Quantity::luminosity: return Dimension::power;
     case Quantity::stellar_radius:
     case Quantity::planet_radius:
     case Quantity::semi_major_axis:
-    case Quantity::distance:
-      return Dimension::length;
+    case Quantity::distance: return Dimension::length;
     case Quantity::stellar_mass:
     case Quantity::planet_mass:
-    case Quantity::min_mass:
-      return Dimension::mass;
-    case Quantity::stellar_density:
-      return Dimension::density;
+    case Quantity::min_mass: return Dimension::mass;
+    case Quantity::stellar_density: return Dimension::density;
     case Quantity::parallax:
     case Quantity::inclination:
-    case Quantity::arg_periastron:
-      return Dimension::angle;
-    case Quantity::metallicity:
-      return Dimension::abundance;
+    case Quantity::arg_periastron: return Dimension::angle;
+    case Quantity::metallicity: return Dimension::abundance;
     case Quantity::age:
-    case Quantity::orbital_period:
-      return Dimension::time;
-    case Quantity::rv_semi_amplitude:
-      return Dimension::speed;
-    case Quantity::insolation:
-      return Dimension::flux;
+    case Quantity::orbital_period: return Dimension::time;
+    case Quantity::rv_semi_amplitude: return Dimension::speed;
+    case Quantity::insolation: return Dimension::flux;
     case Quantity::scaled_semi_major_axis:
     case Quantity::eccentricity:
     case Quantity::radius_ratio:
     case Quantity::transit_depth:
-    case Quantity::bond_albedo:
-      return Dimension::ratio;
-    default:
-      break;
+    case Quantity::bond_albedo: return Dimension::ratio;
+    default: break;
   }
   if (info(quantity).unit == "mag") return Dimension::magnitude;
   return std::nullopt;
@@ -133,11 +121,8 @@ std::optional<Conversion> conversion(Quantity quantity, std::string_view unit) {
 Measured convert(const Measured& measured, const Conversion& conversion) {
   Measured out = measured;
   switch (conversion.kind) {
-    case ConversionKind::reciprocal:
-      return reciprocal(measured, conversion.number);
-    case ConversionKind::offset:
-      out.value += conversion.number;
-      break;
+    case ConversionKind::reciprocal: return reciprocal(measured, conversion.number);
+    case ConversionKind::offset: out.value += conversion.number; break;
     case ConversionKind::factor:
       out.value *= conversion.number;
       out.minus = scaled(measured.minus, conversion.number);

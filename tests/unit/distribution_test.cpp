@@ -182,5 +182,11 @@ TEST(Distribution, BrokenPreconditionsThrow) {
   EXPECT_THROW((void)Distribution::below(0.3, eccentricities).quantile(1), std::logic_error);
 }
 
+// A half-width far below the value once left the search between two neighbouring numbers for ever.
+TEST(Distribution, QuantileEndsForAHalfWidthNearTheValuesOwnPrecision) {
+  const Distribution x = Distribution::two_piece(1e5, 1e-9, 3e-9, Asymmetry::mode, {0, HUGE_VAL});
+  EXPECT_NEAR(x.quantile(0.5), 1e5, 1e-8);
+}
+
 }  // namespace
 }  // namespace hz

@@ -9,19 +9,26 @@
 namespace hz {
 namespace {
 
-using test::AwkwardCase;
 using test::awkward_cases;
+using test::AwkwardCase;
 
 const LimitSet& set_named(std::string_view key) { return *LimitCatalog::published().find(key); }
 
-/// Difference of two probabilities in standard errors of the sampled one; a share of a draw keeps the ends apart from 0.
+/// Difference of two probabilities in standard errors of the sampled one; a share of a draw keeps the ends apart from
+/// 0.
 double z_of(double exact, double sampled, double draws) {
   const double p = std::clamp((exact + sampled) / 2, 1 / draws, 1 - 1 / draws);
   return (exact - sampled) / std::sqrt(p * (1 - p) / draws);
 }
 
 std::vector<double> numbers_of(const Probabilities& p) {
-  return {*p.too_hot, *p.optimistic, *p.too_cold, *p.conservative, p.unanswered, p.too_hot_conservative, p.too_cold_conservative};
+  return {*p.too_hot,
+          *p.optimistic,
+          *p.too_cold,
+          *p.conservative,
+          p.unanswered,
+          p.too_hot_conservative,
+          p.too_cold_conservative};
 }
 
 /// 50 of the 200 awkward cases against 100,000 draws each.
@@ -75,9 +82,10 @@ TEST(Placement, KnownInputsGiveAStep) {
 TEST(Placement, OneNormalInputFollowsItsErrorFunction) {
   PlacementInput input;
   input.teff = Distribution::exact(5780);
-  input.terms = {{Quantity::insolation, Distribution::two_piece(1.107, 0.1, 0.1, Asymmetry::median, {0, HUGE_VAL}), 1, false}};
+  input.terms = {
+      {Quantity::insolation, Distribution::two_piece(1.107, 0.1, 0.1, Asymmetry::median, {0, HUGE_VAL}), 1, false}};
   const Probabilities p = place(input, set_named("K14"), BeyondRange::hold);
-  EXPECT_NEAR(p.too_hot_conservative, 0.5, 1e-9);                                                  // the limit is 1.107 itself
+  EXPECT_NEAR(p.too_hot_conservative, 0.5, 1e-9);  // the limit is 1.107 itself
   EXPECT_NEAR(p.too_cold_conservative, 0.5 * std::erfc((1.107 - 0.356) / 0.1 / std::sqrt(2)), 1e-9);
 }
 
@@ -108,7 +116,8 @@ TEST(Placement, ASetWithOneZoneLeavesTheOtherEmpty) {
 TEST(MarginWidth, FollowsTheFacingHalfWidth) {
   PlacementInput input;
   input.teff = Distribution::exact(5780);
-  input.terms = {{Quantity::insolation, Distribution::two_piece(1, 0.05, 0.2, Asymmetry::median, {0, HUGE_VAL}), 1, false}};
+  input.terms = {
+      {Quantity::insolation, Distribution::two_piece(1, 0.05, 0.2, Asymmetry::median, {0, HUGE_VAL}), 1, false}};
   const FluxLimit& limit = set_named("K14").limits[set_named("K14").conservative->inner];
   EXPECT_NEAR(log_margin_width(input, limit, BeyondRange::hold, Towards::hotter), std::log(1.2), 0.01 * 0.2);
   EXPECT_NEAR(log_margin_width(input, limit, BeyondRange::hold, Towards::colder), -std::log(0.95), 0.01 * 0.05);

@@ -11,7 +11,8 @@
 
 namespace hz {
 
-/// A quantity that follows from the row, with its 68 per cent half-widths and its route ("stated", "radius and teff", …).
+/// A quantity that follows from the row, with its 68 per cent half-widths and its route ("stated", "radius and teff",
+/// …).
 struct Derived {
   Measured measured;
   std::string route;
@@ -34,12 +35,12 @@ enum class ZoneEdge { optimistic_inner, conservative_inner, conservative_outer, 
 /// One limit at one star.
 struct LimitAtStar {
   const FluxLimit* limit = nullptr;
-  std::vector<ZoneEdge> edges;                 // empty for a further limit of the set
-  double insolation = 0;                       // Earth = 1
+  std::vector<ZoneEdge> edges;  // empty for a further limit of the set
+  double insolation = 0;        // Earth = 1
   bool held = false;
-  std::optional<Measured> distance;            // au, when the luminosity is known
-  std::optional<double> period;                // d, when the stellar mass is known too
-  std::optional<double> angular_separation;    // mas, when the distance of the star is known too
+  std::optional<Measured> distance;          // au, when the luminosity is known
+  std::optional<double> period;              // d, when the stellar mass is known too
+  std::optional<double> angular_separation;  // mas, when the distance of the star is known too
 };
 
 enum class Verdict { inside, likely_inside, open, likely_outside, outside };
@@ -67,7 +68,8 @@ struct PlanetAnswer {
   std::optional<Verdict> conservative;
   std::optional<Verdict> optimistic;
   std::optional<Side> side;
-  std::optional<double> orbit_share;  // share of the orbit, in time, between the optimistic limits, central values; eccentric orbits only
+  std::optional<double>
+      orbit_share;  // share of the orbit, in time, between the optimistic limits, central values; eccentric orbits only
   double merit = 0;
 };
 
@@ -79,10 +81,10 @@ struct Answer {
   std::string reason;
   std::string reason_kind;  // a few words, the same for all rows of a kind: what the summary counts
   StarAnswer star;
-  std::vector<LimitAtStar> limits;     // in the set's order; empty when the star has no answer
-  std::optional<PlanetAnswer> planet;  // empty for a star without planet
+  std::vector<LimitAtStar> limits;      // in the set's order; empty when the star has no answer
+  std::optional<PlanetAnswer> planet;   // empty for a star without planet
   std::optional<PlacementInput> input;  // what the planet's placement was computed from
-  std::vector<std::string> flags;      // words of the closed list in hz/flags.hpp
+  std::vector<std::string> flags;       // words of the closed list in hz/flags.hpp
   std::string note;
 };
 

@@ -3,8 +3,8 @@
 #include <optional>
 #include <vector>
 
-#include "hz/placement.hpp"
 #include "hz/answer.hpp"
+#include "hz/placement.hpp"
 
 namespace hz {
 
@@ -18,9 +18,10 @@ struct VarianceShare {
 /// Greatest first, summing to 1; empty when every input is known or the set bounds no zone at the central values.
 [[nodiscard]] std::vector<VarianceShare> variance_shares(const PlacementInput& input, const Settings& settings);
 
-/// By what factor (below 1) the half-widths of one input must shrink, all central values staying, for the verdict of the
-/// conservative zone (else the optimistic one) to become firm: inside or outside. Empty when it is firm already, or when
-/// this input alone cannot settle it.
-[[nodiscard]] std::optional<double> settling_factor(const PlacementInput& input, Quantity quantity, const Settings& settings);
+/// By what factor (below 1) the half-widths of one input must shrink, all central values staying, for the verdict of
+/// the conservative zone (else the optimistic one) to become firm: inside or outside. Empty when it is firm already, or
+/// when this input alone cannot settle it.
+[[nodiscard]] std::optional<double> settling_factor(const PlacementInput& input, Quantity quantity,
+                                                    const Settings& settings);
 
 }  // namespace hz

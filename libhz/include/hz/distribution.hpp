@@ -1,4 +1,5 @@
-// What a measured value stands for: a two-piece normal on the scale it is quoted on, cut to its domain and renormalised.
+// What a measured value stands for: a two-piece normal on the scale it is quoted on, cut to its domain and
+// renormalised.
 #pragma once
 #include <array>
 #include <cstddef>
@@ -21,7 +22,8 @@ struct Domain {
   double high = 0;  // may be infinity
 };
 
-/// One side of a two-piece normal: a half-normal from `centre` outwards, as far as `end` (the domain's end or infinity).
+/// One side of a two-piece normal: a half-normal from `centre` outwards, as far as `end` (the domain's end or
+/// infinity).
 struct Piece {
   double centre = 0;
   double sigma = 0;      // above 0
@@ -41,12 +43,15 @@ public:
   ///
   /// A zero half-width puts all the weight on the other side. A value outside the domain, or a side with no room in the
   /// domain, leaves only the other side; `value` must lie in the closed domain.
-  [[nodiscard]] static Distribution two_piece(double value, double minus, double plus, Asymmetry asymmetry, Domain domain);
+  [[nodiscard]] static Distribution two_piece(double value, double minus, double plus, Asymmetry asymmetry,
+                                              Domain domain);
 
-  /// Half-normal from 0 upwards with 95 per cent below `limit`, cut to `domain`: what an upper limit of an eccentricity means.
+  /// Half-normal from 0 upwards with 95 per cent below `limit`, cut to `domain`: what an upper limit of an eccentricity
+  /// means.
   [[nodiscard]] static Distribution below(double limit, Domain domain);
 
-  /// The same value with its half-widths times `factor` (0 makes it exact); what a better or worse measurement would say.
+  /// The same value with its half-widths times `factor` (0 makes it exact); what a better or worse measurement would
+  /// say.
   [[nodiscard]] Distribution scaled(double factor) const;
 
   [[nodiscard]] double central() const { return central_; }  // the quoted value

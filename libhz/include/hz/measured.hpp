@@ -11,10 +11,11 @@ enum class LimitMark {
   lower,  // ">": the true value lies above
 };
 
-/// A number with its lower and upper half-width (68 per cent, both at least 0), on the scale and in the unit it is quoted in.
+/// A number with its lower and upper half-width (68 per cent, both at least 0), on the scale and in the unit it is
+/// quoted in.
 ///
-/// A half-width that the list leaves out is empty, never 0 or NaN; a printed 0 stays 0. Which distribution these numbers
-/// stand for, and what an empty or zero half-width means, is decided in hz/distribution.hpp and nowhere else.
+/// A half-width that the list leaves out is empty, never 0 or NaN; a printed 0 stays 0. Which distribution these
+/// numbers stand for, and what an empty or zero half-width means, is decided in hz/distribution.hpp and nowhere else.
 struct Measured {
   double value = 0;
   std::optional<double> minus;

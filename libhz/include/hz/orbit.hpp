@@ -10,8 +10,8 @@ namespace hz {
 /// The inverse. Units: semi_major_axis in au; the result in d.
 [[nodiscard]] double period_of(double semi_major_axis, double stellar_mass);
 
-/// Time-averaged flux on an eccentric orbit over that on the circular one of the same semi-major axis: 1 / sqrt(1 - e^2).
-/// Source: Williams & Pollard 2002, Int. J. Astrobiology 1, 61. 0 <= eccentricity < 1.
+/// Time-averaged flux on an eccentric orbit over that on the circular one of the same semi-major axis: 1 / sqrt(1 -
+/// e^2). Source: Williams & Pollard 2002, Int. J. Astrobiology 1, 61. 0 <= eccentricity < 1.
 [[nodiscard]] double mean_flux_factor(double eccentricity);
 
 /// Share of an orbit's time spent closer to the star than `distance`, given in semi-major axes. 0 <= eccentricity < 1.

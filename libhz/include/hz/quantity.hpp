@@ -1,4 +1,5 @@
-// The one list of names that serves input, output, help and code; its words, units and UCDs are data in catalogs/columns.csv.
+// The one list of names that serves input, output, help and code; its words, units and UCDs are data in
+// catalogs/columns.csv.
 #pragma once
 #include <optional>
 #include <span>
@@ -9,6 +10,7 @@
 namespace hz {
 
 /// Every quantity a list may state. The enumerator is the canonical column name.
+// clang-format off
 enum class Quantity {
   star, star_id, planet, ra, dec, spectral_type,
   teff, luminosity, log_luminosity, stellar_radius, stellar_mass, stellar_density, parallax, distance,
@@ -19,12 +21,13 @@ enum class Quantity {
   insolation, equilibrium_temperature, bond_albedo,
   number_of_stars, planet_mass_kind, adopted, reference, note,
 };
+// clang-format on
 
 /// What catalogs/columns.csv says of a quantity (or of a column that only hzmap writes).
 struct QuantityInfo {
-  std::string name;         // canonical column name
-  std::string symbol;       // as the field prints it; may be empty
-  std::string unit;         // canonical unit, ECSV spelling; empty when dimensionless or text
+  std::string name;    // canonical column name
+  std::string symbol;  // as the field prints it; may be empty
+  std::string unit;    // canonical unit, ECSV spelling; empty when dimensionless or text
   std::string ucd;
   std::vector<std::string> accept;  // header words that mean it, as people write them
   std::string description;

@@ -1,4 +1,5 @@
-// The columns of a ranked list: what the list stated, what follows, and what was decided, so that the file is itself a list.
+// The columns of a ranked list: what the list stated, what follows, and what was decided, so that the file is itself a
+// list.
 #pragma once
 #include <cstdint>
 #include <functional>
@@ -29,9 +30,10 @@ struct OutputColumn {
 
 /// The columns of a ranked list. `stated` are the quantities the input list speaks of: they come back as stated, in
 /// canonical units, with half-widths and limit marks; `kept` are the heads of the input's own columns that travel along
-/// (ListRow::kept holds their cells in the same order). What was used and how it was had stands in X_used and X_used_route.
+/// (ListRow::kept holds their cells in the same order). What was used and how it was had stands in X_used and
+/// X_used_route.
 [[nodiscard]] std::vector<OutputColumn> ranked_columns(const Settings& settings, const std::vector<Quantity>& stated,
-                                         const std::vector<ColumnHead>& kept);
+                                                       const std::vector<ColumnHead>& kept);
 
 [[nodiscard]] TableHead head_of(const std::vector<OutputColumn>& columns);
 [[nodiscard]] Chunk chunk_of(const std::vector<OutputColumn>& columns, const std::vector<RankedRow>& rows);

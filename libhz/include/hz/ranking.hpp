@@ -14,8 +14,8 @@ namespace hz {
 struct Candidate {
   ListRow row;
   Answer answer;
-  bool preferred = false;   // the user's own choice among several rows of one planet
-  std::string cut_reason;   // not empty: a requirement of the user's is not met
+  bool preferred = false;  // the user's own choice among several rows of one planet
+  std::string cut_reason;  // not empty: a requirement of the user's is not met
 
   [[nodiscard]] bool in_the_running() const {
     return answer.status == Status::answered && answer.planet && cut_reason.empty();
@@ -25,9 +25,10 @@ struct Candidate {
 /// A name without blanks and in lower case, for comparing names as people write them.
 [[nodiscard]] std::string folded_name(std::string_view name);
 
-/// Keeps one row of every planet that has several: the adopted one, else the preferred one, else the one with most measured
-/// inputs, then the smallest relative uncertainty of insolation (an assumed error counts as infinite), then file order. The
-/// others are set aside by line; the winner's note says how many there were and over what range their P run.
+/// Keeps one row of every planet that has several: the adopted one, else the preferred one, else the one with most
+/// measured inputs, then the smallest relative uncertainty of insolation (an assumed error counts as infinite), then
+/// file order. The others are set aside by line; the winner's note says how many there were and over what range their P
+/// run.
 void keep_one_row_a_planet(std::vector<Candidate>& candidates);
 
 /// A row without any measured half-width never beats an equal row that has some: its merit is cut down to that row's.
@@ -42,8 +43,9 @@ struct Place {
   bool beyond_planet_mass = false;  // in the section that follows the planets within the fits' masses
 };
 
-/// The order: planets within the fits' planet masses, then the others; by merit to two decimals; within a place by closeness
-/// to the middle of the zone, then by name, which only fix the order of the lines. Ranks run on through both sections.
+/// The order: planets within the fits' planet masses, then the others; by merit to two decimals; within a place by
+/// closeness to the middle of the zone, then by name, which only fix the order of the lines. Ranks run on through both
+/// sections.
 [[nodiscard]] std::vector<Place> places_of(const std::vector<Candidate>& candidates);
 
 }  // namespace hz

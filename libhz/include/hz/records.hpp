@@ -23,28 +23,28 @@ struct StarRecord {
   std::string name;
   std::string id;
   std::string spectral_type;
-  Field teff;              // K
-  Field luminosity;        // nominal solar
-  Field log_luminosity;    // dex of nominal solar
-  Field stellar_radius;    // nominal solar
-  Field stellar_mass;      // solar
-  Field log_g;             // dex of cm s^-2
-  Field distance;          // pc
+  Field teff;            // K
+  Field luminosity;      // nominal solar
+  Field log_luminosity;  // dex of nominal solar
+  Field stellar_radius;  // nominal solar
+  Field stellar_mass;    // solar
+  Field log_g;           // dex of cm s^-2
+  Field distance;        // pc
   std::optional<int> number_of_stars;
 };
 
 struct PlanetRecord {
-  std::string name;  // empty: the row is a star without a planet
+  std::string name;              // empty: the row is a star without a planet
   Field orbital_period;          // d
   Field semi_major_axis;         // au
   Field scaled_semi_major_axis;  // semi-major axis / stellar radius
   Field eccentricity;
-  Field insolation;              // Earth = 1
-  Field planet_radius;           // Earth
-  Field planet_mass;             // Earth
-  Field min_mass;                // Earth
+  Field insolation;     // Earth = 1
+  Field planet_radius;  // Earth
+  Field planet_mass;    // Earth
+  Field min_mass;       // Earth
   PlanetMassKind planet_mass_kind = PlanetMassKind::unsaid;
-  std::optional<bool> adopted;   // the solution adopted among several rows of one planet
+  std::optional<bool> adopted;  // the solution adopted among several rows of one planet
 };
 
 /// A row of a list, read.
@@ -54,8 +54,9 @@ struct ListRow {
   StarRecord star;
   PlanetRecord planet;
   std::string reference;
-  std::optional<Problem> problem;  // the row as a whole could not be read (ragged, over-long); it is set aside with this
-  std::vector<std::string> kept;   // the input's own cells that travel along, as text
+  std::optional<Problem>
+      problem;                    // the row as a whole could not be read (ragged, over-long); it is set aside with this
+  std::vector<std::string> kept;  // the input's own cells that travel along, as text
 };
 
 }  // namespace hz

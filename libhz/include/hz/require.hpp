@@ -3,7 +3,7 @@
 #include <stdexcept>
 
 /// Throws std::logic_error when `condition` is false: a bug of ours, never the user's.
-#define HZ_REQUIRE(condition)                                                   \
-  do {                                                                          \
+#define HZ_REQUIRE(condition)                                                         \
+  do {                                                                                \
     if (!(condition)) throw std::logic_error("hz: broken precondition: " #condition); \
   } while (false)

@@ -76,7 +76,8 @@ private:
   }
 
   ColumnCandidate mapped(const ColumnMap::Entry& entry, std::size_t column) const {
-    ColumnCandidate out{column, entry.quantity, entry.part, entry.unit, true, KnownBy::map, words::folded(entry.column), {}};
+    ColumnCandidate out{column, entry.quantity, entry.part, entry.unit, true, KnownBy::map, words::folded(entry.column),
+                        {}};
     if (!entry.unit.empty() || !is_numeric(entry.quantity)) return out;
     // The file's own unit counts where the map says none; one that does not fit is an error as elsewhere.
     out.unit = unit_in_file(column);
@@ -159,7 +160,9 @@ std::string described_in_comments(const TableHead& head, std::string_view column
 
 }  // namespace
 
-std::vector<ColumnCandidate> match_columns(const TableHead& head, const ColumnMap& map) { return Matching(head, map).all(); }
+std::vector<ColumnCandidate> match_columns(const TableHead& head, const ColumnMap& map) {
+  return Matching(head, map).all();
+}
 
 std::vector<std::string> descriptions(const TableHead& head) {
   std::vector<std::string> out;

@@ -111,24 +111,12 @@ void ReadingPlan::add(const UnderstoodColumn& column) {
       choice.column = column.column;
       choice.conversion = conversion.value_or(Conversion{});
       break;
-    case ColumnPart::half_width:
-      choice.half_width = side;
-      break;
-    case ColumnPart::upper_half_width:
-      choice.upper_half_width = side;
-      break;
-    case ColumnPart::lower_half_width:
-      choice.lower_half_width = side;
-      break;
-    case ColumnPart::lower_bound:
-      choice.lower_bound = side;
-      break;
-    case ColumnPart::upper_bound:
-      choice.upper_bound = side;
-      break;
-    case ColumnPart::limit_mark:
-      choice.limit_mark = column.column;
-      break;
+    case ColumnPart::half_width: choice.half_width = side; break;
+    case ColumnPart::upper_half_width: choice.upper_half_width = side; break;
+    case ColumnPart::lower_half_width: choice.lower_half_width = side; break;
+    case ColumnPart::lower_bound: choice.lower_bound = side; break;
+    case ColumnPart::upper_bound: choice.upper_bound = side; break;
+    case ColumnPart::limit_mark: choice.limit_mark = column.column; break;
     case ColumnPart::route:
       // Beside an X_used the route tells of that, and X is what the list stated.
       if (!has_header(std::string(name(column.quantity)) + "_used")) choice.route = column.column;

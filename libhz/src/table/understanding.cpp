@@ -93,7 +93,9 @@ public:
   std::vector<Doubt> doubts() { return std::move(doubts_); }
 
 private:
-  static bool is_settled(const ColumnCandidate& candidate) { return candidate.unit_known && candidate.meanings.empty(); }
+  static bool is_settled(const ColumnCandidate& candidate) {
+    return candidate.unit_known && candidate.meanings.empty();
+  }
   [[nodiscard]] const std::string& header(std::size_t column) const { return head_.columns[column].name; }
   [[nodiscard]] bool needs(Quantity quantity) const { return contains(needed_, quantity); }
   [[nodiscard]] bool knows(Quantity quantity) const {
