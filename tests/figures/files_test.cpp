@@ -44,7 +44,9 @@ Fault fault_of(const std::function<void()>& action) {
 class Files : public ::testing::Test {
 protected:
   Scene scene = wedge_scene(compact_in_zone(), options(88));
-  fs::path folder = fs::path(::testing::TempDir()) / "hz_figures";
+  // A folder a test: ctest runs each in a process of its own, side by side.
+  fs::path folder = fs::path(::testing::TempDir()) /
+                    (std::string("hz_figures_") + ::testing::UnitTest::GetInstance()->current_test_info()->name());
 
   void SetUp() override {
     fs::remove_all(folder);
