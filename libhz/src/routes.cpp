@@ -129,6 +129,12 @@ Result<std::optional<InsolationRoute>> from_scaled_and_teff(const RowInputs& row
                  4,
                  {term(Quantity::scaled_semi_major_axis, **scaled, -2)},
                  product(std::exp(offset), {{(*scaled)->used, -2}, {row.teff->used, 4}})};
+  // The radius cancels from the insolation, but it still says how many au that is.
+  if (const auto radius = row.inputs.peek(Quantity::stellar_radius, row.star.stellar_radius)) {
+    found.semi_major_axis =
+        Derived{product(1 / constants::au_in_solar_radii, {{(*scaled)->used, 1}, {radius->used, 1}}),
+                "scaled_semi_major_axis and stellar_radius"};
+  }
   return std::optional(found);
 }
 

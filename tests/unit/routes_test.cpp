@@ -134,6 +134,15 @@ TEST(InsolationRoute, EarthReceivesOne) {
   EXPECT_NEAR(insolation(answered(row)), 1, 1e-7);
 }
 
+TEST(InsolationRoute, ScaledAxisWithARadiusIsShownInAu) {
+  ListRow row = bare_earth();
+  row.planet.scaled_semi_major_axis = exactly(au_in_radii);
+  row.star.stellar_radius = exactly(0.5);
+  const Answer a = answered(row);
+  EXPECT_EQ(a.planet->insolation.route, "scaled_semi_major_axis and teff");
+  EXPECT_NEAR(a.planet->semi_major_axis->measured.value, 0.5, 1e-8);
+}
+
 TEST(InsolationRoute, ScaledAxisAndTeffNeedNoRadius) {
   ListRow row = bare_earth();
   row.planet.scaled_semi_major_axis = exactly(au_in_radii);
