@@ -31,9 +31,9 @@ bool is_called(const Candidate& candidate, const std::string& folded) {
 }
 
 /// The planet's row; of several the one that would be ranked.
-Candidate find_planet(AnsweredList list, const std::string& name, const std::string& path) {
+Candidate find_planet(const AnsweredList& list, const std::string& name, const std::string& path) {
   std::vector<Candidate> found;
-  for (Candidate& candidate : list.candidates) {
+  for (const Candidate& candidate : list.candidates) {
     if (is_called(candidate, folded_name(name))) found.push_back(candidate);
   }
   if (found.empty()) refuse_name(list, name, path);

@@ -140,6 +140,7 @@ struct Work {
       : settings(chosen), row{list_row.star, list_row.planet, settings, Inputs(settings, flags), std::nullopt} {}
   Work(const Work&) = delete;
   Work& operator=(const Work&) = delete;
+  ~Work() = default;
 
   Flags flags;
   const Settings& settings;

@@ -51,9 +51,9 @@ private:
 template <class Visit>
 void visit_half_normal(double z_low, double z_high, std::size_t order, Visit visit) {
   constexpr double longest_panel = 2.6;
-  const double panels = std::ceil((z_high - z_low) / longest_panel);
+  const auto panels = static_cast<int>(std::ceil((z_high - z_low) / longest_panel));
   const double half = (z_high - z_low) / panels / 2;
-  for (double panel = 0; panel < panels; ++panel) {
+  for (int panel = 0; panel < panels; ++panel) {
     const double middle = z_low + (2 * panel + 1) * half;
     const double mass = std::erfc((middle - half) / std::sqrt(2.0)) - std::erfc((middle + half) / std::sqrt(2.0));
     double sum = 0;

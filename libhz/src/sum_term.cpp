@@ -64,11 +64,11 @@ Rule SumTerm::points(const Smoothness& smoothness, Effort effort) const {
 
 TermSum::TermSum(const PlacementInput& input) : constant(input.offset) {
   const auto add = [&](const Distribution& x, SumTerm::Shape shape, double power) {
-    SumTerm term(x, shape, power);
+    const SumTerm term(x, shape, power);
     if (x.is_exact()) {
       constant += term.value(x.central());
     } else {
-      terms.push_back(std::move(term));
+      terms.push_back(term);
     }
   };
   for (const InsolationTerm& term : input.terms) {

@@ -150,12 +150,12 @@ Threshold::Track Threshold::teff_track(double planet_mass, double weight) const 
     if (range_.answered.contains(teff.central())) track.steps.push_back({teff.central(), teff.central(), y, y, 1});
     return track;
   }
-  const double steps = effort_ == Effort::coarse ? 8 : 40;
+  const int steps = effort_ == Effort::coarse ? 8 : 40;
   for (const Piece& piece : teff.pieces()) {
     visit_parts(piece, {range_.answered.low, range_.fitted.low, range_.fitted.high, range_.answered.high},
                 [&](double low, double high) {
                   if (!range_.answered.contains(at(piece, (low + high) / 2))) return;
-                  for (double i = 0; i < steps; ++i) {
+                  for (int i = 0; i < steps; ++i) {
                     const double x_low = at(piece, low + (high - low) * i / steps);
                     const double x_high = at(piece, low + (high - low) * (i + 1) / steps);
                     track.steps.push_back({x_low, x_high, value(x_low, curve), value(x_high, curve),
@@ -173,11 +173,11 @@ Threshold::Track Threshold::mass_track(double teff, double weight) const {
   const auto y_at = [&](double u) {
     return value(teff, limit_.at_planet_mass(std::max(planet_mass_at(input_, u), 1e-9)));
   };
-  constexpr double steps = 20;
+  constexpr int steps = 20;
   for (const Piece& piece : x.pieces()) {
     visit_parts(piece, {unit_of(input_, fitted.low), unit_of(input_, 1), unit_of(input_, fitted.high)},
                 [&](double low, double high) {
-                  for (double i = 0; i < steps; ++i) {
+                  for (int i = 0; i < steps; ++i) {
                     const double x_low = at(piece, low + (high - low) * i / steps);
                     const double x_high = at(piece, low + (high - low) * (i + 1) / steps);
                     track.steps.push_back(
