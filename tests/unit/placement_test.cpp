@@ -56,6 +56,27 @@ TEST_P(AwkwardPlacement, AgreesWithTheSamplerWithinItsError) {
 
 INSTANTIATE_TEST_SUITE_P(Quarters, AwkwardPlacement, testing::Values(0, 1, 2, 3));
 
+/// Gauss nodes once lay beyond an eccentricity of 1 where the domain cut it between five and seven half-widths out: P 1
+/// for 0.06.
+TEST(Placement, AnErrorOfEccentricityOfAnySizeAgreesWithTheSampler) {
+  PlacementInput input;
+  input.offset = -4 * std::log(constants::solar_teff);
+  input.teff_power = 4;
+  input.teff = Distribution::two_piece(5898, 13, 13, Asymmetry::median, test::positive);
+  input.terms = {{Quantity::stellar_radius,
+                  Distribution::two_piece(1.07, 0.015, 0.015, Asymmetry::median, test::positive), 2, false},
+                 {Quantity::semi_major_axis,
+                  Distribution::two_piece(0.81, 0.016, 0.016, Asymmetry::median, test::positive), -2, false}};
+  constexpr std::uint64_t draws = 50'000;
+  for (int hundredths = 5; hundredths <= 30; ++hundredths) {
+    const double sigma = 0.01 * hundredths;
+    input.eccentricity = Distribution::two_piece(0.24, sigma, sigma, Asymmetry::median, {0, 1});
+    const Probabilities exact = place(input, set_named("K14"), BeyondRange::hold);
+    const Probabilities sampled = place_by_sampling(input, set_named("K14"), BeyondRange::hold, draws, 7);
+    EXPECT_LT(std::abs(z_of(*exact.optimistic, *sampled.optimistic, draws)), 4) << "half-width " << sigma;
+  }
+}
+
 TEST(Placement, SharesSumToOneOnEveryAwkwardCase) {
   for (const AwkwardCase& c : awkward_cases()) {
     const Probabilities p = place(c.input, set_named("K14"), c.beyond);
