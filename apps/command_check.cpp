@@ -11,9 +11,9 @@
 namespace hz::app {
 namespace {
 
-bool is_called(const Candidate& candidate, const std::string& folded) {
-  const std::string planet = folded_name(candidate.row.planet.name);
-  return !planet.empty() && (planet == folded || folded_name(candidate.row.star.name) + planet == folded);
+bool is_called(const ListRow& row, const std::string& folded) {
+  const std::string planet = folded_name(row.planet.name);
+  return !planet.empty() && (planet == folded || folded_name(row.star.name) + planet == folded);
 }
 
 [[noreturn]] void refuse_name(const AnsweredList& list, const std::string& name, const std::string& path) {
@@ -34,7 +34,7 @@ bool is_called(const Candidate& candidate, const std::string& folded) {
 Candidate find_planet(const AnsweredList& list, const std::string& name, const std::string& path) {
   std::vector<Candidate> found;
   for (const Candidate& candidate : list.candidates) {
-    if (is_called(candidate, folded_name(name))) found.push_back(candidate);
+    if (is_called(candidate.row, folded_name(name))) found.push_back(candidate);
   }
   if (found.empty()) refuse_name(list, name, path);
   keep_one_row_a_planet(found);
@@ -69,7 +69,9 @@ int run_check(const Arguments& arguments, Console& console) {
   }
   if (words.size() < 2)
     throw Error(Fault::usage, fmt::format("which planet of {}? Give its name after the list", words[0]));
-  const Candidate planet = find_planet(answer_list(words[0], arguments, choices.settings, console), words[1], words[0]);
+  const auto wanted = [&](const ListRow& row) { return is_called(row, folded_name(words[1])); };
+  const AnsweredList list = answer_list(words[0], arguments, choices.settings, console, {}, wanted);
+  const Candidate planet = find_planet(list, words[1], words[0]);
   return print_report(make_report(planet.row, choices, planet.answer), arguments, console);
 }
 

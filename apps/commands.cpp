@@ -103,7 +103,9 @@ Command rank_command() {
             {"hzmap rank planets.csv --require 'planet_radius<1.8' --top 5", "only small planets, five lines"}}},
           {"Merit is P of the conservative zone plus half of what the optimistic zone adds. Planets outside the planet "
            "masses "
-           "that the limits were fitted for follow in a section of their own.",
+           "that the limits were fitted for follow in a section of their own. A row without any error never stands "
+           "above an "
+           "equal row that has some: its merit is cut to that row's, and its note says so.",
            verdict_note},
           run_rank};
 }

@@ -51,14 +51,32 @@ std::vector<Quantity> stated_quantities(const Understanding& understanding) {
   return stated;
 }
 
+/// A list must say something of light or of an orbit.
+void refuse_unusable(const std::vector<Quantity>& stated, const TableHead& head) {
+  const auto needed = planet_inputs();
+  const bool usable = std::any_of(stated.begin(), stated.end(), [&](Quantity quantity) {
+    return is_numeric(quantity) && std::find(needed.begin(), needed.end(), quantity) != needed.end();
+  });
+  if (usable) return;
+  throw Error(Fault::input, fmt::format("{0} has no column that hzmap can use; `hzmap columns {0}` shows how each is "
+                                        "understood, and writes a map to edit",
+                                        head.source));
+}
+
 Candidate candidate_of(const Chunk& chunk, std::size_t index, const OpenList& list, const std::vector<KeptColumn>& kept,
-                       const std::optional<Preference>& preference, const Settings& settings) {
+                       const std::optional<Preference>& preference, const Settings& settings,
+                       const std::function<bool(const ListRow&)>& wanted) {
   Candidate candidate;
   candidate.row = list.understanding.row(chunk, index);
   candidate.row.kept = kept_cells(chunk, index, kept);
   candidate.preferred =
       preference && !chunk.row_problems[index] && chunk.text(preference->column, index) == preference->value;
-  candidate.answer = answer(candidate.row, settings);
+  if (wanted(candidate.row)) {
+    candidate.answer = answer(candidate.row, settings);
+  } else {
+    candidate.answer.status = Status::set_aside;
+    candidate.answer.reason_kind = candidate.answer.reason = "not asked for";
+  }
   return candidate;
 }
 
@@ -67,17 +85,19 @@ Candidate candidate_of(const Chunk& chunk, std::size_t index, const OpenList& li
 std::span<const Option> preference_options() { return preference_table; }
 
 AnsweredList answer_list(const std::string& path, const Arguments& arguments, const Settings& settings,
-                         const Console& console, std::span<const std::string> written) {
+                         const Console& console, std::span<const std::string> written,
+                         const std::function<bool(const ListRow&)>& wanted) {
   OpenList list = open_list(path, arguments, planet_inputs());
   AnsweredList answered;
   answered.stated = stated_quantities(list.understanding);
+  refuse_unusable(answered.stated, list.reader->head());
   if (arguments.knows("keep")) answered.kept = kept_columns(arguments, list.reader->head(), written);
   const std::optional<Preference> preference = read_preference(arguments, list.reader->head());
   Progress progress(console, "answering");
   while (const std::optional<Chunk> chunk = list.reader->next()) {
     for (std::size_t i = 0; i < chunk->rows(); ++i) {
       stop_if_asked();
-      answered.candidates.push_back(candidate_of(*chunk, i, list, answered.kept, preference, settings));
+      answered.candidates.push_back(candidate_of(*chunk, i, list, answered.kept, preference, settings, wanted));
       progress.update(answered.candidates.size());
     }
   }

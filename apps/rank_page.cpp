@@ -28,7 +28,8 @@ constexpr ShortFlag short_words[] = {{flag::evolved, "evolved"},
                                      {flag::eccentricity_limit, "e limit"},
                                      {flag::circular_assumed, "circular"},
                                      {flag::limit_ignored, "limit ignored"},
-                                     {flag::assumed_error, "errors assumed"}};
+                                     {flag::assumed_error, "errors assumed"},
+                                     {flag::wide_error, "wide error"}};
 
 std::string size_text(const Candidate& candidate) {
   const PlanetRecord& planet = candidate.row.planet;

@@ -9,9 +9,9 @@
 namespace hz::app {
 
 void Tally::count(const Answer& answer) {
-  for (const std::string& flag : answer.flags) ++flags_[flag];
   if (answer.status == Status::answered) {
     ++answered_;
+    for (const std::string& flag : answer.flags) ++flags_[flag];
     return;
   }
   ++set_aside_;

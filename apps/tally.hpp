@@ -9,7 +9,8 @@
 
 namespace hz::app {
 
-/// Counts answers. Every row read is either answered or set aside; the numbers add up.
+/// Counts answers. Every row read is either answered or set aside; the numbers add up. Flags are those of answered
+/// rows.
 class Tally {
 public:
   void count(const Answer& answer);

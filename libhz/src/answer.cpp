@@ -134,6 +134,14 @@ void add_half_widths(Answer& answer, const PlacementInput& light, const Settings
   }
 }
 
+/// Inputs far beyond anything real carry products out of the range of numbers; such a row has no answer.
+std::optional<Problem> not_a_number(Quantity quantity, double value) {
+  if (std::isfinite(value) && value > 0) return std::nullopt;
+  return Problem{
+      ProblemCode::out_of_range, std::string(name(quantity)),
+      fmt::format("{} cannot be computed: the row's values carry it out of the range of numbers", name(quantity))};
+}
+
 /// A row being answered: its inputs and the flags they raise.
 struct Work {
   Work(const ListRow& list_row, const Settings& chosen)
@@ -163,6 +171,7 @@ std::optional<Problem> answer_light(Work& work, Answer& answer) {
   work.flags.forget_since(raised);  // whoever uses the luminosity raises its flags
   if (!light) return light.error();
   if (*light) {
+    if (auto problem = not_a_number(Quantity::luminosity, (*light)->value.value)) return problem;
     work.light = **light;
     answer.star.luminosity = Derived{work.light->value, work.light->name};
   }
@@ -319,6 +328,7 @@ std::optional<Problem> answer_planet(Work& work, const ListRow& list_row, Answer
     input.eccentricity = eccentricity->x;
     insolation = averaged(insolation, *eccentricity);
   }
+  if (auto problem = not_a_number(Quantity::insolation, insolation.value)) return problem;
   const Result<PlanetMassRoute> mass = planet_mass_route(work.row);
   if (!mass) return mass.error();
   input.planet_mass = mass->x;

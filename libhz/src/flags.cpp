@@ -19,6 +19,8 @@ constexpr FlagInfo infos[] = {
     {flag::eccentricity_limit, "the eccentricity is an upper limit: a half-normal with 95 % below it"},
     {flag::assumed_error,
      "the list gives no half-width (or a printed 0) for this quantity; the documented one was assumed"},
+    {flag::wide_error,
+     "the lower half-width is larger than the value; the distribution is cut where the quantity ends, at 0"},
     {flag::limit_ignored, "this quantity is only a limit; another route was taken"},
     {flag::inconsistent,
      "the list states this quantity twice, beyond 3 sigma and 10 % apart; both values stand in the note"},

@@ -86,6 +86,9 @@ Input Inputs::settle(Quantity quantity, const Measured& measured) const {
     input.used.minus = measured.minus ? measured.minus : measured.plus;
     input.used.plus = measured.plus ? measured.plus : measured.minus;
   }
+  if (!is_logarithm(quantity) && *input.used.minus > measured.value && measured.value > 0) {
+    flags_.raise(flag::wide_error, quantity);
+  }
   if (*input.used.minus + *input.used.plus > 0) {
     input.x = Distribution::two_piece(measured.value, *input.used.minus, *input.used.plus, settings_.asymmetry,
                                       domain_of(quantity));

@@ -26,6 +26,7 @@ inline constexpr std::string_view planet_mass_assumed = "planet_mass_assumed";
 inline constexpr std::string_view circular_assumed = "circular_assumed";
 inline constexpr std::string_view eccentricity_limit = "eccentricity_limit";
 inline constexpr std::string_view assumed_error = "assumed_error:";
+inline constexpr std::string_view wide_error = "wide_error:";
 inline constexpr std::string_view limit_ignored = "limit_ignored:";
 inline constexpr std::string_view inconsistent = "inconsistent:";
 }  // namespace flag

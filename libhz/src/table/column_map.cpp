@@ -138,6 +138,8 @@ std::string map_line(std::string_view key, std::string_view column, std::string_
   return fmt::format("{} = {{ column = {}, unit = {} }}", key, in_toml_quotes(column), in_toml_quotes(unit));
 }
 
-std::string ignore_line(std::string_view column) { return fmt::format("ignore = [{}]", in_toml_quotes(column)); }
+std::string ignore_line(std::string_view column) {
+  return fmt::format("ignore = [{}]  # above [columns]", in_toml_quotes(column));
+}
 
 }  // namespace hz
