@@ -191,7 +191,7 @@ TEST(Understanding, TwoColumnsAreSettledByTheMap) {
 TEST(Understanding, BareLettersAndWordsAreAnError) {
   EXPECT_EQ(refusal({"R"}),
             "list.csv: column \"R\" may be stellar_radius or planet_radius; say which in a column map (--columns "
-            "MAP.toml): stellar_radius = \"R\"  or  planet_radius = \"R\"  or  ignore = [\"R\"]");
+            "MAP.toml): stellar_radius = \"R\"  or  planet_radius = \"R\"  or  ignore = [\"R\"]  # above [columns]");
   for (const auto* const bare : {"a", "e", "R", "Rp", "mass", "Radius"})
     EXPECT_THAT(refusal({bare}), HasSubstr("may be")) << bare;
   // Magnitudes and velocities are no inputs of the main job: these are mentioned only.
@@ -210,10 +210,11 @@ TEST(Understanding, FurtherDoubtsAreNamedToo) {
 }
 
 TEST(Understanding, UnknownUnitIsAnErrorThatSaysWhatToWrite) {
-  EXPECT_EQ(refusal({"Teff [furlong]"}),
-            "list.csv: the unit \"furlong\" of column \"Teff [furlong]\" is not one of teff; say which in a column map "
-            "(--columns MAP.toml): "
-            "teff = { column = \"Teff [furlong]\", unit = \"K\" }  or  ignore = [\"Teff [furlong]\"]");
+  EXPECT_EQ(
+      refusal({"Teff [furlong]"}),
+      "list.csv: the unit \"furlong\" of column \"Teff [furlong]\" is not one of teff; say which in a column map "
+      "(--columns MAP.toml): "
+      "teff = { column = \"Teff [furlong]\", unit = \"K\" }  or  ignore = [\"Teff [furlong]\"]  # above [columns]");
   EXPECT_THAT(refusal({"teff", "teff_err [AU]"}), HasSubstr("the unit \"AU\" of column \"teff_err [AU]\""));
   EXPECT_EQ(refusal({"V mag [Jy]"}), "");  // not needed: a note
   EXPECT_EQ(refusal({"Teff [furlong]"},
