@@ -1,4 +1,4 @@
-// Small helpers for text as people type it.
+// Small functions for text as people type it.
 #pragma once
 #include <string>
 #include <string_view>

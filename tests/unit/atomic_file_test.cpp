@@ -4,7 +4,7 @@
 #include <gtest/gtest.h>
 #include <sys/stat.h>
 
-#include "table_helpers.hpp"
+#include "list_files.hpp"
 
 namespace hz {
 namespace {

@@ -3,7 +3,7 @@
 #include <gmock/gmock.h>
 #include <gtest/gtest.h>
 
-#include "table_helpers.hpp"
+#include "list_files.hpp"
 
 namespace hz {
 namespace {

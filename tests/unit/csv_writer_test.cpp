@@ -4,7 +4,7 @@
 #include <cmath>
 #include <limits>
 
-#include "table_helpers.hpp"
+#include "list_files.hpp"
 
 namespace hz {
 namespace {

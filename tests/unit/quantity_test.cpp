@@ -6,7 +6,7 @@
 #include <set>
 #include <utility>
 
-#include "table_helpers.hpp"
+#include "list_files.hpp"
 
 namespace hz {
 namespace {

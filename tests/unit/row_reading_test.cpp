@@ -3,7 +3,7 @@
 
 #include <cmath>
 
-#include "table_helpers.hpp"
+#include "list_files.hpp"
 
 namespace hz {
 namespace {

@@ -23,8 +23,7 @@ constexpr auto bare_words = std::to_array<Bare>({
     {"k", Quantity::magnitude_k, "mag"},
     {"k", Quantity::rv_semi_amplitude, "m/s"},
     {"k", Quantity::rv_semi_amplitude, "km/s"},
-    {"g", Quantity::magnitude_g, "mag"},
-    {"g", Quantity::log_g, ""},
+    {"g", Quantity::magnitude_g, ""},  // or the Sloan g band
     {"a", Quantity::semi_major_axis, "AU"},
     {"a", Quantity::extinction_v, "mag"},
     {"e", Quantity::eccentricity, ""},
