@@ -1,6 +1,7 @@
 // A table in a file of its own, for tests.
 #pragma once
 #include <gtest/gtest.h>
+#include <unistd.h>
 
 #include <filesystem>
 #include <fstream>
@@ -21,8 +22,9 @@ class Folder {
 public:
   Folder() {
     const auto* const test = ::testing::UnitTest::GetInstance()->current_test_info();
-    path_ =
-        std::filesystem::temp_directory_path() / (std::string("hz_") + test->test_suite_name() + '_' + test->name());
+    const auto name =
+        std::string("hz_") + test->test_suite_name() + '_' + test->name() + '_' + std::to_string(::getpid());
+    path_ = std::filesystem::temp_directory_path() / name;
     std::filesystem::remove_all(path_);
     std::filesystem::create_directories(path_);
   }
