@@ -7,7 +7,7 @@
 
 #include "hz/ranked_table.hpp"
 #include "hz/ranking.hpp"
-#include "table_helpers.hpp"
+#include "list_files.hpp"
 
 namespace hz::testing {
 

@@ -5,7 +5,7 @@
 
 #include "answer_helpers.hpp"
 #include "hz/error.hpp"
-#include "table_helpers.hpp"
+#include "list_files.hpp"
 
 namespace hz {
 namespace {
