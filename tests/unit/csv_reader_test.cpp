@@ -128,13 +128,14 @@ TEST(CsvReader, UnclosedQuoteInABigFileNamesWhereItOpened) {
 
 TEST(CsvReader, NulByteNamesItsLine) {
   EXPECT_THAT(refusal(std::string("a,b\n1,2\n3,\0\n", 11)), HasSubstr("list.csv:3: holds a NUL byte"));
-  EXPECT_THAT(refusal(std::string("a,b\n1,2\n3,\"\n\0\"\n", 16)), HasSubstr("list.csv:4: holds a NUL byte"));
+  EXPECT_THAT(refusal(std::string("a,b\n1,2\n3,\"\n\0\"\n", 15)), HasSubstr("list.csv:4: holds a NUL byte"));
   EXPECT_THAT(refusal(std::string("a,\0b\n1,2\n", 9)), HasSubstr("list.csv:1: holds a NUL byte"));
   EXPECT_THAT(refusal(std::string("a,b\n#\0\n1,2\n", 11)), HasSubstr("list.csv:2: holds a NUL byte"));
 }
 
 TEST(CsvReader, TenMegabytesOnOneLine) {
-  const std::string long_line(10'000'000, 'x');
+  std::string long_line;
+  long_line.resize(10'000'000, 'x');
   EXPECT_THAT(refusal(long_line), HasSubstr("list.csv:1: this row is longer than 4 MB"));
   EXPECT_THAT(refusal("a,b\n1,2\n" + long_line + "\n3,4\n"), HasSubstr("list.csv:3: this row is longer than 4 MB"));
 }
