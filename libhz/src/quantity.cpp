@@ -104,6 +104,7 @@ bool is_numeric(Quantity quantity) {
     case Quantity::dec:
     case Quantity::spectral_type:
     case Quantity::number_of_stars:
+    case Quantity::circumbinary:
     case Quantity::planet_mass_kind:
     case Quantity::adopted:
     case Quantity::reference:

@@ -19,17 +19,17 @@ using testing::value;
 /// Numbers that no short decimal holds, half-widths missing, printed 0 and one-sided, limits, text that needs quoting.
 std::vector<ListRow> awkward_list() {
   ListRow full;
-  full.star = {.name = "Lantern 4",
-               .id = "0042",
-               .spectral_type = "K5 V, \"old\"",
-               .teff = value(4410.1, 70, 71.25),
-               .luminosity = value(0.1 + 0.2, 1e-3 / 3, 0.01),
-               .log_luminosity = value(-0.5228787452803376, 0.01),
-               .stellar_radius = value(0.7, 0, 0),
-               .stellar_mass = value(0.72, {}, 0.03),
-               .log_g = value(4.6),
-               .distance = value(12.345678901234567),
-               .number_of_stars = 2};
+  full.star.name = "Lantern 4";
+  full.star.id = "0042";
+  full.star.spectral_type = "K5 V, \"old\"";
+  full.star.teff = value(4410.1, 70, 71.25);
+  full.star.luminosity = value(0.1 + 0.2, 1e-3 / 3, 0.01);
+  full.star.log_luminosity = value(-0.5228787452803376, 0.01);
+  full.star.stellar_radius = value(0.7, 0, 0);
+  full.star.stellar_mass = value(0.72, {}, 0.03);
+  full.star.log_g = value(4.6);
+  full.star.distance = value(12.345678901234567);
+  full.star.number_of_stars = 2;
   full.planet.name = "Lantern 4 b";
   full.planet.orbital_period = value(97.123456789, 1e-7, 2e-7);
   full.planet.semi_major_axis = value(0.2, 0.01, 0.01);

@@ -15,11 +15,11 @@ enum class Quantity {
   star, star_id, planet, ra, dec, spectral_type,
   teff, luminosity, log_luminosity, stellar_radius, stellar_mass, stellar_density, parallax, distance,
   magnitude_v, magnitude_b, magnitude_g, magnitude_bp, magnitude_rp, magnitude_j, magnitude_h, magnitude_k, magnitude_bol,
-  color_bv, color_vk, color_bp_rp, extinction_v, reddening_bv, metallicity, log_g, age,
+  color_bv, color_vk, color_vj, color_bp_rp, extinction_v, reddening_bv, metallicity, log_g, age,
   orbital_period, semi_major_axis, scaled_semi_major_axis, eccentricity, inclination, arg_periastron,
   planet_radius, radius_ratio, planet_mass, min_mass, transit_depth, rv_semi_amplitude,
   insolation, equilibrium_temperature, bond_albedo,
-  number_of_stars, planet_mass_kind, adopted, reference, note,
+  number_of_stars, companion_separation, circumbinary, planet_mass_kind, adopted, reference, note,
 };
 // clang-format on
 

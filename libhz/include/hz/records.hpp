@@ -23,13 +23,22 @@ struct StarRecord {
   std::string name;
   std::string id;
   std::string spectral_type;
-  Field teff;            // K
-  Field luminosity;      // nominal solar
-  Field log_luminosity;  // dex of nominal solar
-  Field stellar_radius;  // nominal solar
-  Field stellar_mass;    // solar
-  Field log_g;           // dex of cm s^-2
-  Field distance;        // pc
+  Field teff;                                                               // K
+  Field luminosity;                                                         // nominal solar
+  Field log_luminosity;                                                     // dex of nominal solar
+  Field stellar_radius;                                                     // nominal solar
+  Field stellar_mass;                                                       // solar
+  Field log_g;                                                              // dex of cm s^-2
+  Field stellar_density;                                                    // g cm^-3
+  Field metallicity;                                                        // dex
+  Field parallax;                                                           // mas
+  Field distance;                                                           // pc
+  Field magnitude_v, magnitude_b, magnitude_g, magnitude_bp, magnitude_rp;  // apparent, mag
+  Field magnitude_j, magnitude_h, magnitude_k, magnitude_bol;
+  Field color_bv, color_vk, color_vj, color_bp_rp;  // mag
+  Field extinction_v;                               // A_V, mag
+  Field reddening_bv;                               // E(B-V), mag
+  Field companion_separation;                       // arcsec
   std::optional<int> number_of_stars;
 };
 
@@ -43,6 +52,10 @@ struct PlanetRecord {
   Field planet_radius;  // Earth
   Field planet_mass;    // Earth
   Field min_mass;       // Earth
+  Field inclination;    // deg
+  Field radius_ratio;   // planet radius / stellar radius
+  Field transit_depth;  // fraction of the star's light
+  std::optional<bool> circumbinary;
   PlanetMassKind planet_mass_kind = PlanetMassKind::unsaid;
   std::optional<bool> adopted;  // the solution adopted among several rows of one planet
 };

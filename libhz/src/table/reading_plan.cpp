@@ -10,31 +10,11 @@
 
 #include "hz/measured_text.hpp"
 #include "hz/require.hpp"
+#include "record_fields.hpp"
 #include "words.hpp"
 
 namespace hz {
 namespace {
-
-constexpr auto star_fields = std::to_array<std::pair<Quantity, Field StarRecord::*>>({
-    {Quantity::teff, &StarRecord::teff},
-    {Quantity::luminosity, &StarRecord::luminosity},
-    {Quantity::log_luminosity, &StarRecord::log_luminosity},
-    {Quantity::stellar_radius, &StarRecord::stellar_radius},
-    {Quantity::stellar_mass, &StarRecord::stellar_mass},
-    {Quantity::log_g, &StarRecord::log_g},
-    {Quantity::distance, &StarRecord::distance},
-});
-
-constexpr auto planet_fields = std::to_array<std::pair<Quantity, Field PlanetRecord::*>>({
-    {Quantity::orbital_period, &PlanetRecord::orbital_period},
-    {Quantity::semi_major_axis, &PlanetRecord::semi_major_axis},
-    {Quantity::scaled_semi_major_axis, &PlanetRecord::scaled_semi_major_axis},
-    {Quantity::eccentricity, &PlanetRecord::eccentricity},
-    {Quantity::insolation, &PlanetRecord::insolation},
-    {Quantity::planet_radius, &PlanetRecord::planet_radius},
-    {Quantity::planet_mass, &PlanetRecord::planet_mass},
-    {Quantity::min_mass, &PlanetRecord::min_mass},
-});
 
 bool holds(std::string_view text, std::string_view word) { return text.find(word) != std::string_view::npos; }
 
@@ -263,6 +243,7 @@ ListRow ReadingPlan::read(const Chunk& chunk, std::size_t row) const {
   out.planet.name = text(chunk, row, Quantity::planet);
   for (const auto& [quantity, field] : planet_fields) out.planet.*field = this->field(chunk, row, quantity);
   out.planet.planet_mass_kind = mass_kind(text(chunk, row, Quantity::planet_mass_kind));
+  out.planet.circumbinary = yes_or_no(text(chunk, row, Quantity::circumbinary));
   out.planet.adopted = yes_or_no(text(chunk, row, Quantity::adopted));
   out.reference = text(chunk, row, Quantity::reference);
   return out;
