@@ -27,6 +27,7 @@ std::optional<Dimension> dimension_of(Quantity quantity) {
     case Quantity::min_mass: return Dimension::mass;
     case Quantity::stellar_density: return Dimension::density;
     case Quantity::parallax:
+    case Quantity::companion_separation:
     case Quantity::inclination:
     case Quantity::arg_periastron: return Dimension::angle;
     case Quantity::metallicity: return Dimension::abundance;

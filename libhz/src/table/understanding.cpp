@@ -28,24 +28,7 @@ constexpr auto all_inputs = std::to_array<Quantity>({
     Quantity::stellar_radius,
     Quantity::stellar_mass,
     Quantity::log_g,
-    Quantity::stellar_density,
-    Quantity::spectral_type,
-    Quantity::parallax,
     Quantity::distance,
-    Quantity::magnitude_v,
-    Quantity::magnitude_b,
-    Quantity::magnitude_g,
-    Quantity::magnitude_bp,
-    Quantity::magnitude_rp,
-    Quantity::magnitude_j,
-    Quantity::magnitude_k,
-    Quantity::magnitude_bol,
-    Quantity::color_bv,
-    Quantity::color_vk,
-    Quantity::color_vj,
-    Quantity::color_bp_rp,
-    Quantity::extinction_v,
-    Quantity::reddening_bv,
     // of a planet
     Quantity::planet,
     Quantity::orbital_period,
@@ -56,13 +39,10 @@ constexpr auto all_inputs = std::to_array<Quantity>({
     Quantity::planet_radius,
     Quantity::planet_mass,
     Quantity::min_mass,
-    Quantity::inclination,
-    Quantity::radius_ratio,
-    Quantity::transit_depth,
     Quantity::planet_mass_kind,
     Quantity::adopted,
 });
-constexpr std::size_t star_input_count = 25;
+constexpr std::size_t star_input_count = 8;
 
 // Single letters so common for other things that they are mentioned, but stop nobody.
 constexpr std::array<std::string_view, 4> common_letters{"p", "d", "l", "m"};
