@@ -4,6 +4,7 @@
 
 #include <algorithm>
 #include <cmath>
+#include <limits>
 #include <utility>
 
 #include "main_sequence_table.hpp"
@@ -83,7 +84,7 @@ Relation RelationReader::read_relation(const TomlTable& table) const {
                     "y_column",
                     "inverse_of",
                     "scatter",
-                    "scatter_fraction",
+                    "scatter_is",
                     "scatter_piece",
                     "scatter_source"});
   Relation relation;
@@ -122,11 +123,12 @@ void RelationReader::read_words(const TomlTable& table, Relation& relation) cons
 PiecewisePolynomial RelationReader::pieces(const TomlTable& table, std::string_view key) const {
   const Argument argument{is_word(table, "argument", "log10(x)", "x"), number_or(table, "argument_minus", 0),
                           number_or(table, "argument_over", 1)};
+  const double lowest = table.has("range") ? read_range(table).low : -std::numeric_limits<double>::infinity();
   std::vector<PolynomialPiece> pieces;
   for (const toml::node& node : table.tables(key)) {
     const TomlTable piece(node, file_, fmt::format("a piece of {}", table.name()));
     piece.allow_only({"from", "c"});
-    const double from = piece.has("from") ? in_x(table, piece.number("from")) : read_range(table).low;
+    const double from = pieces.empty() ? lowest : in_x(table, piece.number("from"));
     if (!pieces.empty() && from <= pieces.back().from) {
       piece.fail("from", fmt::format("{}: 'from' does not rise; order the pieces", table.name()));
     }
@@ -173,14 +175,13 @@ void RelationReader::read_inverse(const TomlTable& table, Relation& relation) co
 }
 
 void RelationReader::read_scatter(const TomlTable& table, Relation& relation) const {
-  if (table.has("scatter_piece")) {
-    relation.scatter_ = pieces(table, "scatter_piece");
-  } else if (table.has("scatter_fraction")) {
-    const double fraction = table.number("scatter_fraction");
-    relation.scatter_ = [fraction, value = relation.value_](double x) { return fraction * value(x); };
-  } else {
-    relation.scatter_ = [scatter = table.number("scatter")](double) { return scatter; };
-  }
+  const bool is_fraction = is_word(table, "scatter_is", "fraction", "absolute");
+  const PiecewisePolynomial scatter = table.has("scatter_piece")
+                                          ? pieces(table, "scatter_piece")
+                                          : PiecewisePolynomial({}, {{relation.range_.low, {table.number("scatter")}}});
+  relation.scatter_ = [scatter, is_fraction, value = relation.value_](double x) {
+    return is_fraction ? scatter(x) * value(x) : scatter(x);
+  };
 }
 
 }  // namespace hz

@@ -25,7 +25,7 @@ public:
   [[nodiscard]] const Range& range() const { return range_; }
 
   std::string key;    // "bc_g_andrae18"
-  std::string label;  // as it stands in a route: "BC_G(teff)"
+  std::string label;  // as it stands in a route: "BC_G(Teff)"
   std::string x;      // "teff", "color_vk", "absolute_magnitude_k", "spectral_subtype", "log_stellar_mass", …
   std::string y;      // "bc_g", "teff", "log_luminosity", "stellar_radius", …
   std::string x_unit, y_unit;
