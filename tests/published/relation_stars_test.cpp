@@ -98,7 +98,8 @@ double standard_deviation(const std::vector<double>& values) {
   return std::sqrt(sum / static_cast<double>(values.size() - 1));
 }
 
-/// Share of stars within the stated scatter must be 0.68, by three standard errors of a share (binomial).
+/// Share of stars within the stated scatter must be 0.68, by three standard errors of a share (binomial). Where the
+/// scatter was measured on these very stars (its source says so), this only guards the number.
 void expect_two_thirds(const std::vector<Star>& stars, const std::vector<Comparison>& comparisons) {
   for (const Comparison& on : comparisons) {
     const hz::Relation& found = relation(on.key);
