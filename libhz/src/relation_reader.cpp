@@ -60,33 +60,12 @@ std::vector<Relation> RelationReader::read() {
 }
 
 Relation RelationReader::read_relation(const TomlTable& table) const {
-  table.allow_only({"key",
-                    "label",
-                    "x",
-                    "x_unit",
-                    "y",
-                    "y_unit",
-                    "citation",
-                    "doi",
-                    "provenance",
-                    "warning",
-                    "holds_for",
-                    "solar_bolometric_magnitude",
-                    "range",
-                    "ends_in",
-                    "argument",
-                    "argument_minus",
-                    "argument_over",
-                    "value_times",
-                    "value",
-                    "piece",
-                    "x_column",
-                    "y_column",
-                    "inverse_of",
-                    "scatter",
-                    "scatter_is",
-                    "scatter_piece",
-                    "scatter_source"});
+  // clang-format off
+  table.allow_only({"key", "label", "x", "x_unit", "y", "y_unit", "citation", "doi", "provenance", "warning",
+                    "holds_for", "solar_bolometric_magnitude", "range", "ends_in", "argument", "argument_minus",
+                    "argument_over", "value", "value_times", "piece", "x_column", "y_column", "inverse_of", "scatter",
+                    "scatter_is", "scatter_piece", "scatter_source"});
+  // clang-format on
   Relation relation;
   read_words(table, relation);
   if (table.has("inverse_of")) {
