@@ -6,6 +6,7 @@
 #include <cmath>
 
 #include "contradictions.hpp"
+#include "hz/companions.hpp"
 #include "hz/constants.hpp"
 #include "hz/orbit.hpp"
 #include "hz/relations.hpp"
@@ -265,6 +266,23 @@ void raise_star_flags(Work& work, const Answer& answer) {
   if (!fitted->contains(teff.central()) || outside > noticeable_share) work.flags.raise(flag::held);
 }
 
+/// What the list says of other stars; a close one leaves no verdict firm. After the limits, whose outermost it needs.
+void heed_companions(Work& work, Answer& answer) {
+  std::optional<double> outer;
+  for (const LimitAtStar& at : answer.limits) {
+    if (at.distance && !at.edges.empty()) outer = std::max(outer.value_or(0), at.distance->value);
+  }
+  const ListRow& row = work.resolver.row();
+  const std::optional<Derived>& distance = answer.star.distance;
+  const Companions companions =
+      companions_of(row.star, row.planet, distance ? std::optional(distance->measured.value) : std::nullopt, outer);
+  if (!companions.present) return;
+  work.flags.raise(flag::companion);
+  if (!companions.close) return;
+  work.flags.raise(flag::close_companion);
+  if (answer.planet) soften(*answer.planet);
+}
+
 bool states_an_orbit(const PlanetRecord& planet) {
   const auto says = [](const Field& field) { return field.stated || field.problem; };
   return says(planet.orbital_period) || says(planet.semi_major_axis) || says(planet.scaled_semi_major_axis) ||
@@ -347,6 +365,7 @@ Answer answer(const ListRow& row, const Settings& settings) {
   } else {
     raise_star_flags(work, answer);
     answer.limits = limits_at(answer.star, work.central_teff(), central_planet_mass(*answer.input), settings);
+    heed_companions(work, answer);
   }
   answer.flags = work.flags.words();
   return answer;
@@ -366,6 +385,7 @@ Answer answer_star(const ListRow& row, const Settings& settings) {
     raise_star_flags(work, answer);
     answer.limits = limits_at(answer.star, work.central_teff(), 1, settings);
     add_half_widths(answer, work.input(*work.light), settings);
+    heed_companions(work, answer);
     answer.note = contradictions(work.resolver, nullptr);
   }
   answer.flags = work.flags.words();
