@@ -9,8 +9,8 @@ namespace hz {
 /// Decadic logarithm of a planet's mass, from its radius, with 68 per cent half-widths.
 ///
 /// Units     planet_radius in Earth radii, above 0, not a limit; the result in dex of Earth masses.
-/// Validity  invertible below 14.31 Earth radii (131.58 Earth masses); larger planets are given 131.58 Earth masses, the
-///           least their size says.
+/// Validity  invertible below 14.31 Earth radii (131.58 Earth masses); larger planets are given 131.58 Earth masses,
+///           the least their size says.
 /// Error     the relation's scatter (4.03 or 14.6 per cent of the radius) and the radius's own half-widths, in
 ///           quadrature.
 /// Source    Chen & Kipping 2017, ApJ 834, 17, doi:10.3847/1538-4357/834/1/17, inverted.
