@@ -40,9 +40,10 @@ void set_aside(Answer& answer, const Problem& problem) {
   }
 }
 
-/// Why nothing led to a quantity, when relations that could have helped do not hold for the star.
+/// Why relations that could have helped were not used.
 std::string because(const Resolver& resolver) {
-  return resolver.barred().empty() ? std::string() : "; the star is " + resolver.barred();
+  const std::string why = resolver.off_main_sequence();
+  return why.empty() ? why : "; the star is " + why;
 }
 
 Problem no_teff(const Resolver& resolver) {
@@ -306,6 +307,16 @@ Measured averaged(const Measured& insolation, const Input& eccentricity) {
   return result;
 }
 
+/// What a planet of this mass measures on average; nothing for a mass that is itself a guess.
+std::optional<Derived> radius_from_mass(const Derived& mass) {
+  if (mass.route == assumed_route) return std::nullopt;
+  const Measured decadic = log_radius_from_mass(mass.measured);
+  const double radius = std::pow(10, decadic.value);
+  return Derived{{radius, radius - std::pow(10, decadic.value - decadic.minus.value_or(0)),
+                  std::pow(10, decadic.value + decadic.plus.value_or(0)) - radius, LimitMark::none, false},
+                 "planet_mass (Chen & Kipping 2017)"};
+}
+
 /// The planet's part. Returns the problem that sets the row aside, if any.
 std::optional<Problem> answer_planet(Work& work, Answer& answer) {
   Resolver& resolver = work.resolver;
@@ -334,6 +345,7 @@ std::optional<Problem> answer_planet(Work& work, Answer& answer) {
   planet.semi_major_axis = work.derived(Quantity::semi_major_axis);
   planet.planet_radius = work.derived(Quantity::planet_radius);
   planet.planet_mass = mass->derived;
+  if (!planet.planet_radius && !row.planet.planet_radius.stated) planet.planet_radius = radius_from_mass(mass->derived);
   judge(planet, input, row, work.settings);
   answer.note = contradictions(resolver, &planet.insolation.measured);
   answer.planet = std::move(planet);
