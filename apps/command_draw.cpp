@@ -53,7 +53,7 @@ std::vector<Candidate> typed_candidates(const Arguments& arguments, const Settin
 
 std::vector<Candidate> listed_candidates(const Arguments& arguments, const Settings& settings, Console& console) {
   AnsweredList list = answer_list(arguments.words()[1], arguments, settings, console);
-  for (const std::string& line : list.summary) console.say(line);
+  for (const std::string& line : list.joining) console.say(line);
   std::vector<Candidate> candidates = std::move(list.candidates);
   keep_one_row_a_planet(candidates);
   // A planet's other solutions are not missing from a figure.

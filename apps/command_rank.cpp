@@ -115,8 +115,9 @@ int run_rank(const Arguments& arguments, Console& console) {
     console.print(ranking_table(list.candidates, places, shown, choices.settings, console));
     console.print("\n" + wrapped(basis_sentence(choices.settings), terminal_width()) + "\n");
   }
-  for (const std::string& line : list.summary) console.say(line);
+  for (const std::string& line : list.joining) console.say(line);
   for (const std::string& line : ranking_summary(list.candidates, places, choices.settings)) console.say(line);
+  if (!list.differing_stars.empty()) console.say(list.differing_stars);
   const bool any_set_aside = std::any_of(list.candidates.begin(), list.candidates.end(),
                                          [](const Candidate& c) { return c.answer.status == Status::set_aside; });
   return arguments.has("strict") && any_set_aside ? exit_code::rows_set_aside : exit_code::done;

@@ -60,7 +60,7 @@ struct UnansweredList {
   std::vector<Quantity> stated;      // what the list speaks of
   std::vector<ColumnHead> kept;      // heads of the cells that travel along
   std::string planets;               // the file that names the planets
-  std::vector<std::string> summary;  // what joining found, in lines
+  std::vector<std::string> joining;  // what joining found, in lines; none for one list
 };
 
 }  // namespace hz::app

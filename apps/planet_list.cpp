@@ -49,18 +49,20 @@ void add_words(std::string& text, const std::string& words) {
 }
 
 std::string conflict_line(const std::vector<StarConflict>& conflicts) {
+  if (conflicts.empty()) return "";
   std::map<std::string, std::size_t> counts;
   std::size_t rows = 0;
   for (const StarConflict& conflict : conflicts) {
     rows += conflict.rows.size();
     for (const Quantity quantity : conflict.quantities) ++counts[std::string(name(quantity))];
   }
-  return fmt::format("{} whose rows state different values ({}): {}", counted(conflicts.size(), "star"),
+  return fmt::format("stars whose rows state different values: {} ({}; {})", count_text(conflicts.size()),
                      counted(rows, "row"), most_frequent_first(counts));
 }
 
-/// Rows of one star that differ are flagged and, if the user wants it so, given one star.
-void compare_stars(UnansweredList& list, OneStar choice) {
+/// Rows of one star that differ are flagged and, if the user wants it so, given one star. Returns a line that counts
+/// them.
+std::string compare_stars(UnansweredList& list, OneStar choice) {
   const StarsCompared compared = hz::compare_stars(list.candidates, choice);
   for (const StarConflict& conflict : compared.conflicts) {
     for (const std::size_t row : conflict.rows) {
@@ -72,7 +74,7 @@ void compare_stars(UnansweredList& list, OneStar choice) {
     const std::optional<std::size_t> source = compared.taken_from[row];
     if (source) add_words(list.remarks[row].note, "star values of " + place_in_file(list.candidates[*source].row));
   }
-  if (!compared.conflicts.empty()) list.summary.push_back(conflict_line(compared.conflicts));
+  return conflict_line(compared.conflicts);
 }
 
 /// A planet that found no star is answered from what its own row says of it, if that is enough.
@@ -121,10 +123,10 @@ AnsweredList answer_list(const std::string& path, const Arguments& arguments, co
   const OneStar choice = one_star_choice(arguments);  // a wrong word is told before the work
   UnansweredList list = arguments.has("planets") ? read_two_lists(path, arguments, console, written)
                                                  : read_one_list(path, arguments, console, written);
-  compare_stars(list, choice);
+  std::string differing_stars = compare_stars(list, choice);
   answer_rows(list, settings, console, wanted);
-  return {std::move(list.candidates), std::move(list.stated), std::move(list.kept), std::move(list.planets),
-          std::move(list.summary)};
+  return {std::move(list.candidates), std::move(list.stated),  std::move(list.kept),
+          std::move(list.planets),    std::move(list.joining), std::move(differing_stars)};
 }
 
 }  // namespace hz::app

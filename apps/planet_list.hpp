@@ -18,7 +18,8 @@ struct AnsweredList {
   std::vector<Quantity> stated;       // what the list speaks of
   std::vector<ColumnHead> kept;       // heads of the cells that travel along
   std::string planets;                // the file that names the planets
-  std::vector<std::string> summary;   // what joining two lists and comparing the stars' rows found, in lines
+  std::vector<std::string> joining;   // what joining two lists found, in lines; none for one list
+  std::string differing_stars;        // stars whose rows state different values, counted; empty when there are none
 };
 
 /// Reads every row of the list, joined with --planets if that is given, and answers it. `written` are the names of the

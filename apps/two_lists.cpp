@@ -57,14 +57,31 @@ std::vector<std::size_t> identifier_columns(const std::vector<JoinWay>& ways, st
   return columns;
 }
 
+bool has_column(const OpenList& list, const std::string& name) {
+  const std::vector<ColumnHead>& columns = list.reader->head().columns;
+  return std::any_of(columns.begin(), columns.end(), [&](const ColumnHead& column) { return column.name == name; });
+}
+
+void refuse_swapped(const JoinWay& way, const OpenList& planets, const OpenList& stars) {
+  if (has_column(planets, way.planet_column) || !has_column(planets, way.star_column)) return;
+  if (!has_column(stars, way.planet_column)) return;
+  throw Error(Fault::usage, fmt::format("--join {0}={1}: the column of the list of planets comes first: {1}={0}",
+                                        way.planet_column, way.star_column));
+}
+
+void refuse_without_star_names(const OpenList& list) {
+  if (list.understanding.knows(Quantity::star)) return;
+  throw Error(Fault::usage, fmt::format("{} has no column of star names to join on; name a column of each list with "
+                                        "--join HOST=NAME",
+                                        list.reader->head().source));
+}
+
 /// A way must find its columns in both lists.
-void check_way(const JoinWay& way, const OpenList& list) {
-  if (way.kind == JoinWay::Kind::star_names && !list.understanding.knows(Quantity::star)) {
-    throw Error(Fault::usage,
-                fmt::format("{} has no column of star names to join on; name a column of each list with --join "
-                            "HOST=NAME",
-                            list.reader->head().source));
-  }
+void check_way(const JoinWay& way, const OpenList& planets, const OpenList& stars) {
+  if (way.kind == JoinWay::Kind::columns) refuse_swapped(way, planets, stars);
+  if (way.kind != JoinWay::Kind::star_names) return;
+  refuse_without_star_names(planets);
+  refuse_without_star_names(stars);
 }
 
 /// For each way of joining, the names of every row.
@@ -90,6 +107,10 @@ JoinSide read_side(const OpenList& list, const RowReading& reading, const std::v
   side.file = list.reader->head().source;
   side.names = names_of(rows, ways, list.map);
   side.candidates = std::move(rows.candidates);
+  for (Candidate& candidate : side.candidates) {  // a line's number alone does not say in which list
+    if (candidate.row.problem)
+      candidate.row.problem->what = fmt::format("{}: {}", side.file, candidate.row.problem->what);
+  }
   return side;
 }
 
@@ -97,10 +118,7 @@ JoinedSides read_sides(const OpenList& stars, const OpenList& planets, const Kep
                        const Arguments& arguments, const Console& console) {
   JoinedSides sides;
   sides.ways = read_join_ways(arguments);
-  for (const JoinWay& way : sides.ways) {
-    check_way(way, planets);
-    check_way(way, stars);
-  }
+  for (const JoinWay& way : sides.ways) check_way(way, planets, stars);
   const TableHead& planet_head = planets.reader->head();
   const RowReading of_planets{kept.of_planets, read_preference(arguments, planet_head),
                               identifier_columns(sides.ways, &JoinWay::planet_column, planet_head)};
@@ -149,7 +167,7 @@ void give_star(ListRow& planet, const ListRow& star) {
 std::string other_name(const ListRow& planet, const ListRow& star) {
   const std::string& name = planet.star.name;
   const bool same = name.empty() || folded_name(name) == folded_name(star.star.name);
-  return same ? "" : fmt::format("`{}` in the list of planets", name);
+  return same ? "" : fmt::format("the list of planets calls its star `{}`", name);
 }
 
 void add_planets(JoinedSides& sides, const Joiner& joiner, UnansweredList& list) {
@@ -211,7 +229,7 @@ UnansweredList read_two_lists(const std::string& stars_path, const Arguments& ar
   list.stated = stated_by_both(stars, planets);
   list.kept = heads_of(kept.of_planets);
   list.planets = planets_path;
-  list.summary = join_summary(sides, joiner);
+  list.joining = join_summary(sides, joiner);
   add_planets(sides, joiner, list);
   add_stars_without_planets(sides, joiner, list);
   return list;

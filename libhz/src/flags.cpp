@@ -23,7 +23,9 @@ constexpr FlagInfo infos[] = {
      "the lower half-width is larger than the value; the distribution is cut where the quantity ends, at 0"},
     {flag::limit_ignored, "this quantity is only a limit; another route was taken"},
     {flag::inconsistent,
-     "the list states this quantity twice, beyond 3 sigma and 10 % apart; both values stand in the note"},
+     "the list states this quantity twice, beyond 3 sigma and 10 % apart; star: its rows give the star different "
+     "values; "
+     "both values stand in the note"},
 };
 
 }  // namespace

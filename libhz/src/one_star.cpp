@@ -30,13 +30,13 @@ constexpr auto compared = std::to_array<Compared>({
 
 using Rows = std::vector<std::size_t>;
 
-/// The rows of each named star, in the order in which the stars first appear.
+/// The planets of each named star, in the order in which the stars first appear.
 std::vector<Rows> rows_by_star(const std::vector<Candidate>& candidates) {
   std::map<std::string, std::size_t> known;
   std::vector<Rows> stars;
   for (std::size_t row = 0; row < candidates.size(); ++row) {
     const std::string name = folded_name(candidates[row].row.star.name);
-    if (name.empty()) continue;
+    if (name.empty() || !is_planet(candidates[row].row)) continue;
     const auto [at, is_new] = known.emplace(name, stars.size());
     if (is_new) stars.emplace_back();
     stars[at->second].push_back(row);

@@ -22,6 +22,7 @@ Field stated(double value, std::optional<double> error = std::nullopt, LimitMark
 
 Candidate planet_of(const std::string& star, Field teff, Field radius = {}, Field mass = {}) {
   Candidate candidate;
+  candidate.row.planet.name = "any";
   candidate.row.star.name = star;
   candidate.row.star.teff = std::move(teff);
   candidate.row.star.stellar_radius = std::move(radius);
@@ -45,8 +46,7 @@ TEST(CompareStars, ReportsTheStarsWhoseRowsDiffer) {
 }
 
 TEST(CompareStars, LuminosityAndItsLogarithmCountAsStated) {
-  std::vector<Candidate> rows(4);
-  for (Candidate& row : rows) row.row.star.name = "Lantern 1";
+  std::vector<Candidate> rows(4, planet_of("Lantern 1", {}));
   rows[0].row.star.luminosity = stated(1);
   rows[1].row.star.log_luminosity = stated(0);
   rows[2].row.star.log_luminosity = stated(0.01);
@@ -60,6 +60,13 @@ TEST(CompareStars, LimitsMissingValuesAndUnitConversionsAreNoConflict) {
                               planet_of("a", stated(4000, {}, LimitMark::lower), {}, stated(0.7 * (1 + 1e-15))),
                               planet_of("a", {}), planet_of("", stated(5000)), planet_of("", stated(6000))};
   EXPECT_THAT(compare_stars(rows, OneStar::as_given).conflicts, IsEmpty());
+}
+
+TEST(CompareStars, RowsWithoutAPlanetAreLeftAlone) {
+  std::vector<Candidate> rows{planet_of("a", stated(5000)), planet_of("a", stated(6000))};
+  rows[1].row.planet.name.clear();
+  EXPECT_THAT(compare_stars(rows, OneStar::first).conflicts, IsEmpty());
+  EXPECT_EQ(teff_of(rows[1]), 6000);
 }
 
 TEST(CompareStars, FirstGivesAllRowsTheFirstStarThatSaysAnything) {

@@ -11,7 +11,7 @@
 
 namespace hz {
 
-/// Which star the rows of one star are answered with.
+/// Which star the planets of one star are answered with.
 enum class OneStar {
   as_given,  // each with its own
   first,     // all with that of the first row that states any of compared_star_values()
@@ -22,9 +22,9 @@ enum class OneStar {
 /// teff, luminosity, log_luminosity, stellar_radius, stellar_mass: by these are the rows of a star compared.
 [[nodiscard]] std::span<const Quantity> compared_star_values();
 
-/// A star whose rows state different values of one quantity or more; limits are not compared.
+/// A star whose planets' rows state different values of one quantity or more; limits are not compared.
 struct StarConflict {
-  std::vector<std::size_t> rows;     // all of the star's, in list order
+  std::vector<std::size_t> rows;     // all of its planets', in list order
   std::vector<Quantity> quantities;  // those that differ
   std::string what;                  // "teff 5100 to 5230, stellar_mass 0.9 to 1.1"
 };
@@ -35,9 +35,9 @@ struct StarsCompared {
   std::vector<std::optional<std::size_t>> taken_from;  // a row: where its star now comes from, if that changed a value
 };
 
-/// Compares the rows of each star (rows of one name as folded_name() has it; rows without a name are a star each) and,
-/// if so chosen, gives all of them one whole star record; the names stay as each row spells them. For rows that are not
-/// answered yet: answers are left alone. O(n log n).
+/// Compares the rows of each star's planets and, if so chosen, gives all of them one whole star record; the names stay
+/// as each row spells them. One star is one name as folded_name() has it; rows without a star's name are left alone, and
+/// so are stars without planets. For rows that are not answered yet: answers are not looked at. O(n log n).
 [[nodiscard]] StarsCompared compare_stars(std::vector<Candidate>& candidates, OneStar choice);
 
 }  // namespace hz
