@@ -14,23 +14,28 @@ namespace {
 /// "is called `Lantern 4`" of one star, "are called `Lantern 4`" of several.
 std::string fitting(const JoinedSides& sides, std::size_t way_index, std::size_t planet, bool several) {
   const JoinWay& way = sides.ways[way_index];
-  if (way.kind == JoinWay::Kind::sky) return fmt::format("{} within {}", several ? "lie" : "lies", way.typed);
+  if (way.kind == JoinWay::Kind::sky)
+    return several ? fmt::format("lie about as near, within {}", way.typed) : "lies within " + way.typed;
   const std::string name = fmt::format("{}", fmt::join(sides.planets.names[way_index][planet], "; "));
   if (way.kind == JoinWay::Kind::star_names) return fmt::format("{} called `{}`", several ? "are" : "is", name);
   return fmt::format("{} `{}` under {}", several ? "have" : "has", name, way.star_column);
 }
 
 bool has_something_to_find(const JoinedSides& sides, std::size_t way, std::size_t planet) {
+  if (sides.ways[way].kind == JoinWay::Kind::sky) return sides.planets.positions[planet].has_value();
   return !sides.planets.names[way][planet].empty();
 }
 
-std::string sought_under(const JoinWay& way) {
-  switch (way.kind) {
-    case JoinWay::Kind::star_names: return "name of a star";
-    case JoinWay::Kind::columns: return way.planet_column;
-    case JoinWay::Kind::sky: return "position";
-  }
-  return "";
+bool is_unreadable(const Result<SkyPosition>& position) {
+  return !position && position.error().code != ProblemCode::missing;
+}
+
+std::string what_is_lacking(const JoinedSides& sides, std::size_t way_index, std::size_t planet) {
+  const JoinWay& way = sides.ways[way_index];
+  if (way.kind == JoinWay::Kind::star_names) return "no name of a star";
+  if (way.kind == JoinWay::Kind::columns) return "no " + way.planet_column;
+  const Result<SkyPosition>& position = sides.planets.positions[planet];
+  return is_unreadable(position) ? fmt::format("no position ({})", position.error().what) : "no position";
 }
 
 std::string none_fits(const JoinedSides& sides, std::size_t planet) {
@@ -40,10 +45,10 @@ std::string none_fits(const JoinedSides& sides, std::size_t planet) {
     if (has_something_to_find(sides, way, planet)) {
       tried.push_back(fitting(sides, way, planet, false));
     } else {
-      lacking.push_back(sought_under(sides.ways[way]));
+      lacking.push_back(what_is_lacking(sides, way, planet));
     }
   }
-  if (tried.empty()) return fmt::format("the row has no {} to find its star by", fmt::join(lacking, ", no "));
+  if (tried.empty()) return fmt::format("the row has {} to find its star by", fmt::join(lacking, ", "));
   return fmt::format("no star of {} {}", sides.stars.file, fmt::join(tried, " or "));
 }
 
@@ -96,6 +101,22 @@ Remark why_no_star(const JoinedSides& sides, std::size_t planet, const StarFit& 
   remark.no_star = several ? several_fit(sides, planet, fit) : none_fits(sides, planet);
   remark.no_star_kind = several ? "several stars fit" : "no star found";
   return remark;
+}
+
+std::string star_note(const JoinedSides& sides, std::size_t star, Standing standing) {
+  if (standing == Standing::ambiguous)
+    return fmt::format("a planet of {} fits this star and others", sides.planets.file);
+  const bool told = !sides.stars.positions.empty() && !sides.stars.candidates[star].row.problem;
+  return told && is_unreadable(sides.stars.positions[star]) ? sides.stars.positions[star].error().what : "";
+}
+
+std::string match_note(const JoinedSides& sides, std::size_t planet, const StarFit& fit) {
+  const std::string& name = sides.planets.candidates[planet].row.star.name;
+  const std::string& star = sides.stars.candidates[fit.stars.front()].row.star.name;
+  std::string note;
+  if (fit.distance) note = fmt::format("star found {} arcsec away", short_number(rounded(*fit.distance, 2)));
+  if (name.empty() || folded_name(name) == folded_name(star)) return note;
+  return fmt::format("{}{}the list of planets calls its star `{}`", note, note.empty() ? "" : "; ", name);
 }
 
 std::vector<std::string> join_summary(const JoinedSides& sides, const Joiner& joiner) {

@@ -47,85 +47,30 @@ KeptOfBoth kept_of_both(const Arguments& arguments, const TableHead& planets, co
   return kept;
 }
 
-/// The columns of one list that names are joined on, in the order of the ways.
-std::vector<std::size_t> identifier_columns(const std::vector<JoinWay>& ways, std::string JoinWay::*name,
-                                            const TableHead& head) {
-  std::vector<std::size_t> columns;
-  for (const JoinWay& way : ways) {
-    if (way.kind == JoinWay::Kind::columns) columns.push_back(column_named("join", way.*name, head));
-  }
-  return columns;
-}
-
 bool has_column(const OpenList& list, const std::string& name) {
   const std::vector<ColumnHead>& columns = list.reader->head().columns;
   return std::any_of(columns.begin(), columns.end(), [&](const ColumnHead& column) { return column.name == name; });
 }
 
 void refuse_swapped(const JoinWay& way, const OpenList& planets, const OpenList& stars) {
+  if (way.kind != JoinWay::Kind::columns) return;
   if (has_column(planets, way.planet_column) || !has_column(planets, way.star_column)) return;
   if (!has_column(stars, way.planet_column)) return;
   throw Error(Fault::usage, fmt::format("--join {0}={1}: the column of the list of planets comes first: {1}={0}",
                                         way.planet_column, way.star_column));
 }
 
-void refuse_without_star_names(const OpenList& list) {
-  if (list.understanding.knows(Quantity::star)) return;
-  throw Error(Fault::usage, fmt::format("{} has no column of star names to join on; name a column of each list with "
-                                        "--join HOST=NAME",
-                                        list.reader->head().source));
-}
-
-/// A way must find its columns in both lists.
-void check_way(const JoinWay& way, const OpenList& planets, const OpenList& stars) {
-  if (way.kind == JoinWay::Kind::columns) refuse_swapped(way, planets, stars);
-  if (way.kind != JoinWay::Kind::star_names) return;
-  refuse_without_star_names(planets);
-  refuse_without_star_names(stars);
-}
-
-/// For each way of joining, the names of every row.
-std::vector<std::vector<Aliases>> names_of(const ListRows& rows, const std::vector<JoinWay>& ways,
-                                           const ColumnMap& map) {
-  std::vector<std::vector<Aliases>> names(ways.size());
-  std::size_t identifier = 0;
-  for (std::size_t way = 0; way < ways.size(); ++way) {
-    const bool by_column = ways[way].kind == JoinWay::Kind::columns;
-    for (std::size_t row = 0; row < rows.candidates.size(); ++row) {
-      names[way].push_back(aliases_of(
-          by_column ? rows.identifiers[row][identifier] : rows.candidates[row].row.star.name, map.missing_values));
-    }
-    if (by_column) ++identifier;
-  }
-  return names;
-}
-
-JoinSide read_side(const OpenList& list, const RowReading& reading, const std::vector<JoinWay>& ways,
-                   const Console& console) {
-  ListRows rows = read_rows(list, reading, console);
-  JoinSide side;
-  side.file = list.reader->head().source;
-  side.names = names_of(rows, ways, list.map);
-  side.candidates = std::move(rows.candidates);
-  for (Candidate& candidate : side.candidates) {  // a line's number alone does not say in which list
-    if (candidate.row.problem)
-      candidate.row.problem->what = fmt::format("{}: {}", side.file, candidate.row.problem->what);
-  }
-  return side;
-}
-
 JoinedSides read_sides(const OpenList& stars, const OpenList& planets, const KeptOfBoth& kept,
                        const Arguments& arguments, const Console& console) {
   JoinedSides sides;
   sides.ways = read_join_ways(arguments);
-  for (const JoinWay& way : sides.ways) check_way(way, planets, stars);
-  const TableHead& planet_head = planets.reader->head();
-  const RowReading of_planets{kept.of_planets, read_preference(arguments, planet_head),
-                              identifier_columns(sides.ways, &JoinWay::planet_column, planet_head)};
-  const RowReading of_stars{kept.of_stars, std::nullopt,
-                            identifier_columns(sides.ways, &JoinWay::star_column, stars.reader->head())};
-  sides.planets = read_side(planets, of_planets, sides.ways, console);
-  sides.stars = read_side(stars, of_stars, sides.ways, console);
+  for (const JoinWay& way : sides.ways) refuse_swapped(way, planets, stars);
+  const RowReading of_planets{kept.of_planets, read_preference(arguments, planets.reader->head()), {}};
+  const RowReading of_stars{kept.of_stars, std::nullopt, {}};
+  const JoinSideReading planet_side(planets, sides.ways, &JoinWay::planet_column, of_planets);
+  const JoinSideReading star_side(stars, sides.ways, &JoinWay::star_column, of_stars);
+  sides.planets = planet_side.read(console);
+  sides.stars = star_side.read(console);
   return sides;
 }
 
@@ -147,10 +92,24 @@ void make_stars(std::vector<Candidate>& stars) {
   }
 }
 
+std::vector<std::optional<SkyPosition>> known_positions(const std::vector<Result<SkyPosition>>& positions) {
+  std::vector<std::optional<SkyPosition>> known;
+  for (const Result<SkyPosition>& position : positions)
+    known.push_back(position ? std::optional(*position) : std::nullopt);
+  return known;
+}
+
 Joiner join(const JoinedSides& sides, NameMatching matching) {
   Joiner joiner(sides.planets.candidates.size(), sides.stars.candidates.size());
-  for (std::size_t way = 0; way < sides.ways.size(); ++way)
-    joiner.by_name(sides.planets.names[way], sides.stars.names[way], matching);
+  const auto planets = known_positions(sides.planets.positions);
+  const auto stars = known_positions(sides.stars.positions);
+  for (std::size_t way = 0; way < sides.ways.size(); ++way) {
+    if (sides.ways[way].kind == JoinWay::Kind::sky) {
+      joiner.by_position(planets, stars, sides.ways[way].tolerance);
+    } else {
+      joiner.by_name(sides.planets.names[way], sides.stars.names[way], matching);
+    }
+  }
   return joiner;
 }
 
@@ -163,13 +122,6 @@ void give_star(ListRow& planet, const ListRow& star) {
   }
 }
 
-/// What the planet's row calls its star, where that is none of the star's own names.
-std::string other_name(const ListRow& planet, const ListRow& star) {
-  const std::string& name = planet.star.name;
-  const bool same = name.empty() || folded_name(name) == folded_name(star.star.name);
-  return same ? "" : fmt::format("the list of planets calls its star `{}`", name);
-}
-
 void add_planets(JoinedSides& sides, const Joiner& joiner, UnansweredList& list) {
   for (std::size_t i = 0; i < sides.planets.candidates.size(); ++i) {
     const StarFit& fit = joiner.planets()[i];
@@ -177,7 +129,7 @@ void add_planets(JoinedSides& sides, const Joiner& joiner, UnansweredList& list)
     if (fit.standing != Standing::matched) continue;
     ListRow& planet = sides.planets.candidates[i].row;
     const ListRow& star = sides.stars.candidates[fit.stars.front()].row;
-    list.remarks.back().note = other_name(planet, star);
+    list.remarks.back().note = match_note(sides, i, fit);
     give_star(planet, star);
   }
   list.candidates = std::move(sides.planets.candidates);
@@ -188,12 +140,11 @@ void add_stars_without_planets(JoinedSides& sides, const Joiner& joiner, Unanswe
   const std::size_t planets = list.candidates.size();
   for (std::size_t i = 0; i < sides.stars.candidates.size(); ++i) {
     if (joiner.stars()[i] == Standing::matched) continue;
+    const std::string note = star_note(sides, i, joiner.stars()[i]);
     Candidate& star = sides.stars.candidates[i];
     star.row.number += planets;
     list.candidates.push_back(std::move(star));
-    list.remarks.emplace_back();
-    if (joiner.stars()[i] == Standing::ambiguous)
-      list.remarks.back().note = fmt::format("a planet of {} fits this star and others", sides.planets.file);
+    list.remarks.push_back({{}, note, {}, {}});
   }
 }
 

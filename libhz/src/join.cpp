@@ -62,6 +62,44 @@ std::vector<std::size_t> first_of(const std::vector<Namesakes*>& groups) {
   return stars;
 }
 
+/// Stars that lie so near to a position are as near as each other.
+constexpr double indistinct = 0.1;  // arcsec
+
+/// The stars with a position, for finding those near a planet.
+class StarFinder {
+public:
+  explicit StarFinder(std::span<const std::optional<SkyPosition>> stars)
+      : star_of_(with_position(stars)), index_(positions(stars, star_of_)) {}
+
+  /// The nearest star within the tolerance with those that are about as near; the nearest first.
+  [[nodiscard]] std::vector<SkyIndex::Match> about_as_near(const SkyPosition& place, double tolerance) const {
+    std::vector<SkyIndex::Match> found = index_.matches(place, tolerance);
+    if (found.empty()) return found;
+    const double reach = std::max(2 * found.front().distance, indistinct);
+    std::erase_if(found, [&](const SkyIndex::Match& match) { return match.distance > reach; });
+    for (SkyIndex::Match& match : found) match.index = star_of_[match.index];
+    return found;
+  }
+
+private:
+  static std::vector<std::size_t> with_position(std::span<const std::optional<SkyPosition>> stars) {
+    std::vector<std::size_t> rows;
+    for (std::size_t star = 0; star < stars.size(); ++star) {
+      if (stars[star]) rows.push_back(star);
+    }
+    return rows;
+  }
+  static std::vector<SkyPosition> positions(std::span<const std::optional<SkyPosition>> stars,
+                                            const std::vector<std::size_t>& rows) {
+    std::vector<SkyPosition> places;
+    for (const std::size_t row : rows) places.push_back(*stars[row]);
+    return places;
+  }
+
+  std::vector<std::size_t> star_of_;
+  SkyIndex index_;
+};
+
 bool says(const Field& field) { return field.stated || field.problem; }
 
 /// Two forms of one quantity.
@@ -111,6 +149,24 @@ void Joiner::by_name(std::span<const Aliases> planets, std::span<const Aliases> 
   for (const auto& [name, group] : index) {
     if (!group.disputed) continue;
     for (const std::size_t star : group.stars) dispute(star);
+  }
+  ++ways_;
+}
+
+void Joiner::by_position(std::span<const std::optional<SkyPosition>> planets,
+                         std::span<const std::optional<SkyPosition>> stars, double tolerance) {
+  HZ_REQUIRE(planets.size() == planets_.size() && stars.size() == stars_.size());
+  const StarFinder finder(stars);
+  for (std::size_t i = 0; i < planets.size(); ++i) {
+    if (planets_[i].standing != Standing::unmatched || !planets[i]) continue;
+    const std::vector<SkyIndex::Match> near = finder.about_as_near(*planets[i], tolerance);
+    std::vector<std::size_t> fits;
+    for (const SkyIndex::Match& match : near) fits.push_back(match.index);
+    if (fits.size() > 1) std::for_each(fits.begin(), fits.end(), [&](std::size_t star) { dispute(star); });
+    fits.resize(std::min(most_fits, fits.size()));
+    std::sort(fits.begin(), fits.end());
+    settle(planets_[i], std::move(fits));
+    if (planets_[i].standing == Standing::matched) planets_[i].distance = near.front().distance;
   }
   ++ways_;
 }

@@ -1,12 +1,14 @@
 // Which star of one list is the host of which planet of another: by name, or by place on the sky.
 #pragma once
 #include <cstddef>
+#include <optional>
 #include <span>
 #include <string>
 #include <string_view>
 #include <vector>
 
 #include "hz/records.hpp"
+#include "hz/sky.hpp"
 
 namespace hz {
 
@@ -32,6 +34,7 @@ struct StarFit {
   Standing standing = Standing::unmatched;
   std::size_t way = 0;             // by which call, counted from 0, the planet was found to fit
   std::vector<std::size_t> stars;  // matched: the one; ambiguous: two or three of those it fits, in list order
+  std::optional<double> distance;  // arcsec to that star, where a position told it
 };
 
 /// Joins the planets of one list to the stars of another, one way after another: a planet that fits any star by one way
@@ -42,6 +45,12 @@ public:
 
   /// A planet fits the stars with which it shares any name. Both lists in full length; O(n) in the number of names.
   void by_name(std::span<const Aliases> planets, std::span<const Aliases> stars, NameMatching matching);
+
+  /// A planet fits the star nearest to it, if that lies within `tolerance` arcsec. It fits others as well, and is
+  /// ambiguous, if they lie within the tolerance and not more than twice as far, or within 0.1 arcsec like the nearest:
+  /// positions of different epochs or precision cannot tell those apart. Rows without a position fit nothing.
+  void by_position(std::span<const std::optional<SkyPosition>> planets,
+                   std::span<const std::optional<SkyPosition>> stars, double tolerance);
 
   [[nodiscard]] const std::vector<StarFit>& planets() const { return planets_; }
   [[nodiscard]] const std::vector<Standing>& stars() const { return stars_; }
