@@ -75,10 +75,10 @@ std::vector<Quantity> stated_quantities(const Understanding& understanding) {
   return stated;
 }
 
-void refuse_unusable(std::span<const Quantity> stated, std::span<const Quantity> needed, const std::string& file) {
+void refuse_unusable(std::span<const Quantity> stated, const std::string& file) {
+  const ListRow nothing;
   const bool usable = std::any_of(stated.begin(), stated.end(), [&](Quantity quantity) {
-    return (is_numeric(quantity) || quantity == Quantity::spectral_type) &&
-           std::find(needed.begin(), needed.end(), quantity) != needed.end();
+    return quantity == Quantity::spectral_type || stated_field(nothing, quantity) != nullptr;
   });
   if (usable) return;
   throw Error(Fault::input, fmt::format("{0} has no column that hzmap can use; `hzmap columns {0}` shows how each is "

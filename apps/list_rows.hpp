@@ -43,7 +43,7 @@ struct ListRows {
 [[nodiscard]] std::vector<Quantity> stated_quantities(const Understanding& understanding);
 
 /// Throws hz::Error (input) when a list states none of the `needed` quantities as a number or spectral type.
-void refuse_unusable(std::span<const Quantity> stated, std::span<const Quantity> needed, const std::string& file);
+void refuse_unusable(std::span<const Quantity> stated, const std::string& file);
 
 /// What joining lists or comparing rows says of a row, on its way to the answer.
 struct Remark {

@@ -27,7 +27,7 @@ UnansweredList read_one_list(const std::string& path, const Arguments& arguments
   UnansweredList unanswered;
   unanswered.planets = path;
   unanswered.stated = stated_quantities(list.understanding);
-  refuse_unusable(unanswered.stated, planet_inputs(), head.source);
+  refuse_unusable(unanswered.stated, head.source);
   RowReading reading;
   if (arguments.knows("keep")) reading.kept = kept_columns(arguments, head, written);
   reading.preference = read_preference(arguments, head);

@@ -166,8 +166,8 @@ UnansweredList read_two_lists(const std::string& stars_path, const Arguments& ar
   refuse_one_input_for_both(stars_path, planets_path);
   const OpenList stars = open_list(stars_path, arguments, star_inputs());
   const OpenList planets = open_list(planets_path, arguments, planet_inputs(), "planet-columns");
-  refuse_unusable(stated_quantities(stars.understanding), star_inputs(), stars.reader->head().source);
-  refuse_unusable(stated_quantities(planets.understanding), planet_inputs(), planets.reader->head().source);
+  refuse_unusable(stated_quantities(stars.understanding), stars.reader->head().source);
+  refuse_unusable(stated_quantities(planets.understanding), planets.reader->head().source);
   const KeptOfBoth kept = arguments.knows("keep")
                               ? kept_of_both(arguments, planets.reader->head(), stars.reader->head(), written)
                               : KeptOfBoth{};
