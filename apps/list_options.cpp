@@ -8,6 +8,7 @@
 #include "closest.hpp"
 #include "files.hpp"
 #include "hz/error.hpp"
+#include "missing_values.hpp"
 
 namespace hz::app {
 namespace {
@@ -15,6 +16,8 @@ namespace {
 constexpr auto reading_table = std::to_array<Option>({
     {"columns", '\0', OptionKind::value, "MAP.toml", OptionGroup::input,
      "how the columns are to be understood; `hzmap columns LIST --write MAP.toml` writes one to edit"},
+    {"missing-value", '\0', OptionKind::list, "QUANTITY=N,...", OptionGroup::input,
+     "numbers that stand for no value of a quantity, such as parallax=0,-1; may be given again"},
 });
 
 constexpr auto writing_table = std::to_array<Option>({
@@ -59,7 +62,10 @@ std::size_t column_named(const std::string& name, const TableHead& input) {
 
 ColumnMap column_map(const Arguments& arguments) {
   const std::optional<std::string> file = arguments.value("columns");
-  return file ? ColumnMap::parse(read_text_file(*file), *file) : ColumnMap{};
+  ColumnMap map = file ? ColumnMap::parse(read_text_file(*file), *file) : ColumnMap{};
+  const auto missing = read_missing_values(arguments.values("missing-value"));
+  map.missing_numbers.insert(map.missing_numbers.end(), missing.begin(), missing.end());
+  return map;
 }
 
 }  // namespace
@@ -70,14 +76,14 @@ std::span<const Option> writing_options() { return writing_table; }
 OpenList open_list(const std::string& path, const Arguments& arguments, std::span<const Quantity> needed) {
   const std::optional<std::string> output = arguments.knows("output") ? arguments.value("output") : std::nullopt;
   if (output && *output != "-" && path != "-") refuse_to_overwrite(path, *output);
-  OpenList list{column_map(arguments), open_table(path), {}};
-  list.understanding = Understanding::of(list.reader->head(), list.map, needed);
+  OpenList list{column_map(arguments), std::make_unique<PeekedTable>(open_table(path)), {}};
+  list.understanding = Understanding::of(list.reader->head(), list.map, needed, list.reader->peek());
   return list;
 }
 
 OpenList open_draft(const std::string& path, const Arguments& arguments) {
-  OpenList list{column_map(arguments), open_table(path), {}};
-  list.understanding = Understanding::draft(list.reader->head(), list.map);
+  OpenList list{column_map(arguments), std::make_unique<PeekedTable>(open_table(path)), {}};
+  list.understanding = Understanding::draft(list.reader->head(), list.map, planet_inputs(), list.reader->peek());
   return list;
 }
 

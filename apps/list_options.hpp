@@ -6,27 +6,29 @@
 #include <string>
 #include <vector>
 
+#include "hz/table/peeked_table.hpp"
 #include "hz/table/table.hpp"
 #include "hz/table/understanding.hpp"
 #include "options.hpp"
 
 namespace hz::app {
 
-[[nodiscard]] std::span<const Option> reading_options();  // --columns
+[[nodiscard]] std::span<const Option> reading_options();  // --columns, --missing-value
 [[nodiscard]] std::span<const Option> writing_options();  // --output, --keep, --strict
 
 /// A list, opened and understood.
 struct OpenList {
   ColumnMap map;
-  std::unique_ptr<TableReader> reader;
+  std::unique_ptr<PeekedTable> reader;
   Understanding understanding;
 };
 
 /// Opens the list at `path` ("-" is standard input) with the user's column map, if one is given. A doubt about a column
-/// of a `needed` quantity stops the work. Throws hz::Error: input, or usage for an -o that names the list itself.
+/// of a `needed` quantity stops the work, and so do implausible numbers in the first rows. Throws hz::Error: input, or
+/// usage for an -o that names the list itself.
 [[nodiscard]] OpenList open_list(const std::string& path, const Arguments& arguments, std::span<const Quantity> needed);
 
-/// The same, doubtful columns being left unused: for telling how a list is understood.
+/// The same, with doubts instead of an error: for telling how a list is understood.
 [[nodiscard]] OpenList open_draft(const std::string& path, const Arguments& arguments);
 
 /// A column of the input that travels along.

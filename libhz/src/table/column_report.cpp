@@ -124,6 +124,7 @@ std::string starter_map(const TableHead& head, const Understanding& understandin
   if (!understanding.doubts().empty()) out += "\n# To be decided, one line of each:\n" + doubt_lines(understanding);
   if (!understanding.others().empty())
     out += "\n# Not used, as in  teff = { column = \"…\", unit = \"K\" }:\n" + unused_lines(head, understanding);
+  out += "\n# Numbers that stand for \"no value\" of one quantity:\n# [missing_values]\n# parallax = [0, -1]\n";
   return out;
 }
 
