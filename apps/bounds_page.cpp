@@ -7,6 +7,7 @@
 #include <limits>
 
 #include "aligned_table.hpp"
+#include "derivation.hpp"
 #include "flag_text.hpp"
 #include "hz/require.hpp"
 #include "numbers.hpp"
@@ -98,18 +99,18 @@ std::string first_sentence(const Answer& answer) {
 
 void add_value(std::string& text, const char* name, const std::optional<Derived>& derived, const char* unit) {
   if (!derived) return;
-  const std::string route = derived->route == "stated" ? "" : " (" + derived->route + ")";
-  text += fmt::format("{}{} {} {}{}", text.empty() ? "" : ", ", name, measured_text(derived->measured), unit, route);
+  text += fmt::format("{}{} {} {}", text.empty() ? "" : ", ", name, measured_text(derived->measured), unit);
 }
 
 std::string star_line(const ListRow& row, const Answer& answer) {
   std::string values;
   add_value(values, "Teff", answer.star.teff, "K");
   add_value(values, "L", answer.star.luminosity, "L\u2609");
+  add_value(values, "radius", answer.star.stellar_radius, "R\u2609");
   add_value(values, "mass", answer.star.stellar_mass, "M\u2609");
   add_value(values, "distance", answer.star.distance, "pc");
   const std::string name = row.star.name.empty() ? "Star" : printable(row.star.name);
-  return name + ": " + values;
+  return name + ": " + values + ".";
 }
 
 std::string source_sentence(const LimitSet& set) {
@@ -121,16 +122,12 @@ std::string source_sentence(const LimitSet& set) {
 }  // namespace
 
 std::string exact_values(const ListRow& row) {
-  const std::array<std::pair<const char*, const Field*>, 7> fields{{{"Teff", &row.star.teff},
-                                                                    {"luminosity", &row.star.luminosity},
-                                                                    {"log luminosity", &row.star.log_luminosity},
-                                                                    {"stellar radius", &row.star.stellar_radius},
-                                                                    {"stellar mass", &row.star.stellar_mass},
-                                                                    {"log g", &row.star.log_g},
-                                                                    {"distance", &row.star.distance}}};
   std::string result;
-  for (const auto& [name, field] : fields) {
-    if (field->stated && field->stated->exact) result += (result.empty() ? "" : ", ") + std::string(name);
+  for (const QuantityInfo& about : all_columns()) {
+    const std::optional<Quantity> quantity = quantity_named(about.name);
+    const Field* field = quantity ? stated_field(row, *quantity) : nullptr;
+    if (field != nullptr && field->stated && field->stated->exact)
+      result += (result.empty() ? "" : ", ") + route_words(about.name);
   }
   return result;
 }
@@ -142,10 +139,12 @@ std::string bounds_page(const ListRow& row, const Answer& answer, const Settings
   const auto paragraph = [&](const std::string& text) { return text.empty() ? "" : wrapped(text, width) + "\n"; };
   const std::string exact = exact_values(row);
   std::string result = console.styled(wrapped(first_sentence(answer), width), Style::strong) + "\n";
-  result += paragraph(star_line(row, answer)) + "\n" + limit_table(answer).text(console) + "\n";
+  result += paragraph(star_line(row, answer)) + paragraph(derivation_sentence(answer.star)) + "\n" +
+            limit_table(answer).text(console) + "\n";
   result += paragraph(source_sentence(set)) + paragraph(set.warning.empty() ? "" : "Warning: " + set.warning);
   result += paragraph(exact.empty() ? "" : "Taken as exact, being typed without half-widths: " + exact + ".");
   for (const std::string& flag : answer.flags) result += paragraph(flag_sentence(flag));
+  result += paragraph(answer.note.empty() ? "" : "Note: " + answer.note + ".");
   return result;
 }
 

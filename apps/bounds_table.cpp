@@ -76,6 +76,7 @@ void add_outcome(Columns& columns) {
     return CellValue(row.candidate.answer.status == Status::answered ? "answered" : "set aside");
   });
   add(columns, "reason", [](const RankedRow& row) { return text(row.candidate.answer.reason); });
+  add(columns, "note", [](const RankedRow& row) { return text(row.candidate.answer.note); });
   add(columns, "flags",
       [](const RankedRow& row) { return text(fmt::format("{}", fmt::join(row.candidate.answer.flags, ";"))); });
 }
@@ -96,6 +97,7 @@ std::vector<OutputColumn> bounds_columns(const Settings& settings, const std::ve
   add_outcome(columns);
   add_used(columns, Quantity::teff, &StarAnswer::teff);
   add_used(columns, Quantity::luminosity, &StarAnswer::luminosity);
+  add_used(columns, Quantity::stellar_radius, &StarAnswer::stellar_radius);
   add_used(columns, Quantity::stellar_mass, &StarAnswer::stellar_mass);
   add_used(columns, Quantity::distance, &StarAnswer::distance);
   add_edge(columns, "optimistic_inner", ZoneEdge::optimistic_inner);

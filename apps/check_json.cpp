@@ -53,7 +53,9 @@ Json alternatives_of(const CheckReport& report) {
 
 Json shares_of(const CheckReport& report) {
   Json all = Json::object();
-  for (const VarianceShare& each : report.shares) all[std::string(name(each.quantity))] = number(each.share);
+  for (const VarianceShare& each : report.shares)
+    all[each.scatter_of.empty() ? std::string(name(each.quantity)) : "scatter of " + std::string(each.scatter_of)] =
+        number(each.share);
   return all;
 }
 

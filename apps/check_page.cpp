@@ -7,6 +7,7 @@
 
 #include "aligned_table.hpp"
 #include "bounds_page.hpp"
+#include "derivation.hpp"
 #include "flag_text.hpp"
 #include "numbers.hpp"
 #include "rank_page.hpp"
@@ -100,8 +101,12 @@ AlignedTable limits_table(const CheckReport& report) {
 
 std::string quantity_text(const char* words, const std::optional<Derived>& derived, const char* unit) {
   if (!derived) return "";
-  const std::string route = derived->route == "stated" ? "" : fmt::format(" (from {})", derived->route);
+  const std::string route = derived->route == "stated" ? "" : fmt::format(" (from {})", route_words(derived->route));
   return fmt::format("{} {}{}{}", words, measured_text(derived->measured), unit, route);
+}
+
+std::string value_text(const char* words, const std::optional<Derived>& derived, const char* unit) {
+  return derived ? fmt::format("{} {}{}", words, measured_text(derived->measured), unit) : "";
 }
 
 std::string planet_line(const CheckReport& report) {
@@ -126,24 +131,31 @@ std::string star_line(const CheckReport& report) {
   const std::string& name = report.row.star.name;
   return fmt::format(
       "{}: {}.", name.empty() ? "Star" : printable(name),
-      joined({quantity_text("Teff", star.teff, " K"), quantity_text("L", star.luminosity, " L☉"),
-              quantity_text("mass", star.stellar_mass, " M☉"), quantity_text("distance", star.distance, " pc")},
+      joined({value_text("Teff", star.teff, " K"), value_text("L", star.luminosity, " L☉"),
+              value_text("radius", star.stellar_radius, " R☉"), value_text("mass", star.stellar_mass, " M☉"),
+              value_text("distance", star.distance, " pc")},
              ", "));
+}
+
+/// A measured value by its name; a relation's scatter, which no measurement betters, by its label.
+std::string input_words(const VarianceShare& share) {
+  if (share.scatter_of.empty()) return route_words(name(share.quantity));
+  return "scatter of " + relation(share.scatter_of).label;
 }
 
 std::string decides_line(const CheckReport& report) {
   if (report.shares.empty()) return "";
   std::vector<std::string> parts;
   for (const VarianceShare& each : report.shares) {
-    if (each.share >= 0.01) parts.push_back(fmt::format("{} {:.0f} %", name(each.quantity), 100 * each.share));
+    if (each.share >= 0.01) parts.push_back(fmt::format("{} {:.0f} %", input_words(each), 100 * each.share));
   }
   std::string text = "Decided by (share of the variance of zone position): " + joined(parts, ", ");
   if (report.settling_factor) {
     text += fmt::format("; an error of {} {:.2g} times as large would make the verdict firm",
-                        name(report.shares.front().quantity), *report.settling_factor);
+                        input_words(report.shares.front()), *report.settling_factor);
   } else if (report.answer.planet->conservative && *report.answer.planet->conservative != Verdict::inside &&
              *report.answer.planet->conservative != Verdict::outside) {
-    text += fmt::format("; a better {} alone would not settle it", name(report.shares.front().quantity));
+    text += fmt::format("; a better {} alone would not settle it", input_words(report.shares.front()));
   }
   return text + ".";
 }
@@ -155,7 +167,7 @@ std::string exact_line(const CheckReport& report) {
 
 std::string mass_line(const CheckReport& report) {
   const Derived& mass = report.answer.planet->planet_mass;
-  return fmt::format("Planet mass {} M⊕ ({}).", measured_text(mass.measured), mass.route);
+  return fmt::format("Planet mass {} M⊕ ({}).", measured_text(mass.measured), route_words(mass.route));
 }
 
 std::string source_line(const CheckReport& report) {
@@ -169,7 +181,8 @@ std::string check_page(const CheckReport& report, const Console& console, std::s
   const auto paragraph = [&](const std::string& text) { return text.empty() ? "" : wrapped(text, width) + "\n"; };
   std::string page = console.styled(wrapped(first_sentence(report), width), Style::strong) + "\n";
   page += paragraph(change_line(report)) + "\n" + limits_table(report).text(console) + "\n";
-  page += paragraph(planet_line(report)) + paragraph(star_line(report)) + paragraph(decides_line(report));
+  page += paragraph(planet_line(report)) + paragraph(star_line(report)) +
+          paragraph(derivation_sentence(report.answer.star)) + paragraph(decides_line(report));
   page += paragraph(mass_line(report)) + paragraph(exact_line(report));
   for (const std::string& flag : report.answer.flags) page += paragraph(flag_sentence(flag));
   page += paragraph(report.answer.note.empty() ? "" : "Note: " + report.answer.note + ".");

@@ -129,7 +129,7 @@ CheckReport make_report(const ListRow& row, const Choices& choices, Answer answe
   try_other_masses(choices, report);
   report.shares = variance_shares(*report.answer.input, choices.settings);
   if (!report.shares.empty()) {
-    report.settling_factor = settling_factor(*report.answer.input, report.shares.front().quantity, choices.settings);
+    report.settling_factor = settling_factor(*report.answer.input, report.shares.front(), choices.settings);
   }
   return report;
 }

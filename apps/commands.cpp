@@ -147,6 +147,17 @@ Command limits_command() {
           run_limits};
 }
 
+Command routes_command() {
+  return {"routes",
+          "the ways to every quantity: what each needs, where it holds, how sure it is",
+          {{"QUANTITY", false, "a quantity to show with the sources of its relations, such as luminosity"}},
+          with_common({}),
+          {{{"hzmap routes", "every quantity with its ways, in the order in which they are tried"},
+            {"hzmap routes luminosity", "those of the luminosity, with their sources"}}},
+          {},
+          run_routes};
+}
+
 constexpr auto meanings = std::to_array<ExitMeaning>({
     {"0", "done"},
     {"1", "done, but rows were set aside and --strict was given"},
@@ -162,8 +173,8 @@ constexpr auto meanings = std::to_array<ExitMeaning>({
 std::span<const ExitMeaning> exit_meanings() { return meanings; }
 
 std::span<const Command> commands() {
-  static const std::vector<Command> all = {check_command(), rank_command(),    bounds_command(),
-                                           draw_command(),  columns_command(), limits_command()};
+  static const std::vector<Command> all = {check_command(),   rank_command(),   bounds_command(), draw_command(),
+                                           columns_command(), limits_command(), routes_command()};
   return all;
 }
 

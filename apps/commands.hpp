@@ -54,6 +54,7 @@ int run_columns(const Arguments& arguments, Console& console);
 int run_draw(const Arguments& arguments, Console& console);
 int run_limits(const Arguments& arguments, Console& console);
 int run_rank(const Arguments& arguments, Console& console);
+int run_routes(const Arguments& arguments, Console& console);
 
 /// What every zone is good for; said once in the help, once in the man page.
 inline constexpr std::string_view screening_note =

@@ -7,6 +7,8 @@
 
 #include "hz/error.hpp"
 #include "hz/measured_text.hpp"
+#include "hz/require.hpp"
+#include "hz/spectral_type.hpp"
 #include "hz/units.hpp"
 
 namespace hz::app {
@@ -14,6 +16,13 @@ namespace {
 
 constexpr Option value_option(std::string_view name, std::string_view placeholder, std::string_view help) {
   return {name, '\0', OptionKind::value, placeholder, OptionGroup::input, help};
+}
+
+/// A spelling that nobody could read is refused at once, unlike in a list.
+std::string typed_type(const std::string& text) {
+  const Result<SpectralType> read = read_spectral_type(text);
+  if (!read) throw Error(Fault::usage, "--spectral-type: " + read.error().what);
+  return text;
 }
 
 constexpr auto star_table = std::to_array<Option>({
@@ -24,61 +33,68 @@ constexpr auto star_table = std::to_array<Option>({
     value_option("stellar-radius", "RSUN", "radius of the star; with Teff it gives the luminosity"),
     value_option("stellar-mass", "MSUN", "mass of the star; with it periods and distances become one another"),
     value_option("log-g", "DEX", "surface gravity of the star (cgs); it tells evolved stars"),
+    value_option("stellar-density", "G/CM3", "mean density of the star"),
+    value_option("spectral-type", "TYPE", "MK spectral type, such as M4.5V"),
+    value_option("parallax", "MAS", "trigonometric parallax"),
     value_option("distance", "PC", "distance of the star from us; it gives angles on the sky"),
+    value_option("magnitude-v", "MAG", "apparent magnitudes: Johnson V, with distance or parallax"),
+    value_option("magnitude-b", "MAG", "Johnson B"),
+    value_option("magnitude-g", "MAG", "Gaia G"),
+    value_option("magnitude-bp", "MAG", "Gaia BP"),
+    value_option("magnitude-rp", "MAG", "Gaia RP"),
+    value_option("magnitude-j", "MAG", "J"),
+    value_option("magnitude-k", "MAG", "Ks"),
+    value_option("magnitude-bol", "MAG", "bolometric, IAU 2015 B2 zero point"),
+    value_option("color-bv", "MAG", "colours: B-V"),
+    value_option("color-vk", "MAG", "V-Ks"),
+    value_option("color-vj", "MAG", "V-J"),
+    value_option("color-bp-rp", "MAG", "BP-RP"),
+    value_option("extinction-v", "MAG", "extinction A_V, taken off magnitudes and colours"),
+    value_option("reddening-bv", "MAG", "reddening E(B-V); A_V is 3.1 times it"),
+    value_option("number-of-stars", "N", "stars in the system"),
+    value_option("companion-separation", "MAS", "angle to the nearest companion star; 1.5arcsec is understood"),
 });
 
 constexpr auto planet_table = std::to_array<Option>({
-    value_option("period", "DAYS", "orbital period; needs the stellar mass"),
+    value_option("period", "DAYS", "orbital period; needs a stellar mass"),
     value_option("semi-major-axis", "AU", "semi-major axis of the orbit"),
     value_option("scaled-semi-major-axis", "RATIO", "semi-major axis divided by the stellar radius"),
     value_option("eccentricity", "E", "orbital eccentricity"),
+    value_option("inclination", "DEG", "orbital inclination; with it a minimum mass becomes a mass"),
     value_option("insolation", "S", "orbit-averaged insolation, Earth = 1"),
     value_option("planet-radius", "REARTH", "radius of the planet, in Earth radii"),
+    value_option("radius-ratio", "RATIO", "planet radius divided by stellar radius"),
+    value_option("transit-depth", "SHARE", "depth of the transit; 700ppm is understood"),
     value_option("planet-mass", "MEARTH", "mass of the planet, in Earth masses"),
     value_option("min-mass", "MEARTH", "minimum mass (m sin i), in Earth masses"),
 });
 
-struct StarValue {
-  std::string_view option;
-  Quantity quantity;
-  Field StarRecord::*field;
-};
-constexpr auto star_values = std::to_array<StarValue>({
-    {"teff", Quantity::teff, &StarRecord::teff},
-    {"luminosity", Quantity::luminosity, &StarRecord::luminosity},
-    {"log-luminosity", Quantity::log_luminosity, &StarRecord::log_luminosity},
-    {"stellar-radius", Quantity::stellar_radius, &StarRecord::stellar_radius},
-    {"stellar-mass", Quantity::stellar_mass, &StarRecord::stellar_mass},
-    {"log-g", Quantity::log_g, &StarRecord::log_g},
-    {"distance", Quantity::distance, &StarRecord::distance},
-});
+/// The quantity an option states: its canonical name is the option's with other dashes.
+Quantity quantity_of(std::string_view option) {
+  if (option == "period") return Quantity::orbital_period;
+  std::string name(option);
+  std::replace(name.begin(), name.end(), '-', '_');
+  const std::optional<Quantity> quantity = quantity_named(name);
+  HZ_REQUIRE(quantity);
+  return *quantity;
+}
 
-struct PlanetValue {
-  std::string_view option;
-  Quantity quantity;
-  Field PlanetRecord::*field;
-};
-constexpr auto planet_values = std::to_array<PlanetValue>({
-    {"period", Quantity::orbital_period, &PlanetRecord::orbital_period},
-    {"semi-major-axis", Quantity::semi_major_axis, &PlanetRecord::semi_major_axis},
-    {"scaled-semi-major-axis", Quantity::scaled_semi_major_axis, &PlanetRecord::scaled_semi_major_axis},
-    {"eccentricity", Quantity::eccentricity, &PlanetRecord::eccentricity},
-    {"insolation", Quantity::insolation, &PlanetRecord::insolation},
-    {"planet-radius", Quantity::planet_radius, &PlanetRecord::planet_radius},
-    {"planet-mass", Quantity::planet_mass, &PlanetRecord::planet_mass},
-    {"min-mass", Quantity::min_mass, &PlanetRecord::min_mass},
-});
-
-/// Reads the values of `table` that are given into `record`; whether there was any.
-template <class Record, class Table>
-bool read_values(const Arguments& arguments, const Table& table, Record& record) {
+/// Reads the values of `table` that are given into the row; whether there was any.
+bool read_values(const Arguments& arguments, std::span<const Option> table, ListRow& row) {
   bool any = false;
-  for (const auto& [option, quantity, field] : table) {
-    if (!arguments.knows(option)) continue;
-    const std::optional<std::string> text = arguments.value(option);
+  for (const Option& option : table) {
+    if (option.name == "name" || !arguments.knows(option.name)) continue;
+    const std::optional<std::string> text = arguments.value(option.name);
     if (!text) continue;
-    (record.*field).stated = typed_value(option, quantity, *text);
     any = true;
+    const Quantity quantity = quantity_of(option.name);
+    if (quantity == Quantity::spectral_type) {
+      row.star.spectral_type = typed_type(*text);
+    } else if (quantity == Quantity::number_of_stars) {
+      row.star.number_of_stars = static_cast<int>(option_count(option.name, *text, 1));
+    } else {
+      stated_field(row, quantity)->stated = typed_value(option.name, quantity, *text);
+    }
   }
   return any;
 }
@@ -119,8 +135,8 @@ bool has_typed_values(const Arguments& arguments) {
 ListRow typed_row(const Arguments& arguments) {
   ListRow row;
   row.number = 1;
-  read_values(arguments, star_values, row.star);
-  const bool has_planet = read_values(arguments, planet_values, row.planet);
+  read_values(arguments, star_table, row);
+  const bool has_planet = read_values(arguments, planet_table, row);
   const std::string name = arguments.value("name").value_or("");
   if (has_planet) {
     row.planet.name = name.empty() ? "planet" : name;

@@ -4,6 +4,7 @@
 
 #include <algorithm>
 #include <array>
+#include <cmath>
 
 #include "closest.hpp"
 #include "files.hpp"
@@ -25,7 +26,10 @@ constexpr auto boundary_table = std::to_array<Option>({
     {"assume-error", '\0', OptionKind::value, "LIST", OptionGroup::answer,
      "half-widths where a list states none, such as semi_major_axis=5%,teff=2%; with none they are exact"},
     {"luminosity-from", '\0', OptionKind::value, "WORD", OptionGroup::answer,
-     "which comes first when both are known: the stated luminosity, or radius and Teff (default stated)"},
+     "which comes first: the stated luminosity, radius and Teff, or photometry (stated, radius, photometry; default "
+     "stated)"},
+    {"length-scale", '\0', OptionKind::value, "PC", OptionGroup::answer,
+     "of the space density that steadies parallaxes below ten times their error (default 1350)"},
 });
 
 constexpr auto placement_table = std::to_array<Option>({
@@ -48,7 +52,9 @@ constexpr auto beyond_words =
 constexpr auto asymmetry_words =
     std::to_array<OptionWord<Asymmetry>>({{"median", Asymmetry::median}, {"mode", Asymmetry::mode}});
 constexpr auto luminosity_words =
-    std::to_array<OptionWord<LuminosityFrom>>({{"stated", LuminosityFrom::stated}, {"radius", LuminosityFrom::radius}});
+    std::to_array<OptionWord<LuminosityFrom>>({{"stated", LuminosityFrom::stated},
+                                               {"radius", LuminosityFrom::radius},
+                                               {"photometry", LuminosityFrom::photometry}});
 constexpr auto axis_words = std::to_array<OptionWord<SemiMajorAxisFrom>>(
     {{"period", SemiMajorAxisFrom::period}, {"stated", SemiMajorAxisFrom::stated}});
 constexpr auto insolation_words = std::to_array<OptionWord<InsolationFrom>>(
@@ -109,6 +115,12 @@ double read_albedo(const std::string& text) {
   throw Error(Fault::usage, fmt::format("--albedo is at least 0 and below 1, not {}", text));
 }
 
+double read_length_scale(const std::string& text) {
+  const double scale = option_number("length-scale", text);
+  if (scale > 0 && std::isfinite(scale)) return scale;
+  throw Error(Fault::usage, fmt::format("--length-scale is in pc and above 0, not {}", text));
+}
+
 void read_sampling(const Arguments& arguments, Settings& settings) {
   if (const auto draws = given(arguments, "draws")) settings.draws = option_count("draws", *draws, 1);
   if (const auto seed = given(arguments, "seed")) settings.seed = option_count("seed", *seed, 0);
@@ -166,6 +178,7 @@ Choices read_choices(const Arguments& arguments) {
   set_word(arguments, "semi-major-axis-from", axis_words, settings.semi_major_axis_from);
   set_word(arguments, "insolation-from", insolation_words, settings.insolation_from);
   set_word(arguments, "method", method_words, settings.method);
+  if (const auto text = given(arguments, "length-scale")) settings.length_scale = read_length_scale(*text);
   if (const auto text = given(arguments, "assume-error")) settings.assumed_errors = read_assumed_errors(*text);
   if (const auto text = given(arguments, "verdict-at")) settings.thresholds = read_thresholds(*text);
   if (const auto text = given(arguments, "albedo")) settings.bond_albedo = read_albedo(*text);

@@ -5,11 +5,14 @@
 #include <algorithm>
 #include <cmath>
 
+#include "contradictions.hpp"
 #include "hz/constants.hpp"
 #include "hz/orbit.hpp"
 #include "hz/relations.hpp"
 #include "hz/require.hpp"
-#include "routes.hpp"
+#include "judgement.hpp"
+#include "planet_mass_route.hpp"
+#include "resolver.hpp"
 
 namespace hz {
 namespace {
@@ -18,6 +21,8 @@ namespace {
 constexpr Range default_planet_masses{0.1, 5};
 constexpr double evolved_log_g = 4.0;
 constexpr double evolved_radius_ratio = 2.0;
+/// A star this much smaller than the main sequence at its Teff is none of it: a white dwarf, or a wrong colour.
+constexpr double too_small = 0.4;
 /// A share of the Teff distribution that would not show in two digits is not worth a flag.
 constexpr double noticeable_share = 0.001;
 
@@ -34,19 +39,73 @@ void set_aside(Answer& answer, const Problem& problem) {
   }
 }
 
-Problem teff_problem(const StarRecord& star) {
-  if (star.teff.stated && star.teff.stated->limit != LimitMark::none) {
-    return {ProblemCode::only_a_limit, "teff", "teff is only a limit, and the limits of the zone need a value"};
-  }
-  return {ProblemCode::missing, "teff", "no effective temperature (teff)"};
+/// Why nothing led to a quantity, when relations that could have helped do not hold for the star.
+std::string because(const Resolver& resolver) {
+  return resolver.barred().empty() ? std::string() : "; the star is " + resolver.barred();
 }
 
-/// Teff, or its problem; a set without a Teff range can do without one.
-Result<std::optional<Input>> take_teff(const Inputs& inputs, const StarRecord& star, const LimitSet& set) {
-  const auto teff = inputs.take(Quantity::teff, star.teff);
-  if (!teff) return teff.error();
-  if (!*teff && set.teff_range()) return teff_problem(star);
-  return *teff;
+Problem no_teff(const Resolver& resolver) {
+  const std::optional<Measured>& stated = resolver.row().star.teff.stated;
+  if (stated && stated->limit != LimitMark::none) {
+    return {ProblemCode::only_a_limit, "teff",
+            "teff is only a limit, and nothing else leads to it" + because(resolver)};
+  }
+  return {ProblemCode::missing, "teff",
+          "no effective temperature (teff), and no colour, spectral_type or other value that leads to it" +
+              because(resolver)};
+}
+
+using NamedFields = std::initializer_list<std::pair<Quantity, const Field*>>;
+
+/// The first of these fields that is only a limit, as the reason why a row has no answer.
+std::optional<Problem> only_a_limit(NamedFields fields) {
+  for (const auto& [quantity, field] : fields) {
+    if (!field->stated || field->stated->limit == LimitMark::none) continue;
+    const std::string column(name(quantity));
+    return Problem{ProblemCode::only_a_limit, column, column + " is only a limit, and nothing else stands in for it"};
+  }
+  return std::nullopt;
+}
+
+std::optional<Problem> light_only_a_limit(const StarRecord& star) {
+  return only_a_limit({{Quantity::luminosity, &star.luminosity},
+                       {Quantity::log_luminosity, &star.log_luminosity},
+                       {Quantity::stellar_radius, &star.stellar_radius}});
+}
+
+std::optional<Problem> orbit_only_a_limit(const ListRow& row) {
+  return only_a_limit({{Quantity::semi_major_axis, &row.planet.semi_major_axis},
+                       {Quantity::orbital_period, &row.planet.orbital_period},
+                       {Quantity::stellar_mass, &row.star.stellar_mass}});
+}
+
+std::optional<Problem> insolation_only_a_limit(const PlanetRecord& planet) {
+  return only_a_limit(
+      {{Quantity::scaled_semi_major_axis, &planet.scaled_semi_major_axis}, {Quantity::insolation, &planet.insolation}});
+}
+
+Problem no_luminosity(const Resolver& resolver) {
+  if (auto limit = light_only_a_limit(resolver.row().star)) return *limit;
+  return {
+      ProblemCode::missing, "luminosity",
+      "no luminosity (luminosity, log_luminosity, stellar_radius with teff, or a magnitude with distance or parallax)" +
+          because(resolver)};
+}
+
+Problem no_insolation(const Resolver& resolver, bool dark) {
+  const ListRow& row = resolver.row();
+  std::optional<Problem> limit = dark ? light_only_a_limit(row.star) : orbit_only_a_limit(row);
+  if (!limit) limit = insolation_only_a_limit(row.planet);
+  if (limit) return *limit;
+  if (!dark) {
+    return {
+        ProblemCode::missing, "semi_major_axis",
+        "no orbit (semi_major_axis, orbital_period with a stellar mass, or scaled_semi_major_axis), and no insolation"};
+  }
+  return {ProblemCode::missing, "luminosity",
+          "no luminosity (luminosity, log_luminosity, stellar_radius with teff, or a magnitude with distance or "
+          "parallax), and neither scaled_semi_major_axis nor insolation" +
+              because(resolver)};
 }
 
 std::optional<Problem> teff_refused(double teff, const LimitSet& set, BeyondRange beyond) {
@@ -59,27 +118,6 @@ std::optional<Problem> teff_refused(double teff, const LimitSet& set, BeyondRang
                              set.key, fitted->low, fitted->high,
                              beyond == BeyondRange::hold ? ", farther than the 300 K over which a limit is held"
                                                          : ", and limits beyond them are refused")};
-}
-
-std::optional<double> radius_of(const RowInputs& row, const std::optional<Derived>& luminosity) {
-  if (const auto stated = row.inputs.peek(Quantity::stellar_radius, row.star.stellar_radius)) return stated->used.value;
-  if (!luminosity || !row.teff) return std::nullopt;
-  return std::sqrt(luminosity->measured.value) * std::pow(constants::solar_teff / row.teff->used.value, 2);
-}
-
-/// Off the main sequence by surface gravity, or by radius for its Teff.
-bool is_evolved(const RowInputs& row, const std::optional<Derived>& luminosity) {
-  const Field& log_g = row.star.log_g;
-  if (log_g.stated && log_g.stated->limit == LimitMark::none && log_g.stated->value < evolved_log_g) return true;
-  const std::optional<double> radius = radius_of(row, luminosity);
-  if (!radius || !row.teff) return false;
-  const std::optional<double> main_sequence = main_sequence_radius(row.teff->used.value);
-  return main_sequence && *radius > evolved_radius_ratio * *main_sequence;
-}
-
-std::optional<Derived> stated(const RowInputs& row, Quantity quantity, const Field& field) {
-  const auto input = row.inputs.peek(quantity, field);
-  return input ? std::optional(Derived{input->used, "stated"}) : std::nullopt;
 }
 
 std::vector<ZoneEdge> edges_of(const LimitSet& set, std::size_t limit) {
@@ -114,16 +152,6 @@ std::vector<LimitAtStar> limits_at(const StarAnswer& star, double teff, double p
   return found;
 }
 
-/// ln of the light at 1 au, as a placement input: what the distances of the limits hang on.
-PlacementInput light_input(const Route& light, const std::optional<Input>& teff) {
-  PlacementInput input;
-  input.offset = light.offset;
-  input.terms = light.terms;
-  input.teff_power = light.teff_power;
-  input.teff = teff ? teff->x : Distribution::exact(constants::solar_teff);
-  return input;
-}
-
 /// The limits' distances follow ln(L / S_limit) / 2.
 void add_half_widths(Answer& answer, const PlacementInput& light, const Settings& settings) {
   for (LimitAtStar& at : answer.limits) {
@@ -142,49 +170,97 @@ std::optional<Problem> not_a_number(Quantity quantity, double value) {
       fmt::format("{} cannot be computed: the row's values carry it out of the range of numbers", name(quantity))};
 }
 
-/// A row being answered: its inputs and the flags they raise.
+/// A row being answered: what follows from it and the flags it raises.
 struct Work {
-  Work(const ListRow& list_row, const Settings& chosen)
-      : settings(chosen), row{list_row.star, list_row.planet, settings, Inputs(settings, flags), std::nullopt} {}
+  Work(const ListRow& list_row, const Settings& chosen) : settings(chosen), resolver(list_row, chosen, flags) {}
   Work(const Work&) = delete;
   Work& operator=(const Work&) = delete;
   ~Work() = default;
 
+  [[nodiscard]] const Form* teff_form() const { return teff != nullptr ? &teff->form : nullptr; }
+  [[nodiscard]] Derived derived(const Form& form) {
+    return {exponential(form, teff_form(), resolver.sources()), form.route};
+  }
+  [[nodiscard]] std::optional<Derived> derived(Quantity quantity) {
+    const Resolver::Quiet quiet(resolver);
+    const std::optional<Form> form = resolver.find(quantity);
+    return form ? std::optional(derived(*form)) : std::nullopt;
+  }
+  [[nodiscard]] PlacementInput input(const Form& form) {
+    const Distribution sun = Distribution::exact(constants::solar_teff);
+    return placement_input(form, teff_form(), teff != nullptr ? teff->x : sun, resolver.sources());
+  }
+  [[nodiscard]] double central_teff() const { return teff != nullptr ? teff->used.value : constants::solar_teff; }
+
   Flags flags;
   const Settings& settings;
-  RowInputs row;
-  std::optional<Route> light;
+  Resolver resolver;
+  const TeffInput* teff = nullptr;
+  std::optional<Form> light;
 };
 
-/// The star's part: Teff, luminosity, evolved, held. Returns the problem that sets the row aside, if any.
-std::optional<Problem> answer_light(Work& work, Answer& answer) {
+/// Teff. Returns the problem that sets the row aside, if any; a set without a Teff range can do without one.
+std::optional<Problem> answer_teff(Work& work, Answer& answer) {
   const LimitSet& set = *work.settings.limits;
-  const auto teff = take_teff(work.row.inputs, work.row.star, set);
-  if (!teff) return teff.error();
-  work.row.teff = *teff;
-  if (*teff) {
-    if (auto refused = teff_refused((*teff)->used.value, set, work.settings.beyond)) return refused;
-    answer.star.teff = Derived{(*teff)->used, "stated"};
-  }
-  const std::size_t raised = work.flags.words().size();
-  const auto light = luminosity_route(work.row);
-  work.flags.forget_since(raised);  // whoever uses the luminosity raises its flags
-  if (!light) return light.error();
-  if (*light) {
-    if (auto problem = not_a_number(Quantity::luminosity, (*light)->value.value)) return problem;
-    work.light = **light;
-    answer.star.luminosity = Derived{work.light->value, work.light->name};
-  }
-  answer.star.stellar_mass = stated(work.row, Quantity::stellar_mass, work.row.star.stellar_mass);
-  answer.star.distance = stated(work.row, Quantity::distance, work.row.star.distance);
+  work.teff = work.resolver.teff();
+  if (work.resolver.problem()) return work.resolver.problem();
+  if (work.teff == nullptr) return set.teff_range() ? std::optional(no_teff(work.resolver)) : std::nullopt;
+  if (auto refused = teff_refused(work.teff->used.value, set, work.settings.beyond)) return refused;
+  work.resolver.raise(work.teff->form);
+  answer.star.teff = Derived{work.teff->used, work.teff->form.route};
   return std::nullopt;
 }
 
+/// Radius over that of the main sequence at the same Teff, when the star's light says so.
+std::optional<double> radius_ratio(const Work& work, const Answer& answer) {
+  if (work.teff == nullptr || !answer.star.stellar_radius) return std::nullopt;
+  const std::optional<double> main_sequence = main_sequence_radius(work.teff->used.value);
+  return main_sequence ? std::optional(answer.star.stellar_radius->measured.value / *main_sequence) : std::nullopt;
+}
+
+/// Colours and magnitudes of a white dwarf read like those of a faint dwarf star; its size gives it away.
+std::optional<Problem> below_main_sequence(const Work& work, const Answer& answer) {
+  const bool by_relation = work.teff != nullptr && work.teff->form.marks.main_sequence;
+  const std::optional<double> ratio = radius_ratio(work, answer);
+  if (!by_relation || !ratio || *ratio > too_small) return std::nullopt;
+  return Problem{
+      ProblemCode::out_of_range, "luminosity",
+      fmt::format("luminosity by {} makes the star {:.2g} times the size of a main-sequence star of {:.0f} K "
+                  "({}): a white dwarf, or a wrong colour or parallax",
+                  answer.star.luminosity ? answer.star.luminosity->route : "", *ratio, work.teff->used.value,
+                  work.teff->form.route)};
+}
+
+/// The star's part. Returns the problem that sets the row aside, if any.
+std::optional<Problem> answer_light(Work& work, Answer& answer) {
+  if (auto problem = answer_teff(work, answer)) return problem;
+  work.light = work.resolver.find(Quantity::luminosity);
+  if (work.resolver.problem()) return work.resolver.problem();
+  if (work.light) {
+    answer.star.luminosity = work.derived(*work.light);
+    if (auto problem = not_a_number(Quantity::luminosity, answer.star.luminosity->measured.value)) return problem;
+  }
+  answer.star.stellar_radius = work.derived(Quantity::stellar_radius);
+  answer.star.stellar_mass = work.derived(Quantity::stellar_mass);
+  answer.star.distance = work.derived(Quantity::distance);
+  return below_main_sequence(work, answer);
+}
+
+/// Off the main sequence by spectral type, by surface gravity, or by radius for its Teff.
+bool is_evolved(const Work& work, const Answer& answer) {
+  const StarRecord& star = work.resolver.row().star;
+  const std::optional<SpectralType>& type = work.resolver.type();
+  if (type && (type->kind == StarKind::giant || type->kind == StarKind::white_dwarf)) return true;
+  if (star.log_g.stated && star.log_g.stated->limit == LimitMark::none && star.log_g.stated->value < evolved_log_g)
+    return true;
+  return radius_ratio(work, answer).value_or(1) > evolved_radius_ratio;
+}
+
 void raise_star_flags(Work& work, const Answer& answer) {
-  if (is_evolved(work.row, answer.star.luminosity)) work.flags.raise(flag::evolved);
+  if (is_evolved(work, answer)) work.flags.raise(flag::evolved);
   const std::optional<Range> fitted = work.settings.limits->teff_range();
-  if (!fitted || !work.row.teff) return;
-  const Distribution& teff = work.row.teff->x;
+  if (!fitted || work.teff == nullptr) return;
+  const Distribution& teff = work.teff->x;
   const double outside = teff.is_exact() ? 0 : teff.below(fitted->low) + teff.above(fitted->high);
   if (!fitted->contains(teff.central()) || outside > noticeable_share) work.flags.raise(flag::held);
 }
@@ -195,112 +271,9 @@ bool states_an_orbit(const PlanetRecord& planet) {
          says(planet.insolation);
 }
 
-double central_planet_mass(const PlacementInput& input) {
-  return input.planet_mass_decadic ? std::pow(10, input.planet_mass.central()) : input.planet_mass.central();
-}
-
 bool beyond_planet_mass(const PlanetMassRoute& mass, const LimitSet& set) {
   const Range fitted = set.planet_mass_range().value_or(default_planet_masses);
   return !fitted.contains(mass.limit.value_or(mass.derived.measured.value));
-}
-
-/// ln S over ln S_limit at the central values, for a limit that answers.
-std::optional<double> log_ratio(const FluxLimit& limit, const PlacementInput& input, double insolation,
-                                BeyondRange beyond) {
-  const Result<HeldValue> at = limit.insolation(input.teff.central(), central_planet_mass(input), beyond);
-  return at ? std::optional(std::log(insolation / at->value)) : std::nullopt;
-}
-
-std::optional<double> zone_position(const Zone& zone, const PlacementInput& input, double insolation,
-                                    const Settings& settings) {
-  const auto inner = log_ratio(settings.limits->limits[zone.inner], input, insolation, settings.beyond);
-  const auto outer = log_ratio(settings.limits->limits[zone.outer], input, insolation, settings.beyond);
-  if (!inner || !outer) return std::nullopt;
-  return -*inner / (*outer - *inner);
-}
-
-std::vector<std::size_t> zone_limits(const LimitSet& set) {
-  std::vector<std::size_t> indices;
-  for (const std::optional<Zone>& zone : {set.conservative, set.optimistic}) {
-    if (zone) indices.insert(indices.end(), {zone->inner, zone->outer});
-  }
-  return indices;
-}
-
-std::optional<Margin> margin_of(const PlacementInput& input, const PlanetAnswer& planet, const Settings& settings) {
-  const double insolation = planet.insolation.measured.value;
-  std::optional<Margin> nearest;
-  double least = 0;
-  for (const std::size_t index : zone_limits(*settings.limits)) {
-    const FluxLimit& limit = settings.limits->limits[index];
-    const auto ratio = log_ratio(limit, input, insolation, settings.beyond);
-    if (!ratio || (nearest && std::abs(*ratio) >= std::abs(least))) continue;
-    nearest = Margin{&limit, std::nullopt, 0};
-    least = *ratio;
-  }
-  if (!nearest) return std::nullopt;
-  // The limit lies colder than the planet when the planet is hotter than it.
-  const double width =
-      log_margin_width(input, *nearest->limit, settings.beyond, least > 0 ? Towards::colder : Towards::hotter);
-  nearest->widths = width > 0 ? least / width : 0;
-  // An eccentric orbit meets the limit's flux, on average, at another semi-major axis: a sqrt(S / S_limit).
-  if (planet.semi_major_axis) nearest->distance = planet.semi_major_axis->measured.value * std::expm1(least / 2);
-  return nearest;
-}
-
-/// Share of the orbit's time between a zone's limits at the central values.
-std::optional<double> orbit_share(const Zone& zone, const PlacementInput& input, double insolation,
-                                  const Settings& settings) {
-  const double e = input.eccentricity.central();
-  if (!(e > 0)) return std::nullopt;
-  const auto inner = log_ratio(settings.limits->limits[zone.inner], input, insolation, settings.beyond);
-  const auto outer = log_ratio(settings.limits->limits[zone.outer], input, insolation, settings.beyond);
-  if (!inner || !outer) return std::nullopt;
-  const double circular = -0.5 * std::log(mean_flux_factor(e));
-  return time_share_within(std::exp(*outer / 2 + circular), e) - time_share_within(std::exp(*inner / 2 + circular), e);
-}
-
-std::optional<Side> side_of(double hot, double cold) {
-  constexpr double hardly_outside = 0.005;
-  if (hot + cold < hardly_outside) return std::nullopt;
-  return hot >= cold ? Side::hot : Side::cold;
-}
-
-/// FNV-1a: draws are keyed by the target, so that they do not hang on the order of a list.
-std::uint64_t target_key(const ListRow& row) {
-  std::uint64_t hash = 14695981039346656037ULL;
-  for (const std::string* text : {&row.star.name, &row.planet.name}) {
-    for (const char c : *text) hash = (hash ^ static_cast<unsigned char>(c)) * 1099511628211ULL;
-  }
-  return hash;
-}
-
-Probabilities probabilities_of(const PlacementInput& input, const ListRow& row, const Settings& settings) {
-  if (settings.method == Method::quadrature) return place(input, *settings.limits, settings.beyond);
-  return place_by_sampling(input, *settings.limits, settings.beyond, settings.draws, settings.seed ^ target_key(row));
-}
-
-double merit_of(const Probabilities& p) {
-  if (!p.optimistic) return p.conservative.value_or(0);
-  if (!p.conservative) return *p.optimistic;
-  return *p.conservative + 0.5 * (*p.optimistic - *p.conservative);
-}
-
-void judge(PlanetAnswer& planet, const PlacementInput& input, const Settings& settings) {
-  const LimitSet& set = *settings.limits;
-  const double insolation = planet.insolation.measured.value;
-  const Probabilities& p = planet.probabilities;
-  if (p.conservative) planet.conservative = verdict_of(*p.conservative, settings.thresholds);
-  if (p.optimistic) planet.optimistic = verdict_of(*p.optimistic, settings.thresholds);
-  planet.side = p.conservative ? side_of(p.too_hot_conservative, p.too_cold_conservative)
-                               : side_of(p.too_hot.value_or(0), p.too_cold.value_or(0));
-  planet.zone_position =
-      zone_position(set.conservative ? *set.conservative : *set.optimistic, input, insolation, settings);
-  planet.orbit_share = orbit_share(set.optimistic ? *set.optimistic : *set.conservative, input, insolation, settings);
-  planet.margin = margin_of(input, planet, settings);
-  planet.equilibrium_temperature =
-      constants::equilibrium_temperature_1au * std::pow((1 - settings.bond_albedo) * insolation, 0.25);
-  planet.merit = merit_of(p);
 }
 
 Measured averaged(const Measured& insolation, const Input& eccentricity) {
@@ -316,59 +289,41 @@ Measured averaged(const Measured& insolation, const Input& eccentricity) {
 }
 
 /// The planet's part. Returns the problem that sets the row aside, if any.
-std::optional<Problem> answer_planet(Work& work, const ListRow& list_row, Answer& answer) {
-  const Result<InsolationRoute> found = insolation_route(work.row);
-  if (!found) return found.error();
-  PlacementInput input = light_input(found->route, work.row.teff);
+std::optional<Problem> answer_planet(Work& work, Answer& answer) {
+  Resolver& resolver = work.resolver;
+  const std::optional<Form> form = resolver.find(Quantity::insolation);
+  if (resolver.problem()) return resolver.problem();
+  if (!form) return no_insolation(resolver, !work.light);
+  resolver.raise(*form);
+  PlacementInput input = work.input(*form);
 
-  Measured insolation = found->route.value;
-  if (!found->averaged) {
-    const Result<Input> eccentricity = work.row.inputs.eccentricity(work.row.planet.eccentricity);
+  PlanetAnswer planet;
+  planet.insolation = work.derived(*form);
+  const ListRow& row = resolver.row();
+  if (form->route != "stated") {
+    const Result<Input> eccentricity = resolver.inputs().eccentricity(row.planet.eccentricity);
     if (!eccentricity) return eccentricity.error();
     input.eccentricity = eccentricity->x;
-    insolation = averaged(insolation, *eccentricity);
+    planet.insolation.measured = averaged(planet.insolation.measured, *eccentricity);
   }
-  if (auto problem = not_a_number(Quantity::insolation, insolation.value)) return problem;
-  const Result<PlanetMassRoute> mass = planet_mass_route(work.row);
+  if (auto problem = not_a_number(Quantity::insolation, planet.insolation.measured.value)) return problem;
+  const Result<PlanetMassRoute> mass = planet_mass_route(resolver);
   if (!mass) return mass.error();
   input.planet_mass = mass->x;
   input.planet_mass_decadic = mass->decadic;
   if (beyond_planet_mass(*mass, *work.settings.limits)) work.flags.raise(flag::beyond_planet_mass);
 
-  PlanetAnswer planet;
-  planet.insolation = {insolation, found->route.name};
-  planet.semi_major_axis = found->semi_major_axis;
+  planet.semi_major_axis = work.derived(Quantity::semi_major_axis);
+  planet.planet_radius = work.derived(Quantity::planet_radius);
   planet.planet_mass = mass->derived;
-  planet.probabilities = probabilities_of(input, list_row, work.settings);
-  judge(planet, input, work.settings);
-  answer.note = contradictions(work.row, insolation);
+  judge(planet, input, row, work.settings);
+  answer.note = contradictions(resolver, &planet.insolation.measured);
   answer.planet = std::move(planet);
   answer.input = std::move(input);
   return std::nullopt;
 }
 
 }  // namespace
-
-std::string_view word(Verdict verdict) {
-  switch (verdict) {
-    case Verdict::inside: return "inside";
-    case Verdict::likely_inside: return "likely inside";
-    case Verdict::open: return "open";
-    case Verdict::likely_outside: return "likely outside";
-    case Verdict::outside: return "outside";
-  }
-  return "";
-}
-
-std::string_view word(Side side) { return side == Side::hot ? "hot" : "cold"; }
-
-Verdict verdict_of(double probability, const VerdictThresholds& thresholds) {
-  if (probability >= thresholds.inside) return Verdict::inside;
-  if (probability >= thresholds.likely_inside) return Verdict::likely_inside;
-  if (probability <= thresholds.outside) return Verdict::outside;
-  if (probability <= thresholds.likely_outside) return Verdict::likely_outside;
-  return Verdict::open;
-}
 
 const LimitAtStar* find_edge(const Answer& answer, ZoneEdge edge) {
   for (const LimitAtStar& at : answer.limits) {
@@ -386,13 +341,12 @@ Answer answer(const ListRow& row, const Settings& settings) {
   Work work(row, settings);
   std::optional<Problem> problem = row.problem;
   if (!problem) problem = answer_light(work, answer);
-  if (!problem) problem = answer_planet(work, row, answer);
+  if (!problem) problem = answer_planet(work, answer);
   if (problem) {
     set_aside(answer, *problem);
   } else {
     raise_star_flags(work, answer);
-    const double teff = work.row.teff ? work.row.teff->used.value : constants::solar_teff;
-    answer.limits = limits_at(answer.star, teff, central_planet_mass(*answer.input), settings);
+    answer.limits = limits_at(answer.star, work.central_teff(), central_planet_mass(*answer.input), settings);
   }
   answer.flags = work.flags.words();
   return answer;
@@ -404,15 +358,15 @@ Answer answer_star(const ListRow& row, const Settings& settings) {
   Work work(row, settings);
   std::optional<Problem> problem = row.problem;
   if (!problem) problem = answer_light(work, answer);
-  if (!problem && !work.light) problem = no_luminosity(row.star);
+  if (!problem && !work.light) problem = no_luminosity(work.resolver);
   if (problem) {
     set_aside(answer, *problem);
   } else {
-    static_cast<void>(luminosity_route(work.row));  // raises the flags of what it uses
+    work.resolver.raise(*work.light);
     raise_star_flags(work, answer);
-    const double teff = work.row.teff ? work.row.teff->used.value : constants::solar_teff;
-    answer.limits = limits_at(answer.star, teff, 1, settings);
-    add_half_widths(answer, light_input(*work.light, work.row.teff), settings);
+    answer.limits = limits_at(answer.star, work.central_teff(), 1, settings);
+    add_half_widths(answer, work.input(*work.light), settings);
+    answer.note = contradictions(work.resolver, nullptr);
   }
   answer.flags = work.flags.words();
   return answer;

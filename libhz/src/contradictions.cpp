@@ -1,11 +1,12 @@
+#include "contradictions.hpp"
+
 #include <fmt/format.h>
 
 #include <algorithm>
 #include <cmath>
+#include <initializer_list>
 
-#include "hz/constants.hpp"
-#include "hz/orbit.hpp"
-#include "routes.hpp"
+#include "ways.hpp"
 
 namespace hz {
 namespace {
@@ -19,58 +20,88 @@ bool differ(const Measured& stated, const Measured& other) {
   return gap > 0.1 * stated.value && gap > 3 * sigma;
 }
 
+std::optional<Form> stated_light(Resolver& r) {
+  const std::optional<Form> linear = ways::stated_luminosity(r);
+  return linear ? linear : ways::stated_log_luminosity(r);
+}
+
+std::optional<Form> light_without_magnitudes(Resolver& r) {
+  const std::optional<Form> said = stated_light(r);
+  return said ? said : ways::luminosity_from_radius(r);
+}
+
+std::optional<Form> stated_gravity(Resolver& r) { return r.log_of_decadic(Quantity::log_g); }
+
+/// ln g from stated mass and radius, cgs.
+std::optional<Form> gravity(Resolver& r) {
+  const std::optional<Form> mass = ways::stated_mass(r);
+  const std::optional<Form> radius = ways::stated_radius(r);
+  if (!mass || !radius) return std::nullopt;
+  Form form = (*mass - 2 * *radius) + std::log(10.0) * ways::solar_log_g();
+  form.route = "stellar_mass and stellar_radius";
+  return form;
+}
+
 class Comparison {
 public:
-  explicit Comparison(Flags& flags) : flags_(flags) {}
+  explicit Comparison(Resolver& resolver) : r_(resolver) {}
 
-  void compare(Quantity quantity, const std::optional<Measured>& stated, const std::optional<Measured>& other,
-               std::string_view other_route) {
-    if (!stated || !other || !differ(*stated, *other)) return;
-    flags_.raise(flag::inconsistent, quantity);
+  /// Each of `others` that leads anywhere against what is said.
+  void compare(Quantity quantity, Way said_by, std::initializer_list<Way> others) {
+    const std::optional<Form> said = said_by(r_);
+    if (!said) return;
+    for (const Way way : others) {
+      const std::optional<Form> other = way(r_);
+      if (!other || (other->marks.extinction_ignored && !r_.is_nearby())) continue;
+      judge(quantity, value_of(quantity, *said), said->route, value_of(quantity, *other), other->route);
+    }
+  }
+
+  void judge(Quantity quantity, const Measured& said, std::string_view said_route, const Measured& other,
+             std::string_view other_route) {
+    if (!differ(said, other)) return;
+    r_.inputs().flags().raise(flag::inconsistent, quantity);
     if (!words_.empty()) words_ += "; ";
-    words_ += fmt::format("{} {:.4g} stated, {:.4g} from {}", name(quantity), stated->value, other->value, other_route);
+    const bool is_stated = said_route.starts_with("stated");
+    words_ += fmt::format("{} {:.4g} {}{}, {:.4g} from {}", name(quantity), shown(quantity, said.value),
+                          is_stated ? "" : "from ", is_stated ? "stated" : said_route, shown(quantity, other.value),
+                          other_route);
   }
   [[nodiscard]] const std::string& words() const { return words_; }
 
 private:
-  Flags& flags_;
+  [[nodiscard]] Measured value_of(Quantity quantity, const Form& form) {
+    if (quantity == Quantity::teff) return plain(form, r_.sources());
+    const TeffInput* teff = r_.teff();
+    return exponential(form, teff != nullptr ? &teff->form : nullptr, r_.sources());
+  }
+  static double shown(Quantity quantity, double value) {
+    return quantity == Quantity::log_g ? std::log10(value) : value;
+  }
+
+  Resolver& r_;
   std::string words_;
 };
 
-std::optional<Measured> used(const std::optional<Input>& input) {
-  return input ? std::optional(input->used) : std::nullopt;
-}
-
-std::optional<Measured> stated_luminosity(const RowInputs& row) {
-  if (const auto linear = row.inputs.peek(Quantity::luminosity, row.star.luminosity)) return linear->used;
-  const auto decadic = row.inputs.peek(Quantity::log_luminosity, row.star.log_luminosity);
-  return decadic ? std::optional(product(1, {{decadic->used, 1, true}})) : std::nullopt;
-}
-
-std::optional<Measured> luminosity_from_radius(const RowInputs& row) {
-  const auto radius = row.inputs.peek(Quantity::stellar_radius, row.star.stellar_radius);
-  if (!radius || !row.teff) return std::nullopt;
-  return product(std::pow(constants::solar_teff, -4), {{radius->used, 2}, {row.teff->used, 4}});
-}
-
-std::optional<Measured> axis_from_period(const RowInputs& row) {
-  const auto period = row.inputs.peek(Quantity::orbital_period, row.planet.orbital_period);
-  const auto mass = row.inputs.peek(Quantity::stellar_mass, row.star.stellar_mass);
-  if (!period || !mass) return std::nullopt;
-  return product(semi_major_axis_of(1, 1), {{period->used, 2.0 / 3}, {mass->used, 1.0 / 3}});
-}
-
 }  // namespace
 
-std::string contradictions(const RowInputs& row, const Measured& insolation) {
-  Comparison comparison(row.inputs.flags());
-  comparison.compare(Quantity::luminosity, stated_luminosity(row), luminosity_from_radius(row),
-                     "stellar_radius and teff");
-  comparison.compare(Quantity::semi_major_axis,
-                     used(row.inputs.peek(Quantity::semi_major_axis, row.planet.semi_major_axis)),
-                     axis_from_period(row), "orbital_period and stellar_mass");
-  comparison.compare(Quantity::insolation, used(row.inputs.peek(Quantity::insolation, row.planet.insolation)),
-                     insolation, "the route used");
+std::string contradictions(Resolver& resolver, const Measured* insolation) {
+  using namespace ways;
+  const Resolver::Quiet quiet(resolver);
+  Comparison comparison(resolver);
+  comparison.compare(Quantity::luminosity, stated_light, {luminosity_from_radius});
+  comparison.compare(Quantity::luminosity, light_without_magnitudes, {luminosity_from_photometry});
+  comparison.compare(Quantity::teff, stated_teff, {teff_from_vk, teff_from_bp_rp});
+  comparison.compare(Quantity::log_g, stated_gravity, {gravity});
+  comparison.compare(Quantity::distance, stated_distance, {distance_from_parallax});
+  comparison.compare(Quantity::semi_major_axis, stated_axis, {axis_from_period, axis_from_scaled_and_stated_radius});
+  comparison.compare(Quantity::planet_radius, stated_planet_radius,
+                     {planet_radius_from_ratio, planet_radius_from_depth});
+  if (insolation != nullptr) {
+    if (const auto stated = resolver.take(Quantity::insolation)) {
+      comparison.judge(Quantity::insolation, stated->used, "stated", *insolation, "the route used");
+    }
+  }
   return comparison.words();
 }
 

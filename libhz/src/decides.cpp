@@ -6,12 +6,21 @@
 namespace hz {
 namespace {
 
-/// The distributions of an input, by the quantity they belong to.
-std::vector<std::pair<Quantity, Distribution*>> distributions_of(PlacementInput& input) {
-  std::vector<std::pair<Quantity, Distribution*>> all = {{Quantity::teff, &input.teff},
-                                                         {Quantity::eccentricity, &input.eccentricity},
-                                                         {Quantity::planet_mass, &input.planet_mass}};
-  for (InsolationTerm& term : input.terms) all.emplace_back(term.quantity, &term.x);
+/// A distribution of an input, and whose it is.
+struct Part {
+  VarianceShare whose;
+  Distribution* x = nullptr;
+
+  [[nodiscard]] bool is(const VarianceShare& other) const {
+    return whose.quantity == other.quantity && whose.scatter_of == other.scatter_of;
+  }
+};
+
+std::vector<Part> parts_of(PlacementInput& input) {
+  std::vector<Part> all = {{{Quantity::teff, {}, 0}, &input.teff},
+                           {{Quantity::eccentricity, {}, 0}, &input.eccentricity},
+                           {{Quantity::planet_mass, {}, 0}, &input.planet_mass}};
+  for (InsolationTerm& term : input.terms) all.push_back({{term.quantity, term.scatter_of, 0}, &term.x});
   return all;
 }
 
@@ -33,12 +42,13 @@ std::optional<double> position(const PlacementInput& input, const Settings& sett
 }
 
 /// Half the change of zone position from the input's lower to its upper 68 per cent point.
-double swing(const PlacementInput& input, Quantity quantity, const Settings& settings) {
+double swing(const PlacementInput& input, const VarianceShare& which, const Settings& settings) {
   const auto moved = [&](double sign) {
     PlacementInput copy = input;
-    for (const auto& [which, x] : distributions_of(copy)) {
-      if (which != quantity) continue;
-      *x = Distribution::exact(sign > 0 ? x->central() + x->plus() : x->central() - x->minus());
+    for (const Part& part : parts_of(copy)) {
+      if (!part.is(which)) continue;
+      const Distribution& x = *part.x;
+      *part.x = Distribution::exact(sign > 0 ? x.central() + x.plus() : x.central() - x.minus());
     }
     return position(copy, settings);
   };
@@ -59,10 +69,10 @@ std::vector<VarianceShare> variance_shares(const PlacementInput& input, const Se
   PlacementInput copy = input;
   std::vector<VarianceShare> shares;
   double total = 0;
-  for (const auto& [quantity, x] : distributions_of(copy)) {
-    if (x->is_exact()) continue;
-    const double moved = swing(input, quantity, settings);
-    shares.push_back({quantity, moved * moved});
+  for (const Part& part : parts_of(copy)) {
+    if (part.x->is_exact()) continue;
+    const double moved = swing(input, part.whose, settings);
+    shares.push_back({part.whose.quantity, part.whose.scatter_of, moved * moved});
     total += moved * moved;
   }
   if (!(total > 0)) return {};
@@ -71,11 +81,12 @@ std::vector<VarianceShare> variance_shares(const PlacementInput& input, const Se
   return shares;
 }
 
-std::optional<double> settling_factor(const PlacementInput& input, Quantity quantity, const Settings& settings) {
+std::optional<double> settling_factor(const PlacementInput& input, const VarianceShare& which,
+                                      const Settings& settings) {
   const auto firm_at = [&](double factor) {
     PlacementInput copy = input;
-    for (const auto& [which, x] : distributions_of(copy)) {
-      if (which == quantity) *x = x->scaled(factor);
+    for (const Part& part : parts_of(copy)) {
+      if (part.is(which)) *part.x = part.x->scaled(factor);
     }
     return is_firm(copy, settings);
   };

@@ -17,13 +17,23 @@ constexpr FlagInfo infos[] = {
     {flag::planet_mass_assumed, "no usable mass or radius: 1 Earth mass assumed"},
     {flag::circular_assumed, "no eccentricity given: a circular orbit assumed"},
     {flag::eccentricity_limit, "the eccentricity is an upper limit: a half-normal with 95 % below it"},
+    {flag::main_sequence_assumed, "a relation that holds for main-sequence stars gave a value that was used"},
+    {flag::extinction_ignored, "photometry of a star beyond 100 pc was used without an extinction, none being given"},
+    {flag::distance_prior,
+     "the parallax is not above ten times its error: the distance leans on a prior (Bailer-Jones 2015)"},
+    {flag::companion, "the list says that the star is not single; the light of other stars is left out"},
+    {flag::close_companion,
+     "a companion within ten times the outer zone limit, or a planet that circles both stars: no verdict is firmer "
+     "than "
+     "likely"},
     {flag::assumed_error,
      "the list gives no half-width (or a printed 0) for this quantity; the documented one was assumed"},
     {flag::wide_error,
      "the lower half-width is larger than the value; the distribution is cut where the quantity ends, at 0"},
     {flag::limit_ignored, "this quantity is only a limit; another route was taken"},
     {flag::inconsistent,
-     "the list states this quantity twice, beyond 3 sigma and 10 % apart; both values stand in the note"},
+     "the list states this quantity twice, beyond 3 sigma and 10 % apart, and both values stand in the note; for star: "
+     "rows of its planets state different stars"},
 };
 
 }  // namespace
@@ -35,11 +45,5 @@ void Flags::raise(std::string_view word) {
 }
 
 void Flags::raise(std::string_view word, Quantity quantity) { raise(std::string(word) + std::string(name(quantity))); }
-
-void Flags::forget_assumptions_since(std::size_t count) {
-  const auto first = words_.begin() + static_cast<std::ptrdiff_t>(count);
-  const auto is_assumption = [](const std::string& word) { return word.starts_with(flag::assumed_error); };
-  words_.erase(std::remove_if(first, words_.end(), is_assumption), words_.end());
-}
 
 }  // namespace hz

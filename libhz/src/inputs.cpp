@@ -13,6 +13,21 @@ constexpr double ln10 = 2.302585092994045684;
 
 bool is_logarithm(Quantity quantity) { return quantity == Quantity::log_luminosity || quantity == Quantity::log_g; }
 
+bool is_extinction(Quantity quantity) {
+  return quantity == Quantity::extinction_v || quantity == Quantity::reddening_bv;
+}
+
+/// Quantities that may as well be negative; half-widths larger than the value are nothing strange there.
+bool is_signed(Quantity quantity) {
+  return is_logarithm(quantity) || quantity == Quantity::parallax || quantity == Quantity::metallicity ||
+         (info(quantity).unit == "mag" && !is_extinction(quantity));
+}
+
+/// Assumed errors of these are half-widths, not shares of the value.
+bool has_absolute_error(Quantity quantity) {
+  return quantity == Quantity::eccentricity || (is_signed(quantity) && quantity != Quantity::parallax);
+}
+
 /// Whose assumed error a quantity shares.
 Quantity error_source(Quantity quantity) {
   if (quantity == Quantity::log_luminosity) return Quantity::luminosity;
@@ -24,8 +39,8 @@ Quantity error_source(Quantity quantity) {
 std::optional<double> assumed_half_width(Quantity quantity, double value, const AssumedErrors& errors) {
   const auto found = errors.find(error_source(quantity));
   if (found == errors.end() || !(found->second > 0)) return std::nullopt;
-  if (is_logarithm(quantity)) return found->second / ln10;
-  return quantity == Quantity::eccentricity ? found->second : found->second * value;
+  if (quantity == Quantity::log_luminosity) return found->second / ln10;
+  return has_absolute_error(quantity) ? found->second : found->second * std::abs(value);
 }
 
 bool gives_no_error(const Measured& measured) {
@@ -35,8 +50,9 @@ bool gives_no_error(const Measured& measured) {
 }  // namespace
 
 AssumedErrors default_assumed_errors() {
-  // Medians of a public composite list of 2023 (luminosity from radius and Teff). For a/R the errors of a and R
-  // together.
+  // Medians of a public composite list of 2023 (luminosity from radius and Teff; for a/R the errors of a and R
+  // together; magnitudes, log g and metallicity absolute). Adopted: B as V, J and H as K; Gaia's 0.01 mag for zero
+  // points and variability, far above its formal errors; colours, extinctions, density, depth and ratio.
   return {{Quantity::teff, 0.016},
           {Quantity::stellar_radius, 0.06},
           {Quantity::stellar_mass, 0.056},
@@ -47,11 +63,33 @@ AssumedErrors default_assumed_errors() {
           {Quantity::insolation, 0.06},
           {Quantity::luminosity, 0.14},
           {Quantity::distance, 0.012},
-          {Quantity::eccentricity, 0.05}};
+          {Quantity::eccentricity, 0.05},
+          {Quantity::parallax, 0.012},
+          {Quantity::magnitude_v, 0.08},
+          {Quantity::magnitude_b, 0.08},
+          {Quantity::magnitude_g, 0.01},
+          {Quantity::magnitude_bp, 0.01},
+          {Quantity::magnitude_rp, 0.01},
+          {Quantity::magnitude_j, 0.023},
+          {Quantity::magnitude_h, 0.023},
+          {Quantity::magnitude_k, 0.023},
+          {Quantity::magnitude_bol, 0.1},
+          {Quantity::color_bv, 0.03},
+          {Quantity::color_vk, 0.08},
+          {Quantity::color_vj, 0.08},
+          {Quantity::color_bp_rp, 0.015},
+          {Quantity::extinction_v, 0.1},
+          {Quantity::reddening_bv, 0.1},
+          {Quantity::log_g, 0.075},
+          {Quantity::metallicity, 0.1},
+          {Quantity::stellar_density, 0.15},
+          {Quantity::inclination, 0.01},
+          {Quantity::radius_ratio, 0.05},
+          {Quantity::transit_depth, 0.1}};
 }
 
 Domain domain_of(Quantity quantity) {
-  if (is_logarithm(quantity)) return {-infinity, infinity};
+  if (is_signed(quantity)) return {-infinity, infinity};
   if (quantity == Quantity::eccentricity) return {0, 1};
   return {0, infinity};
 }
@@ -65,7 +103,8 @@ std::optional<Problem> Inputs::refusal(Quantity quantity, const Measured& measur
     if (measured.value >= 0 && measured.value < 1) return std::nullopt;
     return out_of_range("a bound orbit has 0 <= eccentricity < 1");
   }
-  if (is_logarithm(quantity) || measured.value > 0) return std::nullopt;
+  if (is_signed(quantity) || measured.value > 0) return std::nullopt;
+  if (is_extinction(quantity) && measured.value == 0) return std::nullopt;
   return out_of_range("it must be above 0");
 }
 
@@ -79,16 +118,14 @@ Input Inputs::settle(Quantity quantity, const Measured& measured) const {
   }
   if (gives_no_error(measured)) {
     const std::optional<double> assumed = assumed_half_width(quantity, measured.value, settings_.assumed_errors);
-    if (assumed) flags_.raise(flag::assumed_error, quantity);
+    input.assumed = assumed.has_value();
     input.used.minus = input.used.plus = assumed.value_or(0);
   } else {
     // One half-width given serves both sides; a zero beside a positive one stays a zero.
     input.used.minus = measured.minus ? measured.minus : measured.plus;
     input.used.plus = measured.plus ? measured.plus : measured.minus;
   }
-  if (!is_logarithm(quantity) && *input.used.minus > measured.value && measured.value > 0) {
-    flags_.raise(flag::wide_error, quantity);
-  }
+  input.wide = !is_signed(quantity) && *input.used.minus > measured.value && measured.value > 0;
   if (*input.used.minus + *input.used.plus > 0) {
     input.x = Distribution::two_piece(measured.value, *input.used.minus, *input.used.plus, settings_.asymmetry,
                                       domain_of(quantity));
@@ -111,8 +148,12 @@ Result<std::optional<Input>> Inputs::take(Quantity quantity, const Field& field)
 
 std::optional<Input> Inputs::peek(Quantity quantity, const Field& field) const {
   if (!field.stated || field.stated->limit != LimitMark::none || refusal(quantity, *field.stated)) return std::nullopt;
-  Flags unheard;
-  return Inputs(settings_, unheard).settle(quantity, *field.stated);
+  return settle(quantity, *field.stated);
+}
+
+void Inputs::raise(Quantity quantity, const Input& input) const {
+  if (input.assumed) flags_.raise(flag::assumed_error, quantity);
+  if (input.wide) flags_.raise(flag::wide_error, quantity);
 }
 
 Result<Input> Inputs::eccentricity(const Field& field) const {
@@ -126,7 +167,11 @@ Result<Input> Inputs::eccentricity(const Field& field) const {
     return circular;
   }
   if (const std::optional<Problem> problem = refusal(Quantity::eccentricity, *field.stated)) return *problem;
-  if (!upper) return settle(Quantity::eccentricity, *field.stated);
+  if (!upper) {
+    Input settled = settle(Quantity::eccentricity, *field.stated);
+    raise(Quantity::eccentricity, settled);
+    return settled;
+  }
   flags_.raise(flag::eccentricity_limit);
   if (!(field.stated->value > 0)) return circular;
   Input input = circular;

@@ -12,6 +12,8 @@ namespace hz {
 struct Input {
   Distribution x = Distribution::exact(0);
   Measured used;
+  bool assumed = false;  // the list gives no error: that of the settings was taken
+  bool wide = false;     // the half-width exceeds the value
 };
 
 /// Takes fields out of one row.
@@ -20,9 +22,12 @@ public:
   Inputs(const Settings& settings, Flags& flags) : settings_(settings), flags_(flags) {}
 
   /// The field as an input; empty when it is absent, or only a limit (then flagged limit_ignored). An unreadable cell
-  /// or a value outside the quantity's domain is a Problem. A missing or zero error is replaced by the assumed one, and
-  /// flagged.
+  /// or a value outside the quantity's domain is a Problem. A missing or zero error is replaced by the assumed one; the
+  /// caller raises its flags when it uses the value.
   [[nodiscard]] Result<std::optional<Input>> take(Quantity quantity, const Field& field) const;
+
+  /// Flags what was assumed of an input that is used.
+  void raise(Quantity quantity, const Input& input) const;
 
   /// The same without flags, and empty on any trouble: for comparing what a list says twice.
   [[nodiscard]] std::optional<Input> peek(Quantity quantity, const Field& field) const;
@@ -42,7 +47,8 @@ private:
   Flags& flags_;
 };
 
-/// Where a quantity can lie: eccentricity in [0, 1), logarithms anywhere, everything else above 0.
+/// Where a quantity can lie: eccentricity in [0, 1), extinctions at 0 or above, logarithms, magnitudes, colours and
+/// parallaxes anywhere, everything else above 0.
 [[nodiscard]] Domain domain_of(Quantity quantity);
 
 }  // namespace hz

@@ -103,8 +103,15 @@ double falling_root(const Function& f, double scale) {
 
 }  // namespace
 
+double TeffCurve::operator()(double teff) const {
+  double sum = slope * (teff - centre);
+  if (power != 0) sum += power * std::log(teff);
+  if (weight != 0) sum += weight * (*correction)(teff);
+  return sum;
+}
+
 double central_insolation(const PlacementInput& input) {
-  double sum = input.offset + input.teff_power * std::log(input.teff.central());
+  double sum = input.offset + input.curve(input.teff.central());
   for (const InsolationTerm& term : input.terms) {
     sum += term.power * (term.decadic ? ln10 * term.x.central() : std::log(term.x.central()));
   }

@@ -99,18 +99,25 @@ void add_used(std::vector<OutputColumn>& columns, Quantity quantity, Get get) {
   part("", about.description + ", as used", [](const Measured& m) { return std::optional(m.value); });
   part("_err_minus", "lower half-width of " + used, [](const Measured& m) { return m.minus; });
   part("_err_plus", "upper half-width of " + used, [](const Measured& m) { return m.plus; });
-  columns.push_back({{used + "_route", "", "meta.note", "how " + used + " was obtained"}, [get](const RankedRow& row) {
-                       const std::optional<Derived> derived = get(row.candidate.answer);
-                       return derived ? text(derived->route) : CellValue();
-                     }});
+  columns.push_back(
+      {{about.name + "_route", "", "meta.note", "how " + used + " was obtained"}, [get](const RankedRow& row) {
+         const std::optional<Derived> derived = get(row.candidate.answer);
+         return derived ? text(derived->route) : CellValue();
+       }});
 }
 
 void add_all_used(std::vector<OutputColumn>& columns) {
+  add_used(columns, Quantity::teff, [](const Answer& a) { return a.star.teff; });
   add_used(columns, Quantity::luminosity, [](const Answer& a) { return a.star.luminosity; });
+  add_used(columns, Quantity::stellar_radius, [](const Answer& a) { return a.star.stellar_radius; });
+  add_used(columns, Quantity::stellar_mass, [](const Answer& a) { return a.star.stellar_mass; });
+  add_used(columns, Quantity::distance, [](const Answer& a) { return a.star.distance; });
   add_used(columns, Quantity::semi_major_axis,
            [](const Answer& a) { return a.planet ? a.planet->semi_major_axis : std::nullopt; });
   add_used(columns, Quantity::insolation,
            [](const Answer& a) { return a.planet ? std::optional(a.planet->insolation) : std::nullopt; });
+  add_used(columns, Quantity::planet_radius,
+           [](const Answer& a) { return a.planet ? a.planet->planet_radius : std::nullopt; });
   add_used(columns, Quantity::planet_mass,
            [](const Answer& a) { return a.planet ? std::optional(a.planet->planet_mass) : std::nullopt; });
 }

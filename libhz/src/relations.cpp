@@ -3,17 +3,18 @@
 #include <toml++/toml.h>
 
 #include <algorithm>
-#include <charconv>
 #include <cmath>
+#include <iterator>
+#include <limits>
 #include <string_view>
 #include <vector>
 
+#include "hz/relation.hpp"
 #include "hz/require.hpp"
 
 namespace hz {
 namespace embedded {
 extern const std::string_view planet_mass_radius;
-extern const std::string_view main_sequence;
 }  // namespace embedded
 
 namespace {
@@ -26,6 +27,7 @@ struct MassRadiusPiece {
   double scatter = 0;
 
   [[nodiscard]] double log_mass(double radius) const { return std::log10(radius / prefactor) / exponent; }
+  [[nodiscard]] double log_radius(double mass) const { return std::log10(prefactor) + exponent * std::log10(mass); }
 };
 
 double number(const toml::node& node, std::string_view key) {
@@ -34,12 +36,17 @@ double number(const toml::node& node, std::string_view key) {
   return *value;
 }
 
+/// The last piece has no upper end.
+double mass_below(const toml::node& node) {
+  return node.as_table()->contains("mass_below") ? number(node, "mass_below") : std::numeric_limits<double>::infinity();
+}
+
 std::vector<MassRadiusPiece> read_pieces() {
   const toml::table table = toml::parse(embedded::planet_mass_radius);
   std::vector<MassRadiusPiece> pieces;
   for (const toml::node& node : *table["piece"].as_array()) {
-    pieces.push_back({number(node, "mass_below"), number(node, "prefactor"), number(node, "exponent"),
-                      number(node, "scatter_percent") / 100});
+    pieces.push_back(
+        {mass_below(node), number(node, "prefactor"), number(node, "exponent"), number(node, "scatter_percent") / 100});
   }
   return pieces;
 }
@@ -49,46 +56,30 @@ const std::vector<MassRadiusPiece>& pieces() {
   return read;
 }
 
-/// The piece a radius lies on: the first whose upper break it does not pass.
+/// The piece a mass lies on; a break belongs to the piece above.
+const MassRadiusPiece& piece_at(double mass) {
+  const auto reaches = [mass](const MassRadiusPiece& piece) { return mass < piece.mass_below; };
+  const auto found = std::find_if(pieces().begin(), pieces().end(), reaches);
+  return found == pieces().end() ? pieces().back() : *found;
+}
+
+double log_radius(double mass) { return piece_at(mass).log_radius(mass); }
+
+/// The piece a radius lies on: the first whose upper break it does not pass. Radii above the last rising piece below
+/// the giant planets stay on it.
 const MassRadiusPiece& piece_of(double radius) {
-  for (const MassRadiusPiece& piece : pieces()) {
-    if (piece.log_mass(radius) < std::log10(piece.mass_below)) return piece;
-  }
-  return pieces().back();
+  const auto falls = [](const MassRadiusPiece& piece) { return piece.exponent < 0; };
+  const auto giants = std::find_if(pieces().begin(), pieces().end(), falls);
+  const auto holds = [radius](const MassRadiusPiece& piece) {
+    return piece.log_mass(radius) < std::log10(piece.mass_below);
+  };
+  const auto found = std::find_if(pieces().begin(), giants, holds);
+  return found == giants ? *std::prev(giants) : *found;
 }
 
 double log_mass(double radius) {
   const MassRadiusPiece& piece = piece_of(radius);
   return std::min(piece.log_mass(radius), std::log10(piece.mass_below));
-}
-
-struct MainSequenceRow {
-  double teff = 0;
-  double radius = 0;
-};
-
-/// Column `index` of a comma-separated line as a number.
-double cell(std::string_view line, int index) {
-  for (; index > 0; --index) line.remove_prefix(line.find(',') + 1);
-  double value = 0;
-  const auto [end, error] = std::from_chars(line.data(), line.data() + line.size(), value);
-  HZ_REQUIRE(error == std::errc());
-  return value;
-}
-
-/// Rows by rising Teff. Columns 1 and 3 of the table are Teff and radius.
-std::vector<MainSequenceRow> read_main_sequence() {
-  std::vector<MainSequenceRow> rows;
-  bool header = true;
-  for (std::string_view rest = embedded::main_sequence; !rest.empty();) {
-    const std::string_view line = rest.substr(0, rest.find('\n'));
-    rest.remove_prefix(std::min(rest.size(), line.size() + 1));
-    if (line.empty() || line.front() == '#') continue;
-    if (!header) rows.push_back({cell(line, 1), cell(line, 3)});
-    header = false;
-  }
-  std::sort(rows.begin(), rows.end(), [](const auto& a, const auto& b) { return a.teff < b.teff; });
-  return rows;
 }
 
 }  // namespace
@@ -107,21 +98,31 @@ Measured log_mass_from_radius(const Measured& planet_radius) {
   const double above = log_mass(planet_radius.value * std::exp(wide(planet_radius.plus))) - centre;
   result.plus = above > 0 ? above : *result.minus;
   if (!(*result.minus > 0)) {
-    const double slope = pieces().back().exponent * std::log(10.0);
+    const double slope = piece_of(planet_radius.value).exponent * std::log(10.0);
     result.minus = wide(planet_radius.minus) / slope;
     result.plus = wide(planet_radius.plus) / slope;
   }
   return result;
 }
 
+Measured log_radius_from_mass(const Measured& planet_mass) {
+  HZ_REQUIRE(planet_mass.value > 0);
+  const double centre = log_radius(planet_mass.value);
+  const double below = log_radius(planet_mass.value * std::exp(-planet_mass.minus.value_or(0) / planet_mass.value));
+  const double above = log_radius(planet_mass.value * std::exp(planet_mass.plus.value_or(0) / planet_mass.value));
+  const double scatter = piece_at(planet_mass.value).scatter / std::log(10.0);
+  Measured result;
+  result.value = centre;
+  // Of a giant planet the larger mass has the smaller radius.
+  result.minus = std::hypot(scatter, centre - std::min({below, centre, above}));
+  result.plus = std::hypot(scatter, std::max({below, centre, above}) - centre);
+  return result;
+}
+
 std::optional<double> main_sequence_radius(double teff) {
-  static const std::vector<MainSequenceRow> rows = read_main_sequence();
-  if (teff < rows.front().teff || teff > rows.back().teff) return std::nullopt;
-  const auto above = std::lower_bound(rows.begin() + 1, rows.end() - 1, teff,
-                                      [](const MainSequenceRow& row, double t) { return row.teff < t; });
-  const auto below = above - 1;
-  const double part = (teff - below->teff) / (above->teff - below->teff);
-  return below->radius + part * (above->radius - below->radius);
+  const Relation& radius = relation("radius_teff_pm13");
+  if (!(teff >= radius.range().low && teff <= radius.range().high)) return std::nullopt;
+  return radius(teff);
 }
 
 }  // namespace hz

@@ -39,7 +39,7 @@ struct Drawn {
 Drawn draw_all(const PlacementInput& input, Generator& generator) {
   Drawn drawn;
   drawn.teff = draw(input.teff, generator);
-  double product = std::exp(input.offset) * std::pow(drawn.teff, input.teff_power);
+  double product = std::exp(input.offset + input.curve(drawn.teff));
   for (const InsolationTerm& term : input.terms) {
     const double x = draw(term.x, generator);
     product *= std::pow(term.decadic ? std::pow(10, x) : x, term.power);

@@ -14,6 +14,10 @@ const Field* stated_field(const ListRow& row, Quantity quantity) {
   return nullptr;
 }
 
+Field* stated_field(ListRow& row, Quantity quantity) {
+  return const_cast<Field*>(stated_field(static_cast<const ListRow&>(row), quantity));
+}
+
 bool has_stated_field(Quantity quantity) { return stated_field(ListRow{}, quantity) != nullptr; }
 
 std::string stated_text(const ListRow& row, Quantity quantity) {

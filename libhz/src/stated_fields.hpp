@@ -7,8 +7,6 @@
 
 namespace hz {
 
-/// nullptr for a quantity that records do not hold as a number.
-[[nodiscard]] const Field* stated_field(const ListRow& row, Quantity quantity);
 [[nodiscard]] bool has_stated_field(Quantity quantity);
 
 /// A name, kind or code as text; empty where the row says nothing.

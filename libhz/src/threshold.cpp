@@ -83,7 +83,7 @@ Threshold::Threshold(const PlacementInput& input, const FluxLimit& limit, const 
 double Threshold::value(double teff, const LimitCurve& curve) const {
   const double above_zero = std::max(teff, 1.0);
   const double flux = std::log(curve(above_zero));
-  return input_.teff_power > 0 ? flux - input_.teff_power * std::log(above_zero) : flux;
+  return flux - input_.curve(above_zero);
 }
 
 /// The limit is linear in ln(mass) between its fitted masses and held outside, so the Gauss rule is taken in the

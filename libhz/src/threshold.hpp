@@ -1,4 +1,5 @@
-// What the Teff-free part of ln S must reach to lie at a limit: ln S_limit(Teff, planet mass) - teff_power ln(Teff).
+// What the Teff-free part of ln S must reach to lie at a limit: ln S_limit(Teff, planet mass) minus what Teff itself
+// adds to ln S.
 #pragma once
 #include <vector>
 

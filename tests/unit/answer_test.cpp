@@ -141,7 +141,9 @@ TEST(StarWithoutPlanet, IsAnsweredWithItsZone) {
   EXPECT_NEAR(find_edge(a, ZoneEdge::optimistic_inner)->distance->value, 0.75038, 5e-6);
   EXPECT_NEAR(find_edge(a, ZoneEdge::optimistic_outer)->distance->value, 1.76777, 5e-6);
   EXPECT_EQ(find_edge(a, ZoneEdge::conservative_inner)->distance->plus, 0);
-  EXPECT_FALSE(find_edge(a, ZoneEdge::conservative_inner)->period);
+  // The mass follows from the light on the main sequence (Eker et al. 2018: log M = (0 + 0.007) / 5.743).
+  EXPECT_NEAR(a.star.stellar_mass->measured.value, std::pow(10, 0.007 / 5.743), 1e-9);
+  EXPECT_NEAR(*find_edge(a, ZoneEdge::conservative_inner)->period, 365.2569 * std::pow(0.95044, 1.5), 1);
 }
 
 TEST(StarWithoutPlanet, DistancesTakeHalfTheRelativeErrorOfTheLight) {

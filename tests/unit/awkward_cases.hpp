@@ -73,7 +73,7 @@ inline PlacementInput make(Kind kind, const Star& star, const Widths& widths, As
           {Quantity::semi_major_axis, spread(std::sqrt(0.3 / insolation), 0.023, 0.03, asymmetry), -2, false}};
       break;
     case Kind::radius_and_period: {
-      input.teff_power = 4;
+      input.curve.power = 4;
       input.offset = -4 * std::log(constants::solar_teff);
       const double radius = 0.5;
       const double axis_squared = radius * radius * std::exp(ln_teff) / insolation;
@@ -85,7 +85,7 @@ inline PlacementInput make(Kind kind, const Star& star, const Widths& widths, As
       break;
     }
     case Kind::scaled_axis: {
-      input.teff_power = 4;
+      input.curve.power = 4;
       const double scaled = 50;
       input.offset = std::log(insolation * scaled * scaled) - ln_teff - 4 * std::log(constants::solar_teff);
       input.terms = {

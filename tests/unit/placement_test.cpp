@@ -61,7 +61,7 @@ INSTANTIATE_TEST_SUITE_P(Quarters, AwkwardPlacement, testing::Values(0, 1, 2, 3)
 TEST(Placement, AnErrorOfEccentricityOfAnySizeAgreesWithTheSampler) {
   PlacementInput input;
   input.offset = -4 * std::log(constants::solar_teff);
-  input.teff_power = 4;
+  input.curve.power = 4;
   input.teff = Distribution::two_piece(5898, 13, 13, Asymmetry::median, test::positive);
   input.terms = {{Quantity::stellar_radius,
                   Distribution::two_piece(1.07, 0.015, 0.015, Asymmetry::median, test::positive), 2, false},

@@ -21,6 +21,7 @@ struct Says {
   Field planet_radius = {};
   Field planet_mass = {};
   Field min_mass = {};
+  Field inclination = {};
   PlanetMassKind planet_mass_kind = PlanetMassKind::unsaid;
 };
 
@@ -28,6 +29,7 @@ Answer with(const Says& says, std::string_view set = default_limit_set) {
   ListRow row = earth();
   row.planet.planet_mass = says.planet_mass;
   row.planet.min_mass = says.min_mass;
+  row.planet.inclination = says.inclination;
   row.planet.planet_radius = says.planet_radius;
   row.planet.planet_mass_kind = says.planet_mass_kind;
   Answer result = answer(row, settings_of(set));
@@ -47,8 +49,22 @@ TEST(PlanetMassRoute, StatedComesFirst) {
 
 TEST(PlanetMassRoute, MinimumComesNextAndIsFlagged) {
   const Answer a = with({.planet_radius = exactly(2), .min_mass = exactly(2.5)});
-  EXPECT_EQ(mass(a), 2.5);
+  // 1 / sin i of an isotropic inclination has the median 2 / sqrt 3, its 16 and 84 per cent points are 1.01283 and
+  // 1.85014 (P(sin i < s) = 1 - sqrt(1 - s^2)).
+  EXPECT_NEAR(mass(a), 2.5 * 2 / std::sqrt(3.0), 2e-6);
+  EXPECT_NEAR(*a.planet->planet_mass.measured.minus, 2.5 * (2 / std::sqrt(3.0) - 1.01283), 1e-4);
+  EXPECT_NEAR(*a.planet->planet_mass.measured.plus, 2.5 * (1.85014 - 2 / std::sqrt(3.0)), 1e-4);
   EXPECT_TRUE(has_flag(a, "min_mass_used"));
+}
+
+TEST(PlanetMassRoute, AStatedInclinationSettlesAMinimumMass) {
+  const Answer a = with({.min_mass = value(2.5, 0.1, 0.1), .inclination = value(60, 3, 3)});
+  EXPECT_NEAR(mass(a), 2.5 / std::sin(60 * std::acos(-1) / 180), 1e-9);
+  EXPECT_EQ(a.planet->planet_mass.route, "min_mass and inclination");
+  EXPECT_FALSE(has_flag(a, "min_mass_used"));
+  // First order: d ln M = 0.04 (+) cot i di.
+  const double relative = std::hypot(0.04, 3 * std::acos(-1) / 180 / std::tan(60 * std::acos(-1) / 180));
+  EXPECT_NEAR(a.input->planet_mass.plus(), relative / std::log(10), 1e-9);
 }
 
 TEST(PlanetMassRoute, RadiusComesNextWithItsScatter) {
@@ -69,7 +85,7 @@ TEST(PlanetMassRoute, OneEarthMassIsAssumedInTheEnd) {
 
 TEST(PlanetMassRoute, KindOfMassIsHonoured) {
   const Answer minimum = with({.planet_mass = exactly(3), .planet_mass_kind = PlanetMassKind::minimum});
-  EXPECT_EQ(mass(minimum), 3);
+  EXPECT_NEAR(mass(minimum), 3 * 2 / std::sqrt(3.0), 3e-6);
   EXPECT_TRUE(has_flag(minimum, "min_mass_used"));
   const Answer measured = with({.planet_mass = exactly(3), .planet_mass_kind = PlanetMassKind::measured});
   EXPECT_FALSE(has_flag(measured, "min_mass_used"));

@@ -3,6 +3,7 @@
 #include <gtest/gtest.h>
 
 #include <cmath>
+#include <map>
 #include <stdexcept>
 
 namespace hz {
@@ -78,6 +79,47 @@ TEST(MassFromRadius, WidthsStayPositiveWhereTheRelationIsFlat) {
 }
 
 TEST(MassFromRadius, NeedsARadius) { EXPECT_THROW((void)log_mass_from_radius(radius(0)), std::logic_error); }
+
+Measured mass(double value, std::optional<double> minus = {}, std::optional<double> plus = {}) {
+  return {value, minus, plus, LimitMark::none, false};
+}
+double radius_of(double planet_mass) { return std::pow(10, log_radius_from_mass(mass(planet_mass)).value); }
+
+TEST(RadiusFromMass, UndoesTheMassFromTheRadius) {
+  // Prefactors have five digits, so at a break the pieces meet to 1e-5.
+  for (const double m : {0.05, 0.5, 1.0, 2.0, 2.04, 5.0, 17.0, 100.0, 131.0}) {
+    EXPECT_NEAR(std::pow(10, log_mass_from_radius(radius(radius_of(m))).value), m, 1e-4 * m) << m;
+  }
+}
+
+TEST(RadiusFromMass, IsContinuousAndPeaksWithTheGiants) {
+  for (const double at_break : {2.04, 131.58, 26636.0}) {
+    EXPECT_NEAR(radius_of(at_break * (1 - 1e-9)), radius_of(at_break), 2e-5 * radius_of(at_break)) << at_break;
+  }
+  EXPECT_GT(radius_of(131.58), radius_of(120));
+  EXPECT_GT(radius_of(131.58), radius_of(1000));
+  EXPECT_GT(radius_of(40000), radius_of(26636));
+}
+
+// Widths in dex: the scatter (4.03, 14.6, 7.37, 4.43 per cent of the radius) over ln 10.
+TEST(RadiusFromMass, WidthIsTheScatterOfThePiece) {
+  for (const auto& [m, scatter] : std::map<double, double>{{1, 0.0403}, {10, 0.146}, {318, 0.0737}, {3e4, 0.0443}}) {
+    EXPECT_NEAR(*log_radius_from_mass(mass(m)).minus, scatter / ln10, 1e-12) << m;
+    EXPECT_NEAR(*log_radius_from_mass(mass(m)).plus, scatter / ln10, 1e-12) << m;
+  }
+}
+
+TEST(RadiusFromMass, TheMassOwnErrorIsCarriedThroughTheSlope) {
+  const Measured small = log_radius_from_mass(mass(10, 1, 2));
+  EXPECT_NEAR(*small.minus, std::hypot(0.146, 0.1 * 0.589) / ln10, 1e-12);
+  EXPECT_NEAR(*small.plus, std::hypot(0.146, 0.2 * 0.589) / ln10, 1e-12);
+  // A heavier giant planet is the smaller one: its upper half-width in mass lowers the radius.
+  const Measured giant = log_radius_from_mass(mass(500, 0, 50));
+  EXPECT_NEAR(*giant.minus, std::hypot(0.0737, 0.1 * 0.044) / ln10, 1e-12);
+  EXPECT_NEAR(*giant.plus, 0.0737 / ln10, 1e-12);
+}
+
+TEST(RadiusFromMass, NeedsAMass) { EXPECT_THROW((void)log_radius_from_mass(mass(0)), std::logic_error); }
 
 // Source: Pecaut & Mamajek 2013, ApJS 208, 9, table 5, version 2024.05.15: rows G0V, M5V, M8V, O3V and L0V.
 TEST(MainSequenceRadius, IsTheTablesAtItsRows) {

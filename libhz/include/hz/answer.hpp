@@ -25,6 +25,7 @@ inline constexpr std::string_view assumed_route = "assumed";
 struct StarAnswer {
   std::optional<Derived> teff;
   std::optional<Derived> luminosity;
+  std::optional<Derived> stellar_radius;
   std::optional<Derived> stellar_mass;
   std::optional<Derived> distance;
 };
@@ -60,6 +61,7 @@ struct Margin {
 struct PlanetAnswer {
   Derived insolation;                      // Earth = 1, orbit-averaged
   std::optional<Derived> semi_major_axis;  // au; empty when only an insolation is known
+  std::optional<Derived> planet_radius;    // Earth
   Derived planet_mass;                     // Earth; what the planet-mass-dependent limit used
   double equilibrium_temperature = 0;      // K, at Settings::bond_albedo
   Probabilities probabilities;

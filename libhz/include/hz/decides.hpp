@@ -1,6 +1,7 @@
 // What decides a verdict: which input the zone position hangs on, and how much better it would have to be known.
 #pragma once
 #include <optional>
+#include <string_view>
 #include <vector>
 
 #include "hz/answer.hpp"
@@ -12,6 +13,7 @@ namespace hz {
 /// central values. The planet mass counts as Quantity::planet_mass.
 struct VarianceShare {
   Quantity quantity{};
+  std::string_view scatter_of;  // key of the relation whose scatter it is; empty for a measured value
   double share = 0;
 };
 
@@ -21,7 +23,7 @@ struct VarianceShare {
 /// By what factor (below 1) the half-widths of one input must shrink, all central values staying, for the verdict of
 /// the conservative zone (else the optimistic one) to become firm: inside or outside. Empty when it is firm already, or
 /// when this input alone cannot settle it.
-[[nodiscard]] std::optional<double> settling_factor(const PlacementInput& input, Quantity quantity,
+[[nodiscard]] std::optional<double> settling_factor(const PlacementInput& input, const VarianceShare& which,
                                                     const Settings& settings);
 
 }  // namespace hz

@@ -25,6 +25,11 @@ inline constexpr std::string_view mass_from_radius = "mass_from_radius";
 inline constexpr std::string_view planet_mass_assumed = "planet_mass_assumed";
 inline constexpr std::string_view circular_assumed = "circular_assumed";
 inline constexpr std::string_view eccentricity_limit = "eccentricity_limit";
+inline constexpr std::string_view main_sequence_assumed = "main_sequence_assumed";
+inline constexpr std::string_view extinction_ignored = "extinction_ignored";
+inline constexpr std::string_view distance_prior = "distance_prior";
+inline constexpr std::string_view companion = "companion";
+inline constexpr std::string_view close_companion = "close_companion";
 inline constexpr std::string_view assumed_error = "assumed_error:";
 inline constexpr std::string_view wide_error = "wide_error:";
 inline constexpr std::string_view limit_ignored = "limit_ignored:";
@@ -36,10 +41,6 @@ class Flags {
 public:
   void raise(std::string_view word);
   void raise(std::string_view word, Quantity quantity);
-  /// Forgets what was raised since there were `count` words: a value that was only looked at leaves no flags.
-  void forget_since(std::size_t count) { words_.resize(count); }
-  /// Forgets the errors assumed since then: a route that led nowhere used none. The limits that barred it stay flagged.
-  void forget_assumptions_since(std::size_t count);
   [[nodiscard]] const std::vector<std::string>& words() const { return words_; }
 
 private:

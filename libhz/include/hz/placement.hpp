@@ -2,28 +2,44 @@
 #pragma once
 #include <cstdint>
 #include <optional>
+#include <string_view>
 #include <vector>
 
 #include "hz/distribution.hpp"
 #include "hz/limit_set.hpp"
 #include "hz/quantity.hpp"
+#include "hz/relation.hpp"
 
 namespace hz {
 
 /// One independent input of the insolation: ln S gets power * ln x, or power * ln(10) * x when x is a decadic
-/// logarithm.
+/// logarithm (or a magnitude, whose power is -0.4).
 struct InsolationTerm {
   Quantity quantity{};
   Distribution x = Distribution::exact(1);
   double power = 1;
   bool decadic = false;
+  /// Key of the relation whose scatter this is; empty for a value of the row.
+  std::string_view scatter_of = {};
 };
 
-/// Everything a placement depends on. ln S = offset + sum of terms + teff_power ln(teff) - ln(1 - e^2) / 2.
+/// What Teff itself adds to ln S: power ln(teff) + slope (teff - centre) + weight * correction(teff).
+struct TeffCurve {
+  double power = 0;  // 4 where the luminosity follows from radius and Teff
+  double slope = 0;  // per K: what an input shared by Teff and luminosity adds, to first order
+  double centre = 0;
+  double weight = 0;                     // of the bolometric correction, -0.4 ln(10)
+  const Relation* correction = nullptr;  // not null when the weight is not 0
+
+  [[nodiscard]] double operator()(double teff) const;
+  [[nodiscard]] bool is_flat() const { return power == 0 && slope == 0 && weight == 0; }
+};
+
+/// Everything a placement depends on. ln S = offset + sum of terms + curve(teff) - ln(1 - e^2) / 2.
 struct PlacementInput {
   double offset = 0;
-  std::vector<InsolationTerm> terms;                   // independent of each other and of Teff
-  double teff_power = 0;                               // 4 where the luminosity follows from radius and Teff
+  std::vector<InsolationTerm> terms;  // independent of each other and of Teff
+  TeffCurve curve;
   Distribution teff = Distribution::exact(0);          // K
   Distribution eccentricity = Distribution::exact(0);  // 0 where the insolation is averaged already
   Distribution planet_mass = Distribution::exact(1);   // Earth masses, for limits that depend on it

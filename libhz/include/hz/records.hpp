@@ -6,6 +6,7 @@
 #include <vector>
 
 #include "hz/measured.hpp"
+#include "hz/quantity.hpp"
 #include "hz/result.hpp"
 
 namespace hz {
@@ -71,5 +72,9 @@ struct ListRow {
       problem;                    // the row as a whole could not be read (ragged, over-long); it is set aside with this
   std::vector<std::string> kept;  // the input's own cells that travel along, as text
 };
+
+/// The field that holds a quantity; nullptr for one that records do not hold as a number.
+[[nodiscard]] const Field* stated_field(const ListRow& row, Quantity quantity);
+[[nodiscard]] Field* stated_field(ListRow& row, Quantity quantity);
 
 }  // namespace hz

@@ -16,6 +16,16 @@ namespace hz {
 /// quadrature. Source    Chen & Kipping 2017, ApJ 834, 17, doi:10.3847/1538-4357/834/1/17, inverted.
 [[nodiscard]] Measured log_mass_from_radius(const Measured& planet_radius);
 
+/// Decadic logarithm of a planet's radius, from its mass, with 68 per cent half-widths.
+///
+/// Units     planet_mass in Earth masses, above 0, not a limit; the result in dex of Earth radii.
+/// Validity  all planets, brown dwarfs (131.58-26636 Earth masses, where the radius falls slowly) and low-mass stars.
+/// Error     the relation's scatter (4.03, 14.6, 7.37 or 4.43 per cent of the radius) and the mass's own half-widths
+/// carried
+///           through the relation, in quadrature.
+/// Source    Chen & Kipping 2017, ApJ 834, 17, doi:10.3847/1538-4357/834/1/17.
+[[nodiscard]] Measured log_radius_from_mass(const Measured& planet_mass);
+
 /// Radius of a main-sequence star of this Teff, linear between the table's rows; empty outside the table (2270-45900
 /// K).
 ///

@@ -4,6 +4,7 @@
 #include <map>
 #include <optional>
 
+#include "hz/distance.hpp"
 #include "hz/distribution.hpp"
 #include "hz/limit_set.hpp"
 #include "hz/quantity.hpp"
@@ -13,8 +14,8 @@ namespace hz {
 /// How probabilities are computed.
 enum class Method { quadrature, sampling };
 
-/// Which of two ways to a quantity comes first.
-enum class LuminosityFrom { stated, radius };
+/// Which way to a quantity comes first.
+enum class LuminosityFrom { stated, radius, photometry };
 enum class SemiMajorAxisFrom { period, stated };
 enum class InsolationFrom { computed, stated };
 
@@ -40,6 +41,7 @@ struct Settings {
   double bond_albedo = 0.3;  // for the equilibrium temperature only
   LuminosityFrom luminosity_from = LuminosityFrom::stated;
   SemiMajorAxisFrom semi_major_axis_from = SemiMajorAxisFrom::period;
+  double length_scale = default_length_scale;  // pc, of the prior for parallaxes not much larger than their errors
   InsolationFrom insolation_from = InsolationFrom::computed;
   Method method = Method::quadrature;
   std::uint64_t draws = 100000;

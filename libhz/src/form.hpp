@@ -1,0 +1,48 @@
+// A derived quantity as what it hangs on: its central value, its slope in every raw input, and what Teff adds exactly.
+#pragma once
+#include <cstddef>
+#include <string>
+#include <vector>
+
+#include "hz/placement.hpp"
+
+namespace hz {
+
+/// d value / d u of one source; u = ln x for a logarithmic source, x itself otherwise (magnitudes, scatters).
+struct FormTerm {
+  std::size_t source = 0;  // index in Sources
+  double slope = 0;
+};
+
+/// What a value owes to more than its row.
+struct Marks {
+  bool main_sequence = false;       // a relation of main-sequence stars was used
+  bool extinction_ignored = false;  // photometry without an extinction
+  bool distance_prior = false;      // a parallax that needed a prior
+
+  friend Marks operator|(const Marks& a, const Marks& b) {
+    return {a.main_sequence || b.main_sequence, a.extinction_ignored || b.extinction_ignored,
+            a.distance_prior || b.distance_prior};
+  }
+};
+
+/// The natural logarithm of a luminosity, radius, mass, distance, axis or insolation; or a plain magnitude or colour;
+/// or a Teff in K (then without curve).
+struct Form {
+  double value = 0;  // at the central values of all sources and of Teff
+  std::vector<FormTerm> terms;
+  TeffCurve curve;  // without a linear slope: that is the placement's
+  Marks marks;
+  std::string route;  // "stated", "stellar_radius and teff", …
+};
+
+/// Sums with the terms of shared sources put together. The route is that of the first.
+[[nodiscard]] Form operator+(Form a, const Form& b);
+[[nodiscard]] Form operator-(const Form& a, const Form& b);
+[[nodiscard]] Form operator*(double factor, Form form);
+[[nodiscard]] Form operator+(Form form, double constant);
+
+/// The derivative of a curve at a Teff.
+[[nodiscard]] double slope_at(const TeffCurve& curve, double teff);
+
+}  // namespace hz
