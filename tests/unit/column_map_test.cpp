@@ -76,6 +76,26 @@ TEST(ColumnMap, MistakesNameTheirPlace) {
   EXPECT_THAT(refusal("[columns]\nteff = \"a\"\nteff = \"b\"\n"), HasSubstr("map.toml:3:"));
 }
 
+TEST(ColumnMap, TextMayStandInSeveralColumns) {
+  const testing::Folder folder;
+  const auto list = folder.write("list.csv", "HIP,Name,T\n1,,5000\n2,Lantern 2,5000\n,,5000\n");
+  const auto rows =
+      testing::read_list(list, ColumnMap::parse("[columns]\nteff = \"T\"\nstar = [\"Name\", \"HIP\"]\n", "map.toml"));
+  EXPECT_EQ(rows[0].star.name, "1");
+  EXPECT_EQ(rows[1].star.name, "Lantern 2");
+  EXPECT_EQ(rows[2].star.name, "");
+  EXPECT_THAT(refusal("[columns]\nteff = [\"T1\", \"T2\"]\n"),
+              HasSubstr("map.toml:2:1: teff takes one column; only text, such as star, takes a list of them"));
+  EXPECT_THAT(refusal("[columns]\nstar = [1]\n"), HasSubstr("star must be text in quotes"));
+}
+
+TEST(ColumnMap, HeaderThatBeginsInBracketsStatesNoUnit) {
+  const testing::Folder folder;
+  const auto list = folder.write("list.csv", "[Fe/H]1,T\n-0.5,5000\n");
+  const auto map = ColumnMap::parse("[columns]\nmetallicity = \"[Fe/H]1\"\n", "map.toml");
+  EXPECT_EQ(testing::read_list(list, map)[0].star.metallicity.stated->value, -0.5);
+}
+
 TEST(ColumnMap, ColumnsMustBeThere) {
   const testing::Folder folder;
   const auto list = folder.write("list.csv", "star,T\nLantern 1,5000\n");

@@ -104,7 +104,22 @@ private:
   void take_columns(const toml::key& key, const toml::node& node) {
     const auto* const table = node.as_table();
     if (table == nullptr) fail(key.source(), "columns must be a section [columns]");
-    for (const auto& [name, value] : *table) map_.entries.push_back(entry(name, value));
+    for (const auto& [name, value] : *table) {
+      if (const auto* const columns = value.as_array()) {
+        take_alternatives(name, *columns);
+      } else {
+        map_.entries.push_back(entry(name, value));
+      }
+    }
+  }
+
+  // Half-widths could not be told apart, so that only text has alternatives.
+  void take_alternatives(const toml::key& key, const toml::array& columns) {
+    for (const auto& column : columns) {
+      map_.entries.push_back(entry(key, column));
+      if (!is_numeric(map_.entries.back().quantity)) continue;
+      fail(key.source(), fmt::format("{} takes one column; only text, such as star, takes a list of them", key.str()));
+    }
   }
 
   [[nodiscard]] ColumnMap::Entry entry(const toml::key& key, const toml::node& node) const {

@@ -88,7 +88,9 @@ private:
 
   std::string unit_in_file(std::size_t column) const {
     if (!head_.columns[column].unit.empty()) return head_.columns[column].unit;
-    const auto in_header = bracketed_unit(head_.columns[column].name);
+    // "[Fe/H]" is a name, not a unit.
+    const auto& header = head_.columns[column].name;
+    const auto in_header = header.starts_with('[') ? std::string() : bracketed_unit(header);
     return in_header.empty() ? bracketed_unit(descriptions_[column]) : in_header;
   }
 

@@ -164,7 +164,8 @@ private:
     for (const auto& group : groups_) {
       if (group.value.quantity == quantity && group.value.known_by == level) best.push_back(&group);
     }
-    for (std::size_t i = 0; i < best.size(); ++i) {
+    const bool is_list_in_map = level == KnownBy::map && !is_numeric(quantity);
+    for (std::size_t i = 0; !is_list_in_map && i < best.size(); ++i) {
       for (std::size_t j = i + 1; j < best.size(); ++j) {
         if (!same_unit(best[i]->value, best[j]->value)) continue;
         compete(quantity, ColumnPart::value, {best[i]->value.column, best[j]->value.column});

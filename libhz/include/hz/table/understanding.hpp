@@ -68,6 +68,7 @@ struct Doubt {
 ///     [columns]                       # canonical name (with _err, _err_plus, ... behind it) = column of the file
 ///     teff = "T (phot)"
 ///     distance = { column = "d", unit = "pc" }
+///     star = ["Name", "HIP"]          # of text: the first that is filled
 ///     [missing_values]                # numbers that stand for "no value" of one quantity
 ///     parallax = [0, -1]
 struct ColumnMap {
