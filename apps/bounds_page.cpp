@@ -97,20 +97,10 @@ std::string first_sentence(const Answer& answer) {
   return fmt::format("Liquid water from {}{}{}.", narrow, narrow.empty() || wide.empty() ? "" : ", from ", wide);
 }
 
-void add_value(std::string& text, const char* name, const std::optional<Derived>& derived, const char* unit) {
-  if (!derived) return;
-  text += fmt::format("{}{} {} {}", text.empty() ? "" : ", ", name, measured_text(derived->measured), unit);
-}
-
 std::string star_line(const ListRow& row, const Answer& answer) {
-  std::string values;
-  add_value(values, "Teff", answer.star.teff, "K");
-  add_value(values, "L", answer.star.luminosity, "L\u2609");
-  add_value(values, "radius", answer.star.stellar_radius, "R\u2609");
-  add_value(values, "mass", answer.star.stellar_mass, "M\u2609");
-  add_value(values, "distance", answer.star.distance, "pc");
+  const std::string values = stated_values(answer.star);
   const std::string name = row.star.name.empty() ? "Star" : printable(row.star.name);
-  return name + ": " + values + ".";
+  return values.empty() ? "" : name + ": " + values + ".";
 }
 
 std::string source_sentence(const LimitSet& set) {

@@ -105,10 +105,6 @@ std::string quantity_text(const char* words, const std::optional<Derived>& deriv
   return fmt::format("{} {}{}{}", words, measured_text(derived->measured), unit, route);
 }
 
-std::string value_text(const char* words, const std::optional<Derived>& derived, const char* unit) {
-  return derived ? fmt::format("{} {}{}", words, measured_text(derived->measured), unit) : "";
-}
-
 std::string planet_line(const CheckReport& report) {
   const PlanetAnswer& planet = *report.answer.planet;
   return joined(
@@ -127,14 +123,9 @@ std::string planet_line(const CheckReport& report) {
 }
 
 std::string star_line(const CheckReport& report) {
-  const StarAnswer& star = report.answer.star;
+  const std::string values = stated_values(report.answer.star);
   const std::string& name = report.row.star.name;
-  return fmt::format(
-      "{}: {}.", name.empty() ? "Star" : printable(name),
-      joined({value_text("Teff", star.teff, " K"), value_text("L", star.luminosity, " L☉"),
-              value_text("radius", star.stellar_radius, " R☉"), value_text("mass", star.stellar_mass, " M☉"),
-              value_text("distance", star.distance, " pc")},
-             ", "));
+  return values.empty() ? "" : fmt::format("{}: {}.", name.empty() ? "Star" : printable(name), values);
 }
 
 /// A measured value by its name; a relation's scatter, which no measurement betters, by its label.

@@ -5,6 +5,7 @@
 #include "closest.hpp"
 #include "commands.hpp"
 #include "hz/error.hpp"
+#include "join_options.hpp"
 #include "one_star_options.hpp"
 #include "planet_list.hpp"
 
@@ -16,7 +17,7 @@ bool is_called(const ListRow& row, const std::string& folded) {
   return !planet.empty() && (planet == folded || folded_name(row.star.name) + planet == folded);
 }
 
-[[noreturn]] void refuse_name(const AnsweredList& list, const std::string& name, const std::string& path) {
+[[noreturn]] void refuse_name(const AnsweredList& list, const std::string& name) {
   std::vector<std::string> planets;
   std::string of_star;
   for (const Candidate& candidate : list.candidates) {
@@ -26,17 +27,17 @@ bool is_called(const ListRow& row, const std::string& folded) {
     if (folded_name(candidate.row.star.name) == folded_name(name)) of_star += (of_star.empty() ? "" : ", ") + planet;
   }
   if (!of_star.empty())
-    throw Error(Fault::usage, fmt::format("{} is a star; its planets in {}: {}", name, path, of_star));
-  throw Error(Fault::usage, fmt::format("{} has no planet `{}`{}", path, name, did_you_mean(name, planets)));
+    throw Error(Fault::usage, fmt::format("{} is a star; its planets in {}: {}", name, list.planets, of_star));
+  throw Error(Fault::usage, fmt::format("{} has no planet `{}`{}", list.planets, name, did_you_mean(name, planets)));
 }
 
 /// The planet's row; of several the one that would be ranked.
-Candidate find_planet(const AnsweredList& list, const std::string& name, const std::string& path) {
+Candidate find_planet(const AnsweredList& list, const std::string& name) {
   std::vector<Candidate> found;
   for (const Candidate& candidate : list.candidates) {
     if (is_called(candidate.row, folded_name(name))) found.push_back(candidate);
   }
-  if (found.empty()) refuse_name(list, name, path);
+  if (found.empty()) refuse_name(list, name);
   keep_one_row_a_planet(found);
   for (Candidate& candidate : found) {
     if (candidate.in_the_running()) return candidate;
@@ -62,6 +63,7 @@ int run_check(const Arguments& arguments, Console& console) {
                                     "--luminosity 0.165 --semi-major-axis 0.412"
                                   : "give a list or type a planet, not both");
   }
+  check_join_options(arguments, words.empty());
   const Choices choices = read_choices(arguments);
   if (words.empty()) {
     const ListRow row = typed_row(arguments);
@@ -71,7 +73,7 @@ int run_check(const Arguments& arguments, Console& console) {
     throw Error(Fault::usage, fmt::format("which planet of {}? Give its name after the list", words[0]));
   const auto wanted = [&](const ListRow& row) { return is_called(row, folded_name(words[1])); };
   const AnsweredList list = answer_list(words[0], arguments, choices.settings, console, {}, wanted);
-  const Candidate planet = find_planet(list, words[1], words[0]);
+  const Candidate planet = find_planet(list, words[1]);
   return print_report(make_report(planet.row, choices, planet.answer), arguments, console);
 }
 

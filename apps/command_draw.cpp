@@ -9,6 +9,7 @@
 #include "hz/error.hpp"
 #include "hz/plots/figure_file.hpp"
 #include "hz/plots/length.hpp"
+#include "join_options.hpp"
 #include "one_star_options.hpp"
 #include "planet_list.hpp"
 
@@ -50,8 +51,10 @@ std::vector<Candidate> typed_candidates(const Arguments& arguments, const Settin
   return {candidate};
 }
 
-std::vector<Candidate> listed_candidates(const Arguments& arguments, const Settings& settings, const Console& console) {
-  std::vector<Candidate> candidates = answer_list(arguments.words()[1], arguments, settings, console).candidates;
+std::vector<Candidate> listed_candidates(const Arguments& arguments, const Settings& settings, Console& console) {
+  AnsweredList list = answer_list(arguments.words()[1], arguments, settings, console);
+  for (const std::string& line : list.joining) console.say(line);
+  std::vector<Candidate> candidates = std::move(list.candidates);
   keep_one_row_a_planet(candidates);
   // A planet's other solutions are not missing from a figure.
   std::erase_if(candidates,
@@ -132,6 +135,7 @@ int run_draw(const Arguments& arguments, Console& console) {
   if (!typed && kind == Kind::lanes && words.size() > 2)
     throw Error(Fault::usage, "lanes draws every star of the list; leave the name out");
 
+  check_join_options(arguments, typed);
   const Choices choices = read_choices(arguments);
   const plots::FigureOptions options = figure_options(arguments, choices.settings);
   std::vector<Candidate> candidates =

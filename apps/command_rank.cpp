@@ -8,6 +8,7 @@
 #include "hz/ranked_table.hpp"
 #include "hz/requirement.hpp"
 #include "interrupt.hpp"
+#include "join_options.hpp"
 #include "planet_list.hpp"
 #include "rank_page.hpp"
 #include "settings_options.hpp"
@@ -66,7 +67,7 @@ std::vector<RankedRow> output_rows(const std::vector<Candidate>& candidates, con
 
 void write_ranking(const AnsweredList& list, const std::vector<Place>& places, const Settings& settings,
                    const std::string& path) {
-  const std::vector<OutputColumn> columns = ranked_columns(settings, list.stated, heads_of(list.kept));
+  const std::vector<OutputColumn> columns = ranked_columns(settings, list.stated, list.kept);
   const std::vector<RankedRow> rows = output_rows(list.candidates, places);
   const std::unique_ptr<TableWriter> writer = create_table(path, head_of(columns));
   constexpr std::size_t rows_at_a_time = 1000;
@@ -92,6 +93,7 @@ void refuse_a_list_of_stars(const std::vector<Candidate>& candidates, const std:
 }  // namespace
 
 int run_rank(const Arguments& arguments, Console& console) {
+  check_join_options(arguments, false);
   const Choices choices = read_choices(arguments);
   const std::string& path = arguments.words().front();
   const std::optional<std::string> top = arguments.value("top");
@@ -100,7 +102,7 @@ int run_rank(const Arguments& arguments, Console& console) {
     static_cast<void>(parse_requirement(text));  // before the work
 
   AnsweredList list = answer_list(path, arguments, choices.settings, console, own_names());
-  refuse_a_list_of_stars(list.candidates, path);
+  refuse_a_list_of_stars(list.candidates, list.planets);
   set_stars_aside(list.candidates);
   cut(list.candidates, arguments);
   if (!keeps_all_solutions(arguments)) keep_one_row_a_planet(list.candidates);
@@ -113,7 +115,9 @@ int run_rank(const Arguments& arguments, Console& console) {
     console.print(ranking_table(list.candidates, places, shown, choices.settings, console));
     console.print("\n" + wrapped(basis_sentence(choices.settings), terminal_width()) + "\n");
   }
+  for (const std::string& line : list.joining) console.say(line);
   for (const std::string& line : ranking_summary(list.candidates, places, choices.settings)) console.say(line);
+  if (!list.differing_stars.empty()) console.say(list.differing_stars);
   const bool any_set_aside = std::any_of(list.candidates.begin(), list.candidates.end(),
                                          [](const Candidate& c) { return c.answer.status == Status::set_aside; });
   return arguments.has("strict") && any_set_aside ? exit_code::rows_set_aside : exit_code::done;

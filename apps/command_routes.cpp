@@ -26,6 +26,9 @@ std::string range_text(const Relation& relation) {
                    relation.x_unit);
 }
 
+/// "Boyajian et al. 2013".
+std::string authors_of(const Relation& relation) { return relation.citation.substr(0, relation.citation.find(',')); }
+
 /// The scatter, or from where to where it runs over the range.
 std::string scatter_text(const Relation& relation) {
   constexpr int steps = 50;
@@ -61,8 +64,8 @@ void add_lines(AlignedTable& table, const RouteInfo& route, std::size_t place) {
   for (const std::string_view key : route.relations) {
     const Relation& known = relation(key);
     table.add({first ? number : "", first ? std::string(route.needs) : "or",
-               known.label + (route.law.empty() ? "" : ", " + std::string(route.law)), range_text(known),
-               scatter_text(known), first ? std::string(route.holds) : ""});
+               known.label + ", " + authors_of(known) + (route.law.empty() ? "" : "; " + std::string(route.law)),
+               range_text(known), scatter_text(known), first ? std::string(route.holds) : ""});
     first = false;
   }
 }

@@ -6,9 +6,10 @@
 
 #include "closest.hpp"
 #include "hz/error.hpp"
+#include "join_options.hpp"
 #include "list_options.hpp"
+#include "list_rows.hpp"
 #include "one_star_options.hpp"
-#include "planet_list.hpp"
 #include "settings_options.hpp"
 
 namespace hz::app {
@@ -35,6 +36,9 @@ constexpr auto rank_table = std::to_array<Option>({
      "keep only planets such as 'planet_radius<1.8' (< <= > >= =); may be given again"},
     {"duplicates", '\0', OptionKind::value, "WORD", OptionGroup::answer,
      "of several rows of one planet rank the best or all (default best)"},
+    {"one-star", '\0', OptionKind::value, "WORD", OptionGroup::answer,
+     "give all planets of one star the star of its first row or of its best measured one: first or best (default each "
+     "row's own)"},
     {"top", '\0', OptionKind::value, "N", OptionGroup::output, "how many planets to print (default 20)"},
 });
 
@@ -67,6 +71,11 @@ constexpr std::string_view verdict_note =
     "outside "
     "(at most 0.32), outside (0.05). P is given the limits of the set; it is not a probability of life or water.";
 
+constexpr std::string_view two_lists_note =
+    "With --planets each planet gets the values of its star, completed by what its own row says of it. A name that "
+    "several stars have, or a place with several stars about as near, is no match: the row says so, and which they "
+    "are.";
+
 Command bounds_command() {
   return {"bounds",
           "how far out water can stay liquid: one star, or a list of them",
@@ -84,8 +93,8 @@ Command check_command() {
           "where one planet lies, now",
           {{"LIST", false, "a table that has the planet; without it, the planet is typed"},
            {"NAME", false, "the planet's name in the list"}},
-          with_common({star_value_options(), planet_value_options(), reading_options(), boundary_options(),
-                       placement_options(), preference_options(), format_table}),
+          with_common({star_value_options(), planet_value_options(), reading_options(), joining_options(),
+                       boundary_options(), placement_options(), preference_options(), format_table}),
           {{{"hzmap check --teff 4410+-70 --luminosity 0.165+-0.009 --semi-major-axis 0.412+-0.012 --planet-radius 1.3",
              "a planet from what its paper says"},
             {"hzmap check planets.csv 'Lantern 27 d'", "a planet of a list"}}},
@@ -96,9 +105,9 @@ Command check_command() {
 Command rank_command() {
   return {"rank",
           "put the planets of a list in order, the surest first",
-          {{"LIST", true, "a table of planets; - is standard input"}},
-          with_common({reading_options(), boundary_options(), placement_options(), rank_table, preference_options(),
-                       writing_options()}),
+          {{"LIST", true, "a table of planets (of their stars, with --planets); - is standard input"}},
+          with_common({reading_options(), joining_options(), boundary_options(), placement_options(), rank_table,
+                       preference_options(), writing_options()}),
           {{{"hzmap rank planets.csv -o ranked.csv", "the first 20 on the terminal, all of them in a file"},
             {"hzmap rank planets.csv --require 'planet_radius<1.8' --top 5", "only small planets, five lines"}}},
           {"Merit is P of the conservative zone plus half of what the optimistic zone adds. Planets outside the planet "
@@ -106,7 +115,7 @@ Command rank_command() {
            "that the limits were fitted for follow in a section of their own. A row without any error never stands "
            "above an "
            "equal row that has some: its merit is cut to that row's, and its note says so.",
-           verdict_note},
+           two_lists_note, verdict_note},
           run_rank};
 }
 
@@ -117,8 +126,8 @@ Command draw_command() {
       {{"KIND", true, "wedge (one system) or lanes (one row a star)"},
        {"LIST", false, "a table of planets; without it, one system is typed"},
        {"NAME", false, "the star whose wedge is drawn"}},
-      with_common({star_value_options(), planet_value_options(), reading_options(), boundary_options(),
-                   placement_options(), preference_options(), draw_table}),
+      with_common({star_value_options(), planet_value_options(), reading_options(), joining_options(),
+                   boundary_options(), placement_options(), preference_options(), draw_table}),
       {{{"hzmap draw wedge planets.csv 'Lantern 27' -o lantern-27.svg", "one system: zones, orbits and their ranges"},
         {"hzmap draw lanes planets.csv -o lanes.pdf --width 180mm", "every star of a list with its zone and planets"}}},
       {typed_note},

@@ -26,10 +26,22 @@ std::string word_for(std::string_view name) {
   return about.unit == "mag" && !about.symbol.empty() ? about.symbol : with_blanks(name);
 }
 
-void add(std::string& text, const char* symbol, const std::optional<Derived>& derived, const char* unit) {
+/// A value that follows from exact ones has no half-widths to round it by.
+std::string value_text(const Measured& measured) {
+  constexpr int digits = 4;
+  const bool exact = measured.minus.value_or(0) == 0 && measured.plus.value_or(0) == 0;
+  return exact ? short_number(rounded(measured.value, digits)) : measured_text(measured);
+}
+
+void add_derived(std::string& text, const char* symbol, const std::optional<Derived>& derived, const char* unit) {
   if (!derived || derived->route.starts_with("stated")) return;
   text += fmt::format("{}{} from {}: {}{}", text.empty() ? "" : "; ", symbol, route_words(derived->route),
-                      measured_text(derived->measured), unit);
+                      value_text(derived->measured), unit);
+}
+
+void add_stated(std::string& text, const char* symbol, const std::optional<Derived>& derived, const char* unit) {
+  if (!derived || !derived->route.starts_with("stated")) return;
+  text += fmt::format("{}{} {}{}", text.empty() ? "" : ", ", symbol, measured_text(derived->measured), unit);
 }
 
 }  // namespace
@@ -45,14 +57,24 @@ std::string route_words(std::string_view route) {
   return words;
 }
 
+std::string stated_values(const StarAnswer& star) {
+  std::string text;
+  add_stated(text, "Teff", star.teff, " K");
+  add_stated(text, "L", star.luminosity, " L☉");
+  add_stated(text, "radius", star.stellar_radius, " R☉");
+  add_stated(text, "mass", star.stellar_mass, " M☉");
+  add_stated(text, "distance", star.distance, " pc");
+  return text;
+}
+
 std::string derivation_sentence(const StarAnswer& star) {
   std::string text;
-  add(text, "Teff", star.teff, " K");
-  add(text, "L", star.luminosity, " L☉");
-  add(text, "radius", star.stellar_radius, " R☉");
-  add(text, "mass", star.stellar_mass, " M☉");
-  add(text, "distance", star.distance, " pc");
-  return text.empty() ? text : "How: " + text + ".";
+  add_derived(text, "Teff", star.teff, " K");
+  add_derived(text, "L", star.luminosity, " L☉");
+  add_derived(text, "radius", star.stellar_radius, " R☉");
+  add_derived(text, "mass", star.stellar_mass, " M☉");
+  add_derived(text, "distance", star.distance, " pc");
+  return text.empty() ? text : "Derived: " + text + ".";
 }
 
 }  // namespace hz::app

@@ -126,7 +126,8 @@ FigureStars figure_stars(const std::vector<Candidate>& candidates, const Setting
     const std::vector<const Candidate*>& rows = rows_of[key];
     std::optional<StarOfRows> star = star_of(rows, settings);
     if (!star) {
-      const std::string reason = answer_star(rows.front()->row, settings).reason;
+      const std::string& found = rows.front()->answer.reason;  // it knows more than the row: why no star was joined
+      const std::string reason = found.empty() ? answer_star(rows.front()->row, settings).reason : found;
       result.left_out.push_back(
           fmt::format("{}: {}", name_of(*rows.front()), reason.empty() ? "no effective temperature" : reason));
       continue;

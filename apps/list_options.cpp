@@ -52,20 +52,21 @@ std::vector<KeptColumn> keep_all(const TableHead& input, std::span<const std::st
   return result;
 }
 
-std::size_t column_named(const std::string& name, const TableHead& input) {
-  const std::vector<std::string> names = names_of(input);
-  const auto found = std::find(names.begin(), names.end(), name);
-  if (found != names.end()) return static_cast<std::size_t>(found - names.begin());
-  throw Error(Fault::usage,
-              fmt::format("--keep: {} has no column {}{}", input.source, name, did_you_mean(name, names)));
-}
-
-ColumnMap column_map(const Arguments& arguments) {
-  const std::optional<std::string> file = arguments.value("columns");
+ColumnMap column_map(const Arguments& arguments, std::string_view map_option) {
+  const std::optional<std::string> file = arguments.value(map_option);
   ColumnMap map = file ? ColumnMap::parse(read_text_file(*file), *file) : ColumnMap{};
   const auto missing = read_missing_values(arguments.values("missing-value"));
   map.missing_numbers.insert(map.missing_numbers.end(), missing.begin(), missing.end());
   return map;
+}
+
+/// The library speaks of --columns, the option of a list that stands alone.
+[[noreturn]] void name_the_option(const Error& error, std::string_view map_option) {
+  constexpr std::string_view usual = "--columns ";
+  std::string what = error.what();
+  const std::size_t at = what.find(usual);
+  if (at != std::string::npos) what.replace(at, usual.size(), fmt::format("--{} ", map_option));
+  throw Error(error.fault(), what);
 }
 
 }  // namespace
@@ -73,16 +74,29 @@ ColumnMap column_map(const Arguments& arguments) {
 std::span<const Option> reading_options() { return reading_table; }
 std::span<const Option> writing_options() { return writing_table; }
 
-OpenList open_list(const std::string& path, const Arguments& arguments, std::span<const Quantity> needed) {
+std::size_t column_named(std::string_view option, const std::string& name, const TableHead& head) {
+  const std::vector<std::string> names = names_of(head);
+  const auto found = std::find(names.begin(), names.end(), name);
+  if (found != names.end()) return static_cast<std::size_t>(found - names.begin());
+  throw Error(Fault::usage,
+              fmt::format("--{}: {} has no column `{}`{}", option, head.source, name, did_you_mean(name, names)));
+}
+
+OpenList open_list(const std::string& path, const Arguments& arguments, std::span<const Quantity> needed,
+                   std::string_view map_option) {
   const std::optional<std::string> output = arguments.knows("output") ? arguments.value("output") : std::nullopt;
   if (output && *output != "-" && path != "-") refuse_to_overwrite(path, *output);
-  OpenList list{column_map(arguments), std::make_unique<PeekedTable>(open_table(path)), {}};
-  list.understanding = Understanding::of(list.reader->head(), list.map, needed, list.reader->peek());
+  OpenList list{column_map(arguments, map_option), std::make_unique<PeekedTable>(open_table(path)), {}};
+  try {
+    list.understanding = Understanding::of(list.reader->head(), list.map, needed, list.reader->peek());
+  } catch (const Error& error) {
+    name_the_option(error, map_option);
+  }
   return list;
 }
 
 OpenList open_draft(const std::string& path, const Arguments& arguments) {
-  OpenList list{column_map(arguments), std::make_unique<PeekedTable>(open_table(path)), {}};
+  OpenList list{column_map(arguments, "columns"), std::make_unique<PeekedTable>(open_table(path)), {}};
   list.understanding = Understanding::draft(list.reader->head(), list.map, planet_inputs(), list.reader->peek());
   return list;
 }
@@ -94,7 +108,7 @@ std::vector<KeptColumn> kept_columns(const std::string& keep, const TableHead& i
   std::vector<KeptColumn> result;
   for (std::size_t start = 0; start <= keep.size();) {
     const std::size_t comma = std::min(keep.find(',', start), keep.size());
-    result.push_back(keep_column(input, column_named(keep.substr(start, comma - start), input), written));
+    result.push_back(keep_column(input, column_named("keep", keep.substr(start, comma - start), input), written));
     start = comma + 1;
   }
   return result;
@@ -107,7 +121,10 @@ std::vector<KeptColumn> kept_columns(const Arguments& arguments, const TableHead
 
 std::vector<std::string> kept_cells(const Chunk& chunk, std::size_t row, std::span<const KeptColumn> kept) {
   std::vector<std::string> cells;
-  for (const KeptColumn& column : kept) cells.push_back(chunk.row_problems[row] ? "" : chunk.text(column.column, row));
+  for (const KeptColumn& column : kept) {
+    const bool is_here = column.column && !chunk.row_problems[row];
+    cells.push_back(is_here ? chunk.text(*column.column, row) : "");
+  }
   return cells;
 }
 

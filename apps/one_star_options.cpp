@@ -52,7 +52,7 @@ constexpr auto star_table = std::to_array<Option>({
     value_option("extinction-v", "MAG", "extinction A_V, taken off magnitudes and colours"),
     value_option("reddening-bv", "MAG", "reddening E(B-V); A_V is 3.1 times it"),
     value_option("number-of-stars", "N", "stars in the system"),
-    value_option("companion-separation", "MAS", "angle to the nearest companion star; 1.5arcsec is understood"),
+    value_option("companion-separation", "ARCSEC", "angle on the sky to the nearest companion star"),
 });
 
 constexpr auto planet_table = std::to_array<Option>({

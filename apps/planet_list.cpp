@@ -3,108 +3,130 @@
 #include <fmt/format.h>
 
 #include <algorithm>
+#include <array>
+#include <map>
 #include <optional>
+#include <utility>
 
-#include "closest.hpp"
-#include "hz/error.hpp"
+#include "hz/flags.hpp"
+#include "hz/one_star.hpp"
 #include "interrupt.hpp"
+#include "list_rows.hpp"
+#include "numbers.hpp"
 #include "progress.hpp"
+#include "tally.hpp"
+#include "two_lists.hpp"
 
 namespace hz::app {
 namespace {
 
-constexpr auto preference_table = std::to_array<Option>({
-    {"prefer", '\0', OptionKind::value, "COLUMN=VALUE", OptionGroup::answer,
-     "of several rows of one planet, take the one with this cell, unless one is marked as adopted"},
-});
-
-/// A cell that makes a row the user's own choice.
-struct Preference {
-  std::size_t column = 0;
-  std::string value;
-};
-
-std::optional<Preference> read_preference(const Arguments& arguments, const TableHead& head) {
-  const std::optional<std::string> text = arguments.knows("prefer") ? arguments.value("prefer") : std::nullopt;
-  if (!text) return std::nullopt;
-  const std::size_t at = text->find('=');
-  if (at == std::string::npos) {
-    throw Error(Fault::usage,
-                fmt::format("--prefer '{}' has no =; write it like --prefer reference='Lantern DR1'", *text));
-  }
-  const std::string name = text->substr(0, at);
-  std::vector<std::string> names;
-  for (std::size_t column = 0; column < head.columns.size(); ++column) {
-    if (head.columns[column].name == name) return Preference{column, text->substr(at + 1)};
-    names.push_back(head.columns[column].name);
-  }
-  throw Error(Fault::usage,
-              fmt::format("--prefer: {} has no column `{}`{}", head.source, name, did_you_mean(name, names)));
+UnansweredList read_one_list(const std::string& path, const Arguments& arguments, const Console& console,
+                             std::span<const std::string> written) {
+  const OpenList list = open_list(path, arguments, planet_inputs());
+  const TableHead& head = list.reader->head();
+  UnansweredList unanswered;
+  unanswered.planets = path;
+  unanswered.stated = stated_quantities(list.understanding);
+  refuse_unusable(unanswered.stated, head.source);
+  RowReading reading;
+  if (arguments.knows("keep")) reading.kept = kept_columns(arguments, head, written);
+  reading.preference = read_preference(arguments, head);
+  unanswered.kept = heads_of(reading.kept);
+  unanswered.candidates = read_rows(list, reading, console).candidates;
+  unanswered.remarks.resize(unanswered.candidates.size());
+  return unanswered;
 }
 
-std::vector<Quantity> stated_quantities(const Understanding& understanding) {
-  std::vector<Quantity> stated;
-  for (const QuantityInfo& info : all_columns()) {
-    const std::optional<Quantity> quantity = quantity_named(info.name);
-    if (quantity && understanding.knows(*quantity)) stated.push_back(*quantity);
+OneStar one_star_choice(const Arguments& arguments) {
+  constexpr auto words = std::to_array<OptionWord<OneStar>>({{"first", OneStar::first}, {"best", OneStar::best}});
+  const std::optional<std::string> text = arguments.knows("one-star") ? arguments.value("one-star") : std::nullopt;
+  return text ? option_word<OneStar>("one-star", *text, words) : OneStar::as_given;
+}
+
+void add_words(std::string& text, const std::string& words) {
+  if (!text.empty() && !words.empty()) text += "; ";
+  text += words;
+}
+
+std::string conflict_line(const std::vector<StarConflict>& conflicts) {
+  if (conflicts.empty()) return "";
+  std::map<std::string, std::size_t> counts;
+  std::size_t rows = 0;
+  for (const StarConflict& conflict : conflicts) {
+    rows += conflict.rows.size();
+    for (const Quantity quantity : conflict.quantities) ++counts[std::string(name(quantity))];
   }
-  return stated;
+  return fmt::format("stars whose rows state different values: {} ({}; {})", count_text(conflicts.size()),
+                     counted(rows, "row"), most_frequent_first(counts));
 }
 
-/// A list must say something of light or of an orbit.
-void refuse_unusable(const std::vector<Quantity>& stated, const TableHead& head) {
-  const auto needed = planet_inputs();
-  const bool usable = std::any_of(stated.begin(), stated.end(), [&](Quantity quantity) {
-    return is_numeric(quantity) && std::find(needed.begin(), needed.end(), quantity) != needed.end();
-  });
-  if (usable) return;
-  throw Error(Fault::input, fmt::format("{0} has no column that hzmap can use; `hzmap columns {0}` shows how each is "
-                                        "understood, and writes a map to edit",
-                                        head.source));
+/// Rows of one star that differ are flagged and, if the user wants it so, given one star. Returns a line that counts
+/// them.
+std::string compare_stars(UnansweredList& list, OneStar choice) {
+  const StarsCompared compared = hz::compare_stars(list.candidates, choice);
+  for (const StarConflict& conflict : compared.conflicts) {
+    for (const std::size_t row : conflict.rows) {
+      list.remarks[row].flags.push_back(std::string(flag::inconsistent) + std::string(name(Quantity::star)));
+      add_words(list.remarks[row].note, "rows of this star state " + conflict.what);
+    }
+  }
+  for (std::size_t row = 0; row < list.candidates.size(); ++row) {
+    const std::optional<std::size_t> source = compared.taken_from[row];
+    if (source) add_words(list.remarks[row].note, "star values of " + place_in_file(list.candidates[*source].row));
+  }
+  return conflict_line(compared.conflicts);
 }
 
-Candidate candidate_of(const Chunk& chunk, std::size_t index, const OpenList& list, const std::vector<KeptColumn>& kept,
-                       const std::optional<Preference>& preference, const Settings& settings,
-                       const std::function<bool(const ListRow&)>& wanted) {
-  Candidate candidate;
-  candidate.row = list.understanding.row(chunk, index);
-  candidate.row.kept = kept_cells(chunk, index, kept);
-  candidate.preferred =
-      preference && !chunk.row_problems[index] && chunk.text(preference->column, index) == preference->value;
-  if (wanted(candidate.row)) {
-    candidate.answer = answer(candidate.row, settings);
+/// A planet that found no star is answered from what its own row says of it, if that is enough.
+bool own_row_suffices(const Answer& answer) {
+  return answer.status == Status::answered || answer.star.luminosity.has_value();
+}
+
+void add_remark(Answer& answer, const Remark& remark) {
+  answer.flags.insert(answer.flags.end(), remark.flags.begin(), remark.flags.end());
+  add_words(answer.note, remark.note);
+  if (remark.no_star.empty()) return;
+  if (own_row_suffices(answer)) {
+    add_words(answer.note, remark.no_star + "; the star is as the planet's own row has it");
   } else {
-    candidate.answer.status = Status::set_aside;
-    candidate.answer.reason_kind = candidate.answer.reason = "not asked for";
+    answer.reason = fmt::format("{}; in the planet's own row: {}", remark.no_star, answer.reason);
+    answer.reason_kind = remark.no_star_kind;
   }
-  return candidate;
+}
+
+void leave_unanswered(Answer& answer) {
+  answer.status = Status::set_aside;
+  answer.reason_kind = answer.reason = "not asked for";
+}
+
+void answer_rows(UnansweredList& list, const Settings& settings, const Console& console,
+                 const std::function<bool(const ListRow&)>& wanted) {
+  Progress progress(console, "answering", list.candidates.size());
+  for (std::size_t i = 0; i < list.candidates.size(); ++i) {
+    stop_if_asked();
+    Candidate& candidate = list.candidates[i];
+    if (wanted(candidate.row)) {
+      candidate.answer = answer(candidate.row, settings);
+      add_remark(candidate.answer, list.remarks[i]);
+    } else {
+      leave_unanswered(candidate.answer);
+    }
+    progress.update(i + 1);
+  }
 }
 
 }  // namespace
 
-std::span<const Option> preference_options() { return preference_table; }
-
 AnsweredList answer_list(const std::string& path, const Arguments& arguments, const Settings& settings,
                          const Console& console, std::span<const std::string> written,
                          const std::function<bool(const ListRow&)>& wanted) {
-  OpenList list = open_list(path, arguments, planet_inputs());
-  AnsweredList answered;
-  answered.stated = stated_quantities(list.understanding);
-  refuse_unusable(answered.stated, list.reader->head());
-  if (arguments.knows("keep")) answered.kept = kept_columns(arguments, list.reader->head(), written);
-  const std::optional<Preference> preference = read_preference(arguments, list.reader->head());
-  Progress progress(console, "answering");
-  while (const std::optional<Chunk> chunk = list.reader->next()) {
-    for (std::size_t i = 0; i < chunk->rows(); ++i) {
-      stop_if_asked();
-      answered.candidates.push_back(candidate_of(*chunk, i, list, answered.kept, preference, settings, wanted));
-      progress.update(answered.candidates.size());
-    }
-  }
-  if (answered.candidates.empty()) {
-    throw Error(Fault::input, fmt::format("{} has a header but no rows", list.reader->head().source));
-  }
-  return answered;
+  const OneStar choice = one_star_choice(arguments);  // a wrong word is told before the work
+  UnansweredList list = arguments.has("planets") ? read_two_lists(path, arguments, console, written)
+                                                 : read_one_list(path, arguments, console, written);
+  std::string differing_stars = compare_stars(list, choice);
+  answer_rows(list, settings, console, wanted);
+  return {std::move(list.candidates), std::move(list.stated),  std::move(list.kept),
+          std::move(list.planets),    std::move(list.joining), std::move(differing_stars)};
 }
 
 }  // namespace hz::app

@@ -6,6 +6,7 @@
 #include <cmath>
 
 #include "contradictions.hpp"
+#include "hz/companions.hpp"
 #include "hz/constants.hpp"
 #include "hz/orbit.hpp"
 #include "hz/relations.hpp"
@@ -39,9 +40,10 @@ void set_aside(Answer& answer, const Problem& problem) {
   }
 }
 
-/// Why nothing led to a quantity, when relations that could have helped do not hold for the star.
+/// Why relations that could have helped were not used.
 std::string because(const Resolver& resolver) {
-  return resolver.barred().empty() ? std::string() : "; the star is " + resolver.barred();
+  const std::string why = resolver.off_main_sequence();
+  return why.empty() ? why : "; the star is " + why;
 }
 
 Problem no_teff(const Resolver& resolver) {
@@ -265,6 +267,23 @@ void raise_star_flags(Work& work, const Answer& answer) {
   if (!fitted->contains(teff.central()) || outside > noticeable_share) work.flags.raise(flag::held);
 }
 
+/// What the list says of other stars; a close one leaves no verdict firm. After the limits, whose outermost it needs.
+void heed_companions(Work& work, Answer& answer) {
+  std::optional<double> outer;
+  for (const LimitAtStar& at : answer.limits) {
+    if (at.distance && !at.edges.empty()) outer = std::max(outer.value_or(0), at.distance->value);
+  }
+  const ListRow& row = work.resolver.row();
+  const std::optional<Derived>& distance = answer.star.distance;
+  const Companions companions =
+      companions_of(row.star, row.planet, distance ? std::optional(distance->measured.value) : std::nullopt, outer);
+  if (!companions.present) return;
+  work.flags.raise(flag::companion);
+  if (!companions.close) return;
+  work.flags.raise(flag::close_companion);
+  if (answer.planet) soften(*answer.planet);
+}
+
 bool states_an_orbit(const PlanetRecord& planet) {
   const auto says = [](const Field& field) { return field.stated || field.problem; };
   return says(planet.orbital_period) || says(planet.semi_major_axis) || says(planet.scaled_semi_major_axis) ||
@@ -286,6 +305,16 @@ Measured averaged(const Measured& insolation, const Input& eccentricity) {
   result.minus = std::hypot(insolation.minus.value_or(0) * here, insolation.value * (here - down));
   result.plus = std::hypot(insolation.plus.value_or(0) * here, insolation.value * (up - here));
   return result;
+}
+
+/// What a planet of this mass measures on average; nothing for a mass that is itself a guess.
+std::optional<Derived> radius_from_mass(const Derived& mass) {
+  if (mass.route == assumed_route) return std::nullopt;
+  const Measured decadic = log_radius_from_mass(mass.measured);
+  const double radius = std::pow(10, decadic.value);
+  return Derived{{radius, radius - std::pow(10, decadic.value - decadic.minus.value_or(0)),
+                  std::pow(10, decadic.value + decadic.plus.value_or(0)) - radius, LimitMark::none, false},
+                 "planet_mass (Chen & Kipping 2017)"};
 }
 
 /// The planet's part. Returns the problem that sets the row aside, if any.
@@ -316,6 +345,7 @@ std::optional<Problem> answer_planet(Work& work, Answer& answer) {
   planet.semi_major_axis = work.derived(Quantity::semi_major_axis);
   planet.planet_radius = work.derived(Quantity::planet_radius);
   planet.planet_mass = mass->derived;
+  if (!planet.planet_radius && !row.planet.planet_radius.stated) planet.planet_radius = radius_from_mass(mass->derived);
   judge(planet, input, row, work.settings);
   answer.note = contradictions(resolver, &planet.insolation.measured);
   answer.planet = std::move(planet);
@@ -347,6 +377,7 @@ Answer answer(const ListRow& row, const Settings& settings) {
   } else {
     raise_star_flags(work, answer);
     answer.limits = limits_at(answer.star, work.central_teff(), central_planet_mass(*answer.input), settings);
+    heed_companions(work, answer);
   }
   answer.flags = work.flags.words();
   return answer;
@@ -366,6 +397,7 @@ Answer answer_star(const ListRow& row, const Settings& settings) {
     raise_star_flags(work, answer);
     answer.limits = limits_at(answer.star, work.central_teff(), 1, settings);
     add_half_widths(answer, work.input(*work.light), settings);
+    heed_companions(work, answer);
     answer.note = contradictions(work.resolver, nullptr);
   }
   answer.flags = work.flags.words();

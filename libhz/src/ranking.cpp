@@ -78,10 +78,6 @@ void add_note(Answer& answer, const std::string& words) {
   answer.note += words;
 }
 
-std::string place_in_file(const ListRow& row) {
-  return row.line > 0 ? fmt::format("line {}", row.line) : fmt::format("row {}", row.number);
-}
-
 void keep_one(std::vector<Candidate*> rows) {
   std::sort(rows.begin(), rows.end(),
             [](const Candidate* a, const Candidate* b) { return solution_key(*a) < solution_key(*b); });
@@ -132,6 +128,10 @@ std::string folded_name(std::string_view name) {
     folded += c >= 'A' && c <= 'Z' ? static_cast<char>(c - 'A' + 'a') : c;
   }
   return folded;
+}
+
+std::string place_in_file(const ListRow& row) {
+  return row.line > 0 ? fmt::format("line {}", row.line) : fmt::format("row {}", row.number);
 }
 
 void keep_one_row_a_planet(std::vector<Candidate>& candidates) {

@@ -53,7 +53,7 @@ bool is_known(const CellValue& value) { return !std::holds_alternative<std::mono
 
 /// What was used of a quantity; nothing where that was assumed, for want of knowledge.
 CellValue used_value(const std::string& name, const RankedRow& row) {
-  if (cell(name + "_used_route", row) == CellValue(std::string(assumed_route))) return {};
+  if (cell(name + "_route", row) == CellValue(std::string(assumed_route))) return {};
   return cell(name + "_used", row);
 }
 

@@ -32,7 +32,7 @@ std::string_view preferred_family(Quantity quantity, const Settings& settings) {
 /// The first that leads there, of those in the family or of the others.
 std::optional<Form> walk(Resolver& resolver, Quantity quantity, std::string_view family, bool in_family) {
   for (const RouteEntry& entry : route_entries()) {
-    if (entry.gives != quantity || (entry.family == family) != in_family) continue;
+    if (entry.gives != quantity || entry.way == nullptr || (entry.family == family) != in_family) continue;
     const std::optional<Form> found = entry.way(resolver);
     if (found || resolver.problem()) return found;
   }
@@ -179,25 +179,22 @@ std::optional<Form> Resolver::subtype() {
   return Form{*type_->subtype, {{sources_.of(Quantity::spectral_type, input, false), 1}}, {}, {}, "spectral_type"};
 }
 
-bool Resolver::holds(const Relation& relation) {
-  const auto bar = [this](std::string why) {
-    barred_ = std::move(why);
-    return false;
-  };
+std::string Resolver::off_main_sequence() const {
   const std::string& text = row_.star.spectral_type;
-  if (type_ && type_->kind == StarKind::white_dwarf) {
-    return bar(fmt::format("a white dwarf ({}): no relation of ordinary stars holds for it", text));
-  }
-  if (!relation.main_sequence) return true;
   if (type_ && type_->kind != StarKind::dwarf) {
-    return bar(fmt::format("{} ({}): relations of main-sequence stars do not hold for it", word(type_->kind), text));
+    return fmt::format("{} ({}), for which relations of main-sequence stars do not hold", word(type_->kind), text);
   }
   const std::optional<Measured>& log_g = row_.star.log_g.stated;
   if (log_g && log_g->limit == LimitMark::none && log_g->value < evolved_log_g) {
-    return bar(fmt::format("off the main sequence (log g {:.2f}), and the relations that could help hold on it alone",
-                           log_g->value));
+    return fmt::format("off the main sequence (log g {:.2f}), and relations that could help hold on it alone",
+                       log_g->value);
   }
-  return true;
+  return {};
+}
+
+bool Resolver::holds(const Relation& relation) const {
+  if (type_ && type_->kind == StarKind::white_dwarf) return false;
+  return !relation.main_sequence || off_main_sequence().empty();
 }
 
 std::optional<Form> Resolver::apply(std::string_view key, const std::optional<Form>& x, Quantity quantity) {

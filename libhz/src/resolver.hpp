@@ -31,8 +31,8 @@ public:
   [[nodiscard]] std::optional<Form> find(Quantity quantity);
   [[nodiscard]] const TeffInput* teff();
   [[nodiscard]] const std::optional<Problem>& problem() const { return problem_; }
-  /// Why relations of main-sequence stars were not used, in words; empty when they could be.
-  [[nodiscard]] const std::string& barred() const { return barred_; }
+  /// Why relations of main-sequence stars do not hold for the star, in words; empty when they do.
+  [[nodiscard]] std::string off_main_sequence() const;
 
   /// While it lives, nothing is flagged, and what cannot be read counts as absent.
   class Quiet {
@@ -61,8 +61,8 @@ public:
   [[nodiscard]] std::optional<Form> subtype();
   /// y(x) with the relation's scatter; empty outside its range and where it does not hold. `quantity` is what for.
   [[nodiscard]] std::optional<Form> apply(std::string_view key, const std::optional<Form>& x, Quantity quantity);
-  /// Whether a relation may be used for this star; remembers why not.
-  [[nodiscard]] bool holds(const Relation& relation);
+  /// Whether a relation may be used for this star.
+  [[nodiscard]] bool holds(const Relation& relation) const;
   /// "distance" where it is stated, "parallax" where it follows from one.
   /// Within 100 pc, where extinction hardly matters (the Local Bubble; common practice).
   [[nodiscard]] bool is_nearby();
@@ -89,7 +89,6 @@ private:
   std::set<Quantity> busy_;  // quantities being looked for: a route must not lead through itself
   bool quiet_ = false;
   std::optional<Problem> problem_;
-  std::string barred_;
 };
 
 }  // namespace hz

@@ -16,6 +16,7 @@ struct Line {
 constexpr std::string_view as_it_stands = "as it stands in the list";
 constexpr std::string_view stefan_boltzmann = "Stefan-Boltzmann law";
 constexpr std::string_view kepler = "Kepler's third law";
+constexpr std::string_view chen_kipping = "Chen & Kipping 2017, with its scatter";
 constexpr std::string_view gravity = "g = G M / R^2";
 
 const std::vector<Line>& lines() {
@@ -122,6 +123,17 @@ const std::vector<Line>& lines() {
       {{planet_radius, "transit_depth and stellar_radius", "depth = (R_p/R)^2, limb darkening left out", {}, ""},
        "transit",
        planet_radius_from_depth},
+      // What follows is walked by planet_mass_route.cpp and answer.cpp: a planet's mass has a scale of its own.
+      {{planet_radius, "planet_mass", chen_kipping, {}, "for show alone"}, "mass", nullptr},
+
+      {{planet_mass, "planet_mass", as_it_stands, {}, ""}, "stated", nullptr},
+      {{planet_mass, "min_mass and inclination", "M = M sin i / sin i", {}, ""}, "minimum", nullptr},
+      {{planet_mass, "min_mass", "isotropic inclination: 1 / sin i has the median 1.155, 68 % in 1.013-1.850", {}, ""},
+       "minimum",
+       nullptr},
+      {{planet_mass, "planet_radius", chen_kipping, {}, ""}, "radius", nullptr},
+      {{planet_mass, "nothing", "1 Earth mass assumed", {}, ""}, "assumed", nullptr},
+
   };
   return all;
 }

@@ -30,7 +30,8 @@ inline std::vector<CsvRow> plain_csv(const std::string& name) {
       header = cells;
       continue;
     }
-    if (cells.size() != header.size()) throw std::runtime_error(name + ": ragged row: " + line);
+    if (cells.size() != header.size())
+      throw std::runtime_error(std::string(name).append(": ragged row: ").append(line));
     CsvRow row;
     for (std::size_t i = 0; i < cells.size(); ++i) row[header[i]] = cells[i];
     rows.push_back(row);

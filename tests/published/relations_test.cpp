@@ -18,7 +18,6 @@ namespace {
 
 using hz::relation;
 using hz_test::CsvRow;
-using hz_test::last_digit;
 using hz_test::plain_csv;
 
 // ---- digits -------------------------------------------------------------------------------------------------------

@@ -127,7 +127,8 @@ TEST(SettlingFactor, MakesTheVerdictFirmAndNoMoreThanThat) {
   for (const double axis : {0.98, 1.0, 1.6, 1.8, 0.9}) {  // inside and outside of either edge (0.950 and 1.676 au)
     const PlacementInput input = input_of(value(1, 0.3, 0.3), value(axis, 0.005, 0.005));
     ASSERT_FALSE(is_firm(input)) << axis;
-    const std::optional<double> factor = settling_factor(input, Quantity::luminosity, settings_of());
+    const std::optional<double> factor =
+        settling_factor(input, VarianceShare{Quantity::luminosity, {}, 0}, settings_of());
     ASSERT_TRUE(factor) << axis;
     EXPECT_GT(*factor, 0);
     EXPECT_LT(*factor, 1);
@@ -139,23 +140,23 @@ TEST(SettlingFactor, MakesTheVerdictFirmAndNoMoreThanThat) {
 TEST(SettlingFactor, FollowsTheErrorFunctionOfASingleInput) {
   // The limit lies 0.05 au from the planet: 95 per cent inside is 1.645 half-widths.
   const double limit = 1 / std::sqrt(1.107);
-  const std::optional<double> factor =
-      settling_factor(input_of(exactly(1), value(limit + 0.05, 0.06, 0.06)), Quantity::semi_major_axis, settings_of());
+  const std::optional<double> factor = settling_factor(input_of(exactly(1), value(limit + 0.05, 0.06, 0.06)),
+                                                       VarianceShare{Quantity::semi_major_axis, {}, 0}, settings_of());
   ASSERT_TRUE(factor);
   EXPECT_NEAR(*factor, 0.05 / 1.6449 / 0.06, 0.011);  // found to 0.01
 }
 
 TEST(SettlingFactor, IsEmptyWhenTheVerdictIsFirmAlready) {
-  EXPECT_FALSE(
-      settling_factor(input_of(value(1, 0.01, 0.01), value(1.2, 0.01, 0.01)), Quantity::luminosity, settings_of()));
-  EXPECT_FALSE(
-      settling_factor(input_of(value(1, 0.01, 0.01), value(0.3, 0.01, 0.01)), Quantity::luminosity, settings_of()));
+  EXPECT_FALSE(settling_factor(input_of(value(1, 0.01, 0.01), value(1.2, 0.01, 0.01)),
+                               VarianceShare{Quantity::luminosity, {}, 0}, settings_of()));
+  EXPECT_FALSE(settling_factor(input_of(value(1, 0.01, 0.01), value(0.3, 0.01, 0.01)),
+                               VarianceShare{Quantity::luminosity, {}, 0}, settings_of()));
 }
 
 TEST(SettlingFactor, IsEmptyWhenThisInputAloneCannotSettleIt) {
   const PlacementInput input = input_of(value(1, 0.01, 0.01), value(0.96, 0.1, 0.1));
   ASSERT_FALSE(is_firm(input));
-  EXPECT_FALSE(settling_factor(input, Quantity::luminosity, settings_of()));
+  EXPECT_FALSE(settling_factor(input, VarianceShare{Quantity::luminosity, {}, 0}, settings_of()));
 }
 
 }  // namespace

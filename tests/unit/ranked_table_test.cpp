@@ -160,7 +160,7 @@ TEST(RankedTable, SaysWhatWasUsedAndByWhichRoute) {
   const auto found = cells(candidate, settings, 3);
   EXPECT_EQ(std::get<std::int64_t>(found.at("rank")), 3);
   EXPECT_EQ(std::get<double>(found.at("luminosity_used")), 4);
-  EXPECT_EQ(std::get<std::string>(found.at("luminosity_used_route")), "stellar_radius and teff");
+  EXPECT_EQ(std::get<std::string>(found.at("luminosity_route")), "stellar_radius and teff");
   EXPECT_TRUE(std::holds_alternative<std::monostate>(found.at("luminosity")));
   EXPECT_EQ(std::get<double>(found.at("semi_major_axis_used")), 1);
   EXPECT_EQ(std::get<double>(found.at("insolation_used")), 4);

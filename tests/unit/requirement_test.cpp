@@ -98,12 +98,14 @@ TEST(Requirement, WhatIsNotKnownIsNotMet) {
 TEST(Requirement, ALimitMeetsItWhenAllThatItAllowsDoes) {
   Candidate candidate = planet();
   candidate.row.planet.planet_radius = below(1.7);
+  candidate.answer = answer(candidate.row, settings_of());
   EXPECT_THAT(why("planet_radius<1.8", candidate), IsEmpty());
   EXPECT_THAT(why("planet_radius<1.7", candidate), IsEmpty());
   EXPECT_EQ(why("planet_radius<1.6", candidate), "planet_radius<1.6 is not known to be met: only a limit, < 1.7");
   EXPECT_THAT(why("planet_radius>1", candidate), HasSubstr("not known to be met"));
   EXPECT_THAT(why("planet_radius=1.7", candidate), HasSubstr("not known to be met"));
   candidate.row.planet.planet_radius = above(1.7);
+  candidate.answer = answer(candidate.row, settings_of());
   EXPECT_THAT(why("planet_radius>1.6", candidate), IsEmpty());
   EXPECT_THAT(why("planet_radius>=1.7", candidate), IsEmpty());
   EXPECT_THAT(why("planet_radius<1.8", candidate), HasSubstr("only a limit, > 1.7"));

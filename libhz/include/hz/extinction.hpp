@@ -10,7 +10,8 @@ namespace hz {
 /// Validity  magnitude_b, _v, _g, _j, _k; a broken precondition for any other quantity. Means of the diffuse medium
 ///           (R_V = 3.1); broad bands depend on the star: A_G / A_V falls from 0.79 at solar colours to about 0.6 for M
 ///           dwarfs.
-/// Source    Cardelli, Clayton & Mathis 1989, ApJ 345, 245, doi:10.1086/167900; A_G = 0.79 A_V.
+/// Source    Cardelli, Clayton & Mathis 1989, ApJ 345, 245, doi:10.1086/167900; A_G = 0.79 A_V, Wang & Chen 2019, ApJ
+///           877, 116, doi:10.3847/1538-4357/ab1c61.
 [[nodiscard]] double extinction_ratio(Quantity magnitude);
 
 /// E(colour) / A_V.

@@ -25,6 +25,9 @@ struct Candidate {
 /// A name without blanks and in lower case, for comparing names as people write them.
 [[nodiscard]] std::string folded_name(std::string_view name);
 
+/// "line 12", or "row 11" where lines mean nothing: where a message sends the reader.
+[[nodiscard]] std::string place_in_file(const ListRow& row);
+
 /// Keeps one row of every planet that has several: the adopted one, else the preferred one, else the one with most
 /// measured inputs, then the smallest relative uncertainty of insolation (an assumed error counts as infinite), then
 /// file order. The others are set aside by line; the winner's note says how many there were and over what range their P

@@ -12,27 +12,56 @@
 namespace hz {
 namespace {
 
+bool knows_any(const Understanding& known, std::initializer_list<Quantity> quantities) {
+  return std::any_of(quantities.begin(), quantities.end(), [&](Quantity quantity) { return known.knows(quantity); });
+}
+
+bool knows_distance(const Understanding& known) { return knows_any(known, {Quantity::distance, Quantity::parallax}); }
+
+/// Of a main-sequence star these tell everything, roughly.
+bool knows_type_or_mass(const Understanding& known) {
+  return knows_any(known, {Quantity::spectral_type, Quantity::stellar_mass});
+}
+
+bool knows_color(const Understanding& known) {
+  const bool v = known.knows(Quantity::magnitude_v);
+  const bool from_magnitudes =
+      (v && knows_any(known, {Quantity::magnitude_b, Quantity::magnitude_j, Quantity::magnitude_k})) ||
+      (known.knows(Quantity::magnitude_bp) && known.knows(Quantity::magnitude_rp));
+  return from_magnitudes ||
+         knows_any(known, {Quantity::color_bv, Quantity::color_vk, Quantity::color_vj, Quantity::color_bp_rp});
+}
+
+bool knows_teff(const Understanding& known) {
+  return known.knows(Quantity::teff) || knows_color(known) || knows_type_or_mass(known) ||
+         (known.knows(Quantity::magnitude_k) && knows_distance(known));
+}
+
 bool knows_luminosity(const Understanding& known) {
-  return known.knows(Quantity::luminosity) || known.knows(Quantity::log_luminosity) ||
-         known.knows(Quantity::stellar_radius);
+  const bool stated = knows_any(known, {Quantity::luminosity, Quantity::log_luminosity, Quantity::stellar_radius});
+  const bool magnitude = knows_any(known, {Quantity::magnitude_v, Quantity::magnitude_g, Quantity::magnitude_j,
+                                           Quantity::magnitude_k, Quantity::magnitude_bol});
+  return stated || knows_type_or_mass(known) || (magnitude && knows_distance(known));
 }
 
 bool knows_semi_major_axis(const Understanding& known) {
   return known.knows(Quantity::semi_major_axis) ||
-         (known.knows(Quantity::orbital_period) && known.knows(Quantity::stellar_mass));
+         (known.knows(Quantity::orbital_period) && (known.knows(Quantity::stellar_mass) || knows_luminosity(known)));
 }
 
 bool knows_insolation(const Understanding& known) {
   return known.knows(Quantity::insolation) || known.knows(Quantity::scaled_semi_major_axis);
 }
 
-constexpr auto luminosity_choices = "luminosity, log_luminosity or stellar_radius";
+constexpr auto teff_choices = "teff, a colour, spectral_type or stellar_mass";
+constexpr auto luminosity_choices =
+    "luminosity, log_luminosity, stellar_radius, a magnitude with distance or parallax, spectral_type or stellar_mass";
 constexpr auto orbit_choices =
     "semi_major_axis, orbital_period with stellar_mass, scaled_semi_major_axis or insolation";
 
 std::vector<std::string> missing_for_stars(const Understanding& known) {
   std::vector<std::string> missing;
-  if (!known.knows(Quantity::teff)) missing.emplace_back("teff");
+  if (!knows_teff(known)) missing.emplace_back(teff_choices);
   if (!knows_luminosity(known)) missing.emplace_back(luminosity_choices);
   return missing;
 }
@@ -40,7 +69,7 @@ std::vector<std::string> missing_for_stars(const Understanding& known) {
 std::vector<std::string> missing_for_planets(const Understanding& known) {
   std::vector<std::string> missing;
   if (!known.knows(Quantity::planet)) missing.emplace_back("planet");
-  if (!known.knows(Quantity::teff)) missing.emplace_back("teff");
+  if (!knows_teff(known)) missing.emplace_back(teff_choices);
   if (knows_insolation(known)) return missing;
   if (!knows_semi_major_axis(known)) missing.emplace_back(orbit_choices);
   if (!knows_luminosity(known)) missing.emplace_back(luminosity_choices);

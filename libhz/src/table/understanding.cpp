@@ -183,10 +183,12 @@ private:
   }
 
   void add(const ColumnCandidate& candidate, const std::string& value_unit, std::size_t choice) {
+    // A position may be text in degrees or in hours: only what the file says of its unit counts.
+    const bool is_position = candidate.quantity == Quantity::ra || candidate.quantity == Quantity::dec;
     const bool has_unit = candidate.part != ColumnPart::limit_mark && candidate.part != ColumnPart::route &&
-                          is_numeric(candidate.quantity);
+                          (is_numeric(candidate.quantity) || is_position);
     auto unit = candidate.unit.empty() ? value_unit : candidate.unit;
-    if (unit.empty()) unit = info(candidate.quantity).unit;
+    if (unit.empty() && !is_position) unit = info(candidate.quantity).unit;
     columns_.push_back({candidate.column, candidate.quantity, candidate.part, has_unit ? unit : std::string(),
                         has_unit && candidate.unit.empty() && !unit.empty(), candidate.known_by, choice});
   }
