@@ -13,12 +13,12 @@ void AlignedTable::add(std::vector<std::string> cells, Style style) {
   rows_.push_back({std::move(cells), style});
 }
 
-std::vector<std::size_t> AlignedTable::filled_columns() const {
-  std::vector<std::size_t> result;
+std::vector<AlignedTable::ShownColumn> AlignedTable::filled_columns() const {
+  std::vector<ShownColumn> result;
   for (std::size_t column = 0; column < columns_.size(); ++column) {
     const bool filled =
         std::any_of(rows_.begin(), rows_.end(), [&](const Row& row) { return !row.cells[column].empty(); });
-    if (filled) result.push_back(column);
+    if (filled) result.push_back({column, width_of(column)});
   }
   return result;
 }
@@ -29,11 +29,11 @@ std::size_t AlignedTable::width_of(std::size_t column) const {
   return width;
 }
 
-std::string AlignedTable::line(const std::vector<std::string>& cells, const std::vector<std::size_t>& shown) const {
+std::string AlignedTable::line(const std::vector<std::string>& cells, const std::vector<ShownColumn>& shown) const {
   std::string result;
-  for (const std::size_t column : shown) {
+  for (const auto& [column, width] : shown) {
     const std::string cell = cells[column].empty() ? gap_ : cells[column];
-    const std::string padding(width_of(column) - text_width(cell), ' ');
+    const std::string padding(width - text_width(cell), ' ');
     if (!result.empty()) result += "  ";
     result += columns_[column].align == Align::left ? cell + padding : padding + cell;
   }
@@ -42,7 +42,7 @@ std::string AlignedTable::line(const std::vector<std::string>& cells, const std:
 }
 
 std::string AlignedTable::text(const Console& console, std::size_t indent) const {
-  const std::vector<std::size_t> shown = filled_columns();
+  const std::vector<ShownColumn> shown = filled_columns();
   const std::string margin(indent, ' ');
   std::vector<std::string> headings;
   for (const Column& column : columns_) headings.push_back(column.heading);

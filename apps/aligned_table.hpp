@@ -34,9 +34,13 @@ private:
     std::vector<std::string> cells;
     Style style = Style::plain;
   };
-  [[nodiscard]] std::vector<std::size_t> filled_columns() const;
+  struct ShownColumn {
+    std::size_t column = 0;
+    std::size_t width = 0;
+  };
+  [[nodiscard]] std::vector<ShownColumn> filled_columns() const;
   [[nodiscard]] std::size_t width_of(std::size_t column) const;
-  [[nodiscard]] std::string line(const std::vector<std::string>& cells, const std::vector<std::size_t>& shown) const;
+  [[nodiscard]] std::string line(const std::vector<std::string>& cells, const std::vector<ShownColumn>& shown) const;
 
   std::vector<Column> columns_;
   std::string gap_;

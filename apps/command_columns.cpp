@@ -71,6 +71,7 @@ void write_map(const std::string& path, const TableHead& head, const Understandi
 int run_columns(const Arguments& arguments, Console& console) {
   const OpenList list = open_draft(arguments.words().front(), arguments);
   const TableHead& head = list.reader->head();
+  const Understanding for_stars = Understanding::draft(head, list.map, star_inputs(), list.reader->peek());
   const ColumnReport report = report_columns(head, list.understanding, list.reader->next());
   if (const auto map = arguments.value("write")) write_map(*map, head, list.understanding);
   console.print(fmt::format("{}: {} of {} understood\n\n", head.source, list.understanding.columns().size(),
@@ -78,7 +79,6 @@ int run_columns(const Arguments& arguments, Console& console) {
   console.print(column_table(report).text(console) + "\n");
   const std::size_t width = terminal_width();
   for (const Doubt& doubt : list.understanding.doubts()) console.print(doubt_text(doubt, width));
-  const Understanding for_stars = Understanding::draft(head, list.map, star_inputs());
   console.print(wrapped(job_sentence("`bounds`", report.missing_for_stars, for_stars), width) + "\n");
   console.print(
       wrapped(job_sentence("`rank` (also `check`, `draw`)", report.missing_for_planets, list.understanding), width) +

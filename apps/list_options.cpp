@@ -8,6 +8,7 @@
 #include "closest.hpp"
 #include "files.hpp"
 #include "hz/error.hpp"
+#include "missing_values.hpp"
 
 namespace hz::app {
 namespace {
@@ -15,6 +16,8 @@ namespace {
 constexpr auto reading_table = std::to_array<Option>({
     {"columns", '\0', OptionKind::value, "MAP.toml", OptionGroup::input,
      "how the columns are to be understood; `hzmap columns LIST --write MAP.toml` writes one to edit"},
+    {"missing-value", '\0', OptionKind::list, "QUANTITY=N,...", OptionGroup::input,
+     "numbers that stand for no value of a quantity, such as parallax=0,-1; may be given again"},
 });
 
 constexpr auto writing_table = std::to_array<Option>({
@@ -51,7 +54,10 @@ std::vector<KeptColumn> keep_all(const TableHead& input, std::span<const std::st
 
 ColumnMap column_map(const Arguments& arguments, std::string_view map_option) {
   const std::optional<std::string> file = arguments.value(map_option);
-  return file ? ColumnMap::parse(read_text_file(*file), *file) : ColumnMap{};
+  ColumnMap map = file ? ColumnMap::parse(read_text_file(*file), *file) : ColumnMap{};
+  const auto missing = read_missing_values(arguments.values("missing-value"));
+  map.missing_numbers.insert(map.missing_numbers.end(), missing.begin(), missing.end());
+  return map;
 }
 
 /// The library speaks of --columns, the option of a list that stands alone.
@@ -80,9 +86,9 @@ OpenList open_list(const std::string& path, const Arguments& arguments, std::spa
                    std::string_view map_option) {
   const std::optional<std::string> output = arguments.knows("output") ? arguments.value("output") : std::nullopt;
   if (output && *output != "-" && path != "-") refuse_to_overwrite(path, *output);
-  OpenList list{column_map(arguments, map_option), open_table(path), {}};
+  OpenList list{column_map(arguments, map_option), std::make_unique<PeekedTable>(open_table(path)), {}};
   try {
-    list.understanding = Understanding::of(list.reader->head(), list.map, needed);
+    list.understanding = Understanding::of(list.reader->head(), list.map, needed, list.reader->peek());
   } catch (const Error& error) {
     name_the_option(error, map_option);
   }
@@ -90,8 +96,8 @@ OpenList open_list(const std::string& path, const Arguments& arguments, std::spa
 }
 
 OpenList open_draft(const std::string& path, const Arguments& arguments) {
-  OpenList list{column_map(arguments, "columns"), open_table(path), {}};
-  list.understanding = Understanding::draft(list.reader->head(), list.map);
+  OpenList list{column_map(arguments, "columns"), std::make_unique<PeekedTable>(open_table(path)), {}};
+  list.understanding = Understanding::draft(list.reader->head(), list.map, planet_inputs(), list.reader->peek());
   return list;
 }
 

@@ -7,29 +7,30 @@
 #include <string_view>
 #include <vector>
 
+#include "hz/table/peeked_table.hpp"
 #include "hz/table/table.hpp"
 #include "hz/table/understanding.hpp"
 #include "options.hpp"
 
 namespace hz::app {
 
-[[nodiscard]] std::span<const Option> reading_options();  // --columns
+[[nodiscard]] std::span<const Option> reading_options();  // --columns, --missing-value
 [[nodiscard]] std::span<const Option> writing_options();  // --output, --keep, --strict
 
 /// A list, opened and understood.
 struct OpenList {
   ColumnMap map;
-  std::unique_ptr<TableReader> reader;
+  std::unique_ptr<PeekedTable> reader;
   Understanding understanding;
 };
 
 /// Opens the list at `path` ("-" is standard input) with the user's column map, if `map_option` gives one. A doubt
-/// about a column of a `needed` quantity stops the work. Throws hz::Error: input, or usage for an -o that names the
-/// list itself.
+/// about a column of a `needed` quantity stops the work, and so do implausible numbers in the first rows. Throws
+/// hz::Error: input, or usage for an -o that names the list itself.
 [[nodiscard]] OpenList open_list(const std::string& path, const Arguments& arguments, std::span<const Quantity> needed,
                                  std::string_view map_option = "columns");
 
-/// The same, doubtful columns being left unused: for telling how a list is understood.
+/// The same, with doubts instead of an error: for telling how a list is understood.
 [[nodiscard]] OpenList open_draft(const std::string& path, const Arguments& arguments);
 
 /// The index of a column that an option names. Throws hz::Error (usage) that offers the closest name.

@@ -106,14 +106,19 @@ std::span<const Option> planet_value_options() { return planet_table; }
 
 Measured typed_value(std::string_view option, Quantity quantity, const std::string& text) {
   const Result<MeasuredText> read = parse_measured(text, option);
-  if (!read)
-    throw Error(Fault::usage, fmt::format("--{} cannot be read from `{}`; write it like 4410, 4410+-70, 4410+80-60, "
-                                          "0.165(9) or <0.3",
-                                          option, text));
+  if (!read) {
+    const std::string hint = comma_hint(text);
+    throw Error(Fault::usage,
+                fmt::format("--{} cannot be read from `{}`{}", option, text,
+                            hint.empty() ? "; write it like 4410, 4410+-70, 4410+80-60, 0.165(9) or <0.3" : hint));
+  }
   const std::optional<Conversion> to_canonical = read->unit.empty() ? Conversion{} : conversion(quantity, read->unit);
   if (!to_canonical)
     throw Error(Fault::usage, fmt::format("--{} has an unknown unit `{}` in `{}`; without a unit it is in {}", option,
                                           read->unit, text, info(quantity).unit));
+  if (to_canonical->kind == ConversionKind::reciprocal && read->measured.value <= 0)
+    throw Error(Fault::usage,
+                fmt::format("--{} is a parallax in `{}`, and one that is not above 0 gives no distance", option, text));
   Measured measured = convert(read->measured, *to_canonical);
   measured.exact = !measured.minus && !measured.plus && measured.limit == LimitMark::none;
   return measured;

@@ -178,14 +178,58 @@ std::optional<double> plain_number(std::string_view text) {
   return whole ? std::optional(value) : std::nullopt;
 }
 
+std::optional<MeasuredText> read_any(std::string_view bare) {
+  return is_ascii(bare) ? read(bare) : read(words::trimmed(in_ascii(bare)));
+}
+
+bool is_between_digits(std::string_view text, std::size_t at) {
+  return at > 0 && at + 1 < text.size() && is_digit(text[at - 1]) && is_digit(text[at + 1]);
+}
+
+// Every comma between digits made `to`.
+std::string commas_made(std::string_view text, std::string_view to) {
+  std::string out;
+  for (std::size_t i = 0; i < text.size(); ++i) {
+    if (text[i] == ',' && is_between_digits(text, i)) {
+      out += to;
+    } else {
+      out += text[i];
+    }
+  }
+  return out;
+}
+
+// "5,772" and "1,234,567": three digits behind each comma.
+bool groups_thousands(std::string_view text) {
+  for (auto at = text.find(','); at != std::string_view::npos; at = text.find(',', at + 1)) {
+    const auto group = text.substr(at + 1);
+    const auto digits = std::min(group.find_first_not_of("0123456789"), group.size());
+    if (digits != 3) return false;
+  }
+  return true;
+}
+
 }  // namespace
 
 Result<MeasuredText> parse_measured(std::string_view text, std::string_view column) {
   const auto bare = words::trimmed(text);
   if (const auto value = plain_number(bare)) return MeasuredText{Measured{*value, {}, {}, LimitMark::none, false}, {}};
-  if (auto found = is_ascii(bare) ? read(bare) : read(words::trimmed(in_ascii(bare)))) return *std::move(found);
+  if (auto found = read_any(bare)) return *std::move(found);
   return Problem{ProblemCode::unreadable, std::string(column),
-                 std::string(column) + " holds " + words::quoted(bare) + ", which is not a value"};
+                 std::string(column) + " holds " + words::quoted(bare) + ", which is not a value" + comma_hint(bare)};
+}
+
+std::string comma_hint(std::string_view text) {
+  const auto bare = words::trimmed(text);
+  if (bare.find(',') == std::string_view::npos || read_any(bare)) return {};
+  const auto with_point = commas_made(bare, ".");
+  const auto without = commas_made(bare, "");
+  const bool as_decimal = read_any(with_point).has_value();
+  const bool as_thousands = groups_thousands(bare) && read_any(without).has_value();
+  if (as_decimal && as_thousands) return "; a comma in a number? write " + with_point + " or " + without;
+  if (as_decimal) return "; a decimal comma? write " + with_point;
+  if (as_thousands) return "; a comma in a number? write " + without;
+  return {};
 }
 
 bool is_missing(std::string_view text) {
@@ -199,7 +243,8 @@ bool is_missing(std::string_view text) {
 std::optional<double> parse_number(std::string_view text) {
   const auto bare = words::trimmed(text);
   if (const auto value = plain_number(bare)) return value;
-  Scanner scan(bare);
+  const auto ascii = in_ascii(bare);
+  Scanner scan(ascii);
   const auto value = scan.signed_number();
   return value && scan.at_end() ? value : std::nullopt;
 }

@@ -123,6 +123,7 @@ constexpr auto symbols = std::to_array<Unit>({
     {"erg.s-1", power, 1e-7},
 
     {"K", temperature, 1},
+    {"kK", temperature, 1e3},
 
     {"g.cm-3", density, 1},
     {"g/cm3", density, 1},

@@ -46,16 +46,19 @@ std::optional<Dimension> dimension_of(Quantity quantity) {
   return std::nullopt;
 }
 
-// What `log(...)`, `log10(...)`, `lg(...)`, `dex(...)` or `[...]` holds; the unit itself without one of them.
-std::string_view unwrapped(std::string_view unit) {
-  static constexpr std::array<std::pair<std::string_view, std::string_view>, 5> wrappers{
-      {{"log(", ")"}, {"log10(", ")"}, {"lg(", ")"}, {"dex(", ")"}, {"[", "]"}}};
-  for (const auto& [open, close] : wrappers) {
+constexpr auto log_wrappers = std::to_array<std::pair<std::string_view, std::string_view>>(
+    {{"log(", ")"}, {"log10(", ")"}, {"lg(", ")"}, {"dex(", ")"}, {"[", "]"}});
+
+// What `log(...)`, `log10(...)`, `lg(...)`, `dex(...)` or `[...]` holds; nullopt without one of them.
+std::optional<std::string_view> inside_log(std::string_view unit) {
+  for (const auto& [open, close] : log_wrappers) {
     if (!unit.starts_with(open) || !unit.ends_with(close)) continue;
     return words::trimmed(unit.substr(open.size(), unit.size() - open.size() - close.size()));
   }
-  return unit;
+  return std::nullopt;
 }
+
+std::string_view unwrapped(std::string_view unit) { return inside_log(unit).value_or(unit); }
 
 // A logarithm in another unit is the same number plus a constant. A bare "dex" says nothing of the unit: the usual one.
 std::optional<Conversion> log_conversion(Quantity quantity, std::string_view unit) {
@@ -83,21 +86,51 @@ double canonical_size(Quantity quantity, Dimension dimension) {
   return *size;
 }
 
-Measured reciprocal(const Measured& measured, double factor) {
-  HZ_REQUIRE(measured.value > 0);
+// The logarithm of something that is wanted itself, called so in letters: "[K]" is too often meant as K. That of a
+// luminosity is a quantity of its own.
+std::optional<Conversion> antilog(Quantity quantity, Dimension dimension, std::string_view unit) {
+  if (quantity == Quantity::luminosity || unit.starts_with('[')) return std::nullopt;
+  const auto inside = inside_log(unit);
+  const auto size = inside ? unit_size(dimension, *inside) : std::nullopt;
+  if (!size) return std::nullopt;
+  return Conversion{ConversionKind::antilog, *size / canonical_size(quantity, dimension)};
+}
+
+std::optional<Conversion> dimming(std::string_view unit) {
+  const auto magnitudes = unit_size(Dimension::magnitude, unit);
+  if (!magnitudes) return std::nullopt;
+  return Conversion{ConversionKind::dimming, *magnitudes};
+}
+
+constexpr double ln_10 = 2.302585092994045684;
+
+// The ends of the interval are carried over.
+Measured bent(const Measured& measured, const Conversion& conversion) {
   Measured out = measured;
-  out.value = factor / measured.value;
-  // The ends of the interval are carried over; where the far end would pass zero, the slope serves.
-  if (measured.plus) out.minus = out.value - factor / (measured.value + *measured.plus);
+  out.value = convert(measured.value, conversion);
+  if (measured.plus) out.plus = convert(measured.value + *measured.plus, conversion) - out.value;
+  if (measured.minus) out.minus = out.value - convert(measured.value - *measured.minus, conversion);
+  return out;
+}
+
+LimitMark turned(LimitMark mark) {
+  if (mark == LimitMark::none) return mark;
+  return mark == LimitMark::upper ? LimitMark::lower : LimitMark::upper;
+}
+
+Measured reciprocal(const Measured& measured, const Conversion& conversion) {
+  Measured out = measured;
+  out.value = convert(measured.value, conversion);
+  out.minus.reset();
+  out.plus.reset();
+  if (measured.plus) out.minus = out.value - convert(measured.value + *measured.plus, conversion);
+  // Where the far end would pass zero, the slope serves.
+  const double near_zero = measured.value - measured.minus.value_or(0);
   if (measured.minus) {
-    const double near_zero = measured.value - *measured.minus;
-    const bool crosses = near_zero <= 0;
-    out.plus = crosses ? out.value / measured.value * *measured.minus : factor / near_zero - out.value;
+    out.plus =
+        near_zero > 0 ? convert(near_zero, conversion) - out.value : out.value / measured.value * *measured.minus;
   }
-  if (!measured.plus) out.minus.reset();
-  if (!measured.minus) out.plus.reset();
-  if (measured.limit == LimitMark::upper) out.limit = LimitMark::lower;
-  if (measured.limit == LimitMark::lower) out.limit = LimitMark::upper;
+  out.limit = turned(measured.limit);
   return out;
 }
 
@@ -116,19 +149,46 @@ std::optional<Conversion> conversion(Quantity quantity, std::string_view unit) {
   if (const auto size = unit_size(*dimension, unit)) {
     return Conversion{ConversionKind::factor, *size / canonical_size(quantity, *dimension)};
   }
-  return quantity == Quantity::distance ? parallax_as_distance(unit) : std::nullopt;
+  if (quantity == Quantity::distance) {
+    if (const auto parallax = parallax_as_distance(unit)) return parallax;
+  }
+  if (quantity == Quantity::transit_depth) {
+    if (const auto magnitudes = dimming(unit)) return magnitudes;
+  }
+  return antilog(quantity, *dimension, unit);
+}
+
+double convert(double value, const Conversion& conversion) {
+  switch (conversion.kind) {
+    case ConversionKind::factor: return value * conversion.number;
+    case ConversionKind::offset: return value + conversion.number;
+    case ConversionKind::reciprocal: HZ_REQUIRE(value > 0); return conversion.number / value;
+    case ConversionKind::antilog: return conversion.number * std::pow(10.0, value);
+    case ConversionKind::dimming: return -std::expm1(-0.4 * ln_10 * conversion.number * value);
+  }
+  return value;
+}
+
+double convert_back(double canonical, const Conversion& conversion) {
+  switch (conversion.kind) {
+    case ConversionKind::factor: return canonical / conversion.number;
+    case ConversionKind::offset: return canonical - conversion.number;
+    case ConversionKind::reciprocal: return conversion.number / canonical;
+    case ConversionKind::antilog: return std::log10(canonical / conversion.number);
+    case ConversionKind::dimming: return std::log1p(-canonical) / (-0.4 * ln_10 * conversion.number);
+  }
+  return canonical;
 }
 
 Measured convert(const Measured& measured, const Conversion& conversion) {
+  if (conversion.kind == ConversionKind::reciprocal) return reciprocal(measured, conversion);
+  const bool is_straight = conversion.kind == ConversionKind::factor || conversion.kind == ConversionKind::offset;
+  if (!is_straight) return bent(measured, conversion);
   Measured out = measured;
-  switch (conversion.kind) {
-    case ConversionKind::reciprocal: return reciprocal(measured, conversion.number);
-    case ConversionKind::offset: out.value += conversion.number; break;
-    case ConversionKind::factor:
-      out.value *= conversion.number;
-      out.minus = scaled(measured.minus, conversion.number);
-      out.plus = scaled(measured.plus, conversion.number);
-  }
+  out.value = convert(measured.value, conversion);
+  if (conversion.kind == ConversionKind::offset) return out;
+  out.minus = scaled(measured.minus, conversion.number);
+  out.plus = scaled(measured.plus, conversion.number);
   return out;
 }
 

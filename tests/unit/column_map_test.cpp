@@ -8,6 +8,7 @@ namespace {
 
 using ::testing::ElementsAre;
 using ::testing::HasSubstr;
+using ::testing::UnorderedElementsAre;
 
 std::string refusal(std::string_view text) {
   return testing::error_of([&] { (void)ColumnMap::parse(text, "map.toml"); });
@@ -21,9 +22,15 @@ teff = "T (phot)"
 teff_err_plus = "dT+"
 distance = { column = "d", unit = "pc" }
 star = "Host, components"
+[missing_values]
+parallax = [0, -1]
+teff = -99.5
 )toml",
                                     "map.toml");
   EXPECT_THAT(map.missing_values, ElementsAre("-99", "unknown"));
+  EXPECT_THAT(map.missing_numbers, UnorderedElementsAre(ColumnMap::MissingNumber{Quantity::parallax, 0},
+                                                        ColumnMap::MissingNumber{Quantity::parallax, -1},
+                                                        ColumnMap::MissingNumber{Quantity::teff, -99.5}));
   ASSERT_EQ(map.ignored.size(), 1U);
   EXPECT_EQ(map.ignored[0].column, "K");
   EXPECT_EQ(map.ignored[0].place, "map.toml:2:11");
@@ -57,9 +64,36 @@ TEST(ColumnMap, MistakesNameTheirPlace) {
   EXPECT_THAT(refusal("[columns]\nstar_err = \"T\"\n"), HasSubstr("\"star_err\" is not a column name"));
   EXPECT_THAT(refusal("missing = \"-99\"\n"), HasSubstr("map.toml:1:11: missing must be a list of texts"));
   EXPECT_THAT(refusal("missing = [-99]\n"), HasSubstr("map.toml:1:12: missing must be text in quotes"));
+  EXPECT_THAT(refusal("[missing_values]\nparalax = 0\n"),
+              HasSubstr("map.toml:2:1: \"paralax\" is not a quantity with a number"));
+  EXPECT_THAT(refusal("[missing_values]\nstar = 0\n"), HasSubstr("\"star\" is not a quantity with a number"));
+  EXPECT_THAT(refusal("[missing_values]\nparallax = [0, \"none\"]\n"),
+              HasSubstr("map.toml:2:16: parallax must be a number or a list of numbers"));
+  EXPECT_THAT(refusal("[missing_values]\nparallax = nan\n"), HasSubstr("must be a number"));
+  EXPECT_THAT(refusal("missing_values = [0]\n"), HasSubstr("must be a section [missing_values]"));
   EXPECT_THAT(refusal("columns = 3\n"), HasSubstr("columns must be a section [columns]"));
   EXPECT_THAT(refusal("[columns\n"), HasSubstr("map.toml:1:"));
   EXPECT_THAT(refusal("[columns]\nteff = \"a\"\nteff = \"b\"\n"), HasSubstr("map.toml:3:"));
+}
+
+TEST(ColumnMap, TextMayStandInSeveralColumns) {
+  const testing::Folder folder;
+  const auto list = folder.write("list.csv", "HIP,Name,T\n1,,5000\n2,Lantern 2,5000\n,,5000\n");
+  const auto rows =
+      testing::read_list(list, ColumnMap::parse("[columns]\nteff = \"T\"\nstar = [\"Name\", \"HIP\"]\n", "map.toml"));
+  EXPECT_EQ(rows[0].star.name, "1");
+  EXPECT_EQ(rows[1].star.name, "Lantern 2");
+  EXPECT_EQ(rows[2].star.name, "");
+  EXPECT_THAT(refusal("[columns]\nteff = [\"T1\", \"T2\"]\n"),
+              HasSubstr("map.toml:2:1: teff takes one column; only text, such as star, takes a list of them"));
+  EXPECT_THAT(refusal("[columns]\nstar = [1]\n"), HasSubstr("star must be text in quotes"));
+}
+
+TEST(ColumnMap, HeaderThatBeginsInBracketsStatesNoUnit) {
+  const testing::Folder folder;
+  const auto list = folder.write("list.csv", "[Fe/H]1,T\n-0.5,5000\n");
+  const auto map = ColumnMap::parse("[columns]\nmetallicity = \"[Fe/H]1\"\n", "map.toml");
+  EXPECT_EQ(testing::read_list(list, map)[0].star.metallicity.stated->value, -0.5);
 }
 
 TEST(ColumnMap, ColumnsMustBeThere) {

@@ -3,6 +3,7 @@
 #include <gmock/gmock.h>
 #include <gtest/gtest.h>
 
+#include "hz/table/peeked_table.hpp"
 #include "list_files.hpp"
 
 namespace hz {
@@ -62,6 +63,16 @@ TEST(StarterMap, ChangesNothingAsItStands) {
   EXPECT_THAT(text, HasSubstr("# teff_err = \"Teff err\"\n"));
   EXPECT_THAT(text, HasSubstr("# column \"e\" may be eccentricity:\n# eccentricity = \"e\"\n"));
   EXPECT_THAT(text, HasSubstr("#   \"two lines"));
+}
+
+TEST(StarterMap, LeavesADoubtedColumnToBeDecided) {
+  const testing::Folder folder;
+  PeekedTable table(open_table(folder.write("list.csv", "star,plx,e_plx\na,0.02,0.001\nb,0.03,\nc,0.04,\n")));
+  const auto draft = Understanding::draft(table.head(), {}, planet_inputs(), table.peek());
+  const auto text = starter_map(table.head(), draft);
+  EXPECT_THAT(text, ::testing::Not(HasSubstr("# parallax = \"plx\"\n")));
+  EXPECT_THAT(text, HasSubstr("# parallax_err = \"e_plx\"\n"));
+  EXPECT_THAT(text, HasSubstr("it looks like arcsec:\n# parallax = { column = \"plx\", unit = \"arcsec\" }\n"));
 }
 
 TEST(StarterMap, ItsLinesGiveTheSameUnderstanding) {

@@ -90,6 +90,31 @@ TEST(MeasuredText, LongTextIsCutToFortyCharacters) {
   EXPECT_EQ(read.error().what, "c holds \"" + std::string(39, 'a') + "é…\", which is not a value");
 }
 
+TEST(CommaHint, SaysWhatToWrite) {
+  EXPECT_EQ(comma_hint("4,62"), "; a decimal comma? write 4.62");
+  EXPECT_EQ(comma_hint(" -0,5 "), "; a decimal comma? write -0.5");
+  EXPECT_EQ(comma_hint("4,62 ± 0,03"), "; a decimal comma? write 4.62 ± 0.03");
+  EXPECT_EQ(comma_hint("4,62 (+0,1/-0,2) RJ"), "; a decimal comma? write 4.62 (+0.1/-0.2) RJ");
+  EXPECT_EQ(comma_hint("<0,3"), "; a decimal comma? write <0.3");
+  EXPECT_EQ(comma_hint("0,123"), "; a comma in a number? write 0.123 or 0123");
+}
+
+TEST(CommaHint, ThreeDigitsMayBeThousands) {
+  EXPECT_EQ(comma_hint("5,772"), "; a comma in a number? write 5.772 or 5772");
+  EXPECT_EQ(comma_hint("1,234.5"), "; a comma in a number? write 1234.5");
+  EXPECT_EQ(comma_hint("1,234,567"), "; a comma in a number? write 1234567");
+}
+
+TEST(CommaHint, IsSilentWhereCommasAreNotTheTrouble) {
+  for (const auto* const text : {"", "4.62", "hot", "1,2,3", "a,b", ",5", "5,", "4,62+5", "4410+80,-60"})
+    EXPECT_EQ(comma_hint(text), "") << text;
+}
+
+TEST(CommaHint, StandsInTheProblem) {
+  EXPECT_EQ(parse_measured("4,62", "L").error().what,
+            "L holds \"4,62\", which is not a value; a decimal comma? write 4.62");
+}
+
 TEST(MissingText, DocumentedSpellingsInAnyCase) {
   for (const auto* const text :
        {"", "  ", "nan", "NaN", "null", "NULL", "none", "n/a", "N/A", "na", "NA", "-", " - ", "--", "...", "…"})
@@ -100,6 +125,7 @@ TEST(MissingText, DocumentedSpellingsInAnyCase) {
 TEST(NumberText, WholeTextOrNothing) {
   EXPECT_EQ(parse_number("+1.5"), 1.5);
   EXPECT_EQ(parse_number(" -2d2 "), -200.0);
+  EXPECT_EQ(parse_number("\u22120.5"), -0.5);
   EXPECT_EQ(parse_number("1.7976931348623157e308"), 1.7976931348623157e308);
   for (const auto* const text : {"", "1 d", "1d", "nan", "inf", "1e400", "++1", "+-1", "1e", "0x1p3"})
     EXPECT_EQ(parse_number(text), std::nullopt) << text;

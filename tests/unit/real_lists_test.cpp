@@ -4,7 +4,9 @@
 
 #include <map>
 
+#include "hz/table/peeked_table.hpp"
 #include "list_files.hpp"
+#include "record_fields.hpp"
 
 namespace hz {
 namespace {
@@ -192,6 +194,109 @@ TEST(RealLists, WorksheetAgreesWithTheListItCameFrom) {
     ++distances;
   }
   EXPECT_GT(distances, 60U);
+}
+
+ColumnMap map_named(const std::string& name) {
+  return ColumnMap::parse(testing::bytes_of(HZ_TEST_DIR "/cli/" + name), name);
+}
+
+std::vector<Doubt> implausible(const std::string& name, const ColumnMap& map = {}) {
+  PeekedTable table(open_table(list_path(name)));
+  auto doubts = Understanding::draft(table.head(), map, planet_inputs(), table.peek()).doubts();
+  std::erase_if(doubts, [](const Doubt& doubt) { return doubt.what.find(" has a median of ") == std::string::npos; });
+  return doubts;
+}
+
+std::size_t stated(const std::vector<ListRow>& rows, Field StarRecord::*field) {
+  return static_cast<std::size_t>(std::count_if(
+      rows.begin(), rows.end(), [field](const ListRow& row) { return (row.star.*field).stated.has_value(); }));
+}
+
+std::size_t problems(const std::vector<ListRow>& rows) {
+  std::size_t out = 0;
+  for (const auto& row : rows) {
+    for (const auto& [quantity, field] : star_fields) out += (row.star.*field).problem.has_value() ? 1U : 0U;
+  }
+  return out;
+}
+
+TEST(RealLists, BrightListHasItsParallaxesInArcsec) {
+  HZ_NEEDS_LIST("mdwarfs_bright_2011.csv");
+  const auto doubts = implausible("mdwarfs_bright_2011.csv");
+  ASSERT_EQ(doubts.size(), 1U);
+  EXPECT_TRUE(doubts[0].blocks);
+  EXPECT_THAT(doubts[0].what, HasSubstr("column \"plx\" has a median of 0.0"));
+  EXPECT_THAT(doubts[0].what, HasSubstr("it looks like arcsec"));
+  EXPECT_THAT(doubts[0].map_lines, ::testing::Contains("parallax = { column = \"plx\", unit = \"arcsec\" }"));
+}
+
+TEST(RealLists, NoOtherListLooksImplausible) {
+  for (const auto* const name : {"nearest_10pc.csv", "mdwarfs_spectra_2015.csv", "planets_composite_2023.csv",
+                                 "planets_solutions_2025.csv", "worksheet_mixed.csv"}) {
+    HZ_NEEDS_LIST(name);
+    EXPECT_THAT(implausible(name), ::testing::IsEmpty()) << name;
+  }
+  EXPECT_THAT(implausible("mdwarfs_bright_2011.csv", map_named("bright_2011_map.toml")), ::testing::IsEmpty());
+  EXPECT_THAT(implausible("mdwarfs_spectra_2015.csv", map_named("spectra_2015_map.toml")), ::testing::IsEmpty());
+  EXPECT_THAT(implausible("nearest_10pc.csv", map_named("nearest_10pc_map.toml")), ::testing::IsEmpty());
+  EXPECT_THAT(implausible("worksheet_mixed.csv", map_named("worksheet_map.toml")), ::testing::IsEmpty());
+}
+
+// Source of the counts in the next three: Python's csv module on the same files, and their README.
+TEST(RealLists, BrightListWithItsMap) {
+  HZ_NEEDS_LIST("mdwarfs_bright_2011.csv");
+  const auto rows = testing::read_list(list_path("mdwarfs_bright_2011.csv"), map_named("bright_2011_map.toml"));
+  ASSERT_EQ(rows.size(), 8889U);
+  EXPECT_EQ(problems(rows), 0U);
+  EXPECT_EQ(stated(rows, &StarRecord::parallax), 1422U);
+  EXPECT_EQ(stated(rows, &StarRecord::magnitude_b), 7331U);
+  for (const auto field : {&StarRecord::magnitude_v, &StarRecord::magnitude_j, &StarRecord::magnitude_h,
+                           &StarRecord::magnitude_k, &StarRecord::color_vj})
+    EXPECT_EQ(stated(rows, field), 8889U);
+  const auto& third = rows[2].star;  // line 4
+  EXPECT_EQ(third.name, "I00014-1656");
+  EXPECT_EQ(third.id, "PM J00014-1656");
+  EXPECT_EQ(third.spectral_type, "k7");
+  EXPECT_DOUBLE_EQ(third.parallax.stated->value, 31.1);
+  EXPECT_DOUBLE_EQ(*third.parallax.stated->plus, 2.2);
+  EXPECT_EQ(third.magnitude_k.stated->value, 7.22);
+}
+
+TEST(RealLists, SpectraListWithItsMap) {
+  HZ_NEEDS_LIST("mdwarfs_spectra_2015.csv");
+  const auto rows = testing::read_list(list_path("mdwarfs_spectra_2015.csv"), map_named("spectra_2015_map.toml"));
+  ASSERT_EQ(rows.size(), 447U);
+  EXPECT_EQ(problems(rows), 0U);
+  EXPECT_EQ(stated(rows, &StarRecord::teff), 353U);
+  EXPECT_EQ(stated(rows, &StarRecord::parallax), 388U);
+  EXPECT_EQ(stated(rows, &StarRecord::magnitude_k), 0U);
+  for (const auto field : {&StarRecord::stellar_radius, &StarRecord::log_luminosity, &StarRecord::metallicity})
+    EXPECT_EQ(stated(rows, field), 447U);
+  EXPECT_EQ(count(rows, [](const ListRow& row) { return row.star.stellar_radius.stated->value < 0; }), 41U);
+  const auto& first = rows[0].star;  // line 2
+  EXPECT_EQ(first.name, "LSPM J0001+0659");
+  EXPECT_EQ(first.parallax.stated, (Measured{57.1, 2.6, 2.6, LimitMark::none, false}));
+  EXPECT_EQ(first.log_luminosity.stated, (Measured{-3.03, 0.11, 0.11, LimitMark::none, false}));
+  EXPECT_EQ(first.metallicity.stated->value, -0.05);
+}
+
+TEST(RealLists, NearestListWithItsMap) {
+  HZ_NEEDS_LIST("nearest_10pc.csv");
+  const auto rows = testing::read_list(list_path("nearest_10pc.csv"), map_named("nearest_10pc_map.toml"));
+  ASSERT_EQ(rows.size(), 380U);
+  EXPECT_EQ(problems(rows), 0U);
+  EXPECT_EQ(stated(rows, &StarRecord::magnitude_v), 325U);
+  EXPECT_EQ(stated(rows, &StarRecord::magnitude_b), 314U);
+  EXPECT_EQ(stated(rows, &StarRecord::distance), 380U);
+  EXPECT_EQ(stated(rows, &StarRecord::companion_separation), 115U);
+  EXPECT_EQ(count(rows, [](const ListRow& row) { return row.star.name.empty(); }), 1U);
+  EXPECT_EQ(count(rows, [](const ListRow& row) { return row.star.spectral_type.empty(); }), 34U);
+  EXPECT_EQ(count(rows, [](const ListRow& row) { return row.planet.orbital_period.stated.has_value(); }), 0U);
+  const auto& second = rows[1].star;  // line 3
+  EXPECT_EQ(second.spectral_type, "G2V");
+  EXPECT_EQ(second.magnitude_v.stated->value, 0.01);
+  EXPECT_EQ(second.distance.stated->value, 1.346);
+  EXPECT_EQ(second.companion_separation.stated->value, 5.5);
 }
 
 TEST(RealLists, NearestStarsEndTheirHeaderInASeparator) {

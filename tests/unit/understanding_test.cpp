@@ -76,7 +76,7 @@ TEST(Understanding, HeadersAsPeopleWriteThem) {
   EXPECT_EQ(meaning("M sin i"), "min_mass [?earthMass] words");
   EXPECT_EQ(meaning("Mass*sin(i) [Jupiter Mass]"), "min_mass [Jupiter Mass] words");
   EXPECT_EQ(meaning("[Fe/H] (dex)"), "metallicity [dex] words");
-  EXPECT_EQ(meaning("Distance [mas]"), "distance [mas] words");
+  EXPECT_EQ(meaning("Distance [mas]"), "parallax [mas] words");
   EXPECT_EQ(meaning("Parallax (arcsec)"), "parallax [arcsec] words");
   EXPECT_EQ(meaning("rotation period"), "-");
   EXPECT_EQ(meaning("Δv mag"), "-");
@@ -89,6 +89,27 @@ TEST(Understanding, LogarithmIsToldByTheUnit) {
               ElementsAre("log_luminosity [dex] words", "log_luminosity_err [?dex] words"));
   EXPECT_THAT(meanings(head_of({"Luminosity [Lsun]", "Luminosity error"})),
               ElementsAre("luminosity [Lsun] words", "luminosity_err [?Lsun] words"));
+}
+
+TEST(Understanding, BracketsMayBePartOfTheWords) {
+  EXPECT_EQ(meaning("E(B-V)"), "reddening_bv [?mag] words");
+  EXPECT_EQ(meaning("E(B-V) [mag]"), "reddening_bv [mag] words");
+  EXPECT_THAT(refusal({"e (orbit)"}), HasSubstr("column \"e (orbit)\" may be eccentricity"));
+}
+
+TEST(Understanding, ParallaxIsToldByTheUnit) {
+  EXPECT_THAT(meanings(head_of({"distance [mas]", "distance_err", "distance_limit"})),
+              ElementsAre("parallax [mas] name", "parallax_err [?mas] name", "parallax_limit [] name"));
+  EXPECT_THAT(meanings(head_of({"Distance [arcsec]", "e_Distance"})),
+              ElementsAre("parallax [arcsec] words", "parallax_err [arcsec] words"));
+  // A half-width in pc is none of a parallax, nor the other way round.
+  EXPECT_THAT(meanings(head_of({"distance [mas]", "distance_err [pc]"})), ElementsAre("parallax [mas] name", "-"));
+  EXPECT_THAT(meanings(head_of({"distance", "distance_err [mas]"})), ElementsAre("distance [?pc] name", "-"));
+}
+
+TEST(Understanding, HalfWidthsFollowWhatTheUnitTells) {
+  EXPECT_THAT(meanings(head_of({"luminosity [dex]", "luminosity_err"})),
+              ElementsAre("log_luminosity [dex] name", "log_luminosity_err [?dex] name"));
 }
 
 TEST(Understanding, HalfWidthSpellings) {

@@ -72,6 +72,7 @@ TEST(Units, OtherUnitsAreConverted) {
   EXPECT_EQ(factor(Quantity::orbital_period, "a"), 365.25);
   EXPECT_DOUBLE_EQ(factor(Quantity::orbital_period, "h"), 1.0 / 24);
   EXPECT_EQ(factor(Quantity::parallax, "arcsec"), 1000);
+  EXPECT_EQ(factor(Quantity::teff, "kK"), 1000);
   // Source: IAU 2015 Resolution B3, nominal equatorial radii 7.1492e7 m and 6.3781e6 m, GM 1.2668653e17
   // and 3.986004e14.
   EXPECT_DOUBLE_EQ(factor(Quantity::planet_radius, "RJ"), 7.1492e7 / 6.3781e6);
@@ -114,6 +115,44 @@ TEST(Units, ParallaxInADistanceColumnIsItsReciprocal) {
   EXPECT_DOUBLE_EQ(*far.plus, 1000.0 / 90 - 10);
   EXPECT_EQ(far.limit, LimitMark::lower);
   EXPECT_DOUBLE_EQ(convert(Measured{0.5, {}, {}, {}, {}}, *conversion(Quantity::distance, "arcsec")).value, 2);
+}
+
+TEST(Units, LogarithmsOfWhatIsWantedItself) {
+  const auto log_teff = conversion(Quantity::teff, "log(K)");
+  ASSERT_TRUE(log_teff.has_value());
+  EXPECT_EQ(log_teff, conversion(Quantity::teff, "dex(K)"));
+  const auto teff = convert(Measured{3.76, 0.01, 0.02, LimitMark::upper, false}, *log_teff);
+  EXPECT_NEAR(teff.value, 5754.399, 1e-3);  // 10^3.76
+  EXPECT_NEAR(*teff.minus, teff.value - std::pow(10, 3.75), 1e-9);
+  EXPECT_NEAR(*teff.plus, std::pow(10, 3.78) - teff.value, 1e-9);
+  EXPECT_EQ(teff.limit, LimitMark::upper);
+  EXPECT_NEAR(convert(2, *conversion(Quantity::planet_radius, "log(km)")), 100 / 6378.1, 1e-12);
+  EXPECT_FALSE(conversion(Quantity::teff, "[K]"));              // in brackets, but hardly a logarithm
+  EXPECT_FALSE(conversion(Quantity::luminosity, "log(Lsun)"));  // has a quantity of its own
+}
+
+// Source: Pogson's ratio, 10^(-0.4 m): 1 - 10^(-0.004) = x - x^2/2 + x^3/6 with x = 0.004 ln 10 = 0.00921034, that is
+// 0.00916806; 1 - 10^(-0.04) = 0.0879892 by x = 0.0921034 to the fifth power.
+TEST(Units, DimmingInMagnitudesIsAFraction) {
+  const auto mmag = conversion(Quantity::transit_depth, "mmag");
+  ASSERT_TRUE(mmag.has_value());
+  const auto depth = convert(Measured{10, 1, {}, {}, false}, *mmag);
+  EXPECT_NEAR(depth.value, 0.00916806, 1e-8);
+  EXPECT_NEAR(*depth.minus, depth.value - convert(9, *mmag), 1e-15);
+  EXPECT_NEAR(convert(0.1, *conversion(Quantity::transit_depth, "mag")), 0.0879892, 1e-7);
+}
+
+TEST(Units, BackAgain) {
+  const std::vector<std::pair<Quantity, std::string>> units{{Quantity::planet_radius, "RJ"},
+                                                            {Quantity::log_g, "log(m/s2)"},
+                                                            {Quantity::distance, "arcsec"},
+                                                            {Quantity::teff, "log(kK)"},
+                                                            {Quantity::transit_depth, "mmag"}};
+  for (const auto& [quantity, unit] : units) {
+    const auto found = conversion(quantity, unit);
+    ASSERT_TRUE(found.has_value()) << unit;
+    EXPECT_NEAR(convert_back(convert(0.3, *found), *found), 0.3, 1e-14) << unit;
+  }
 }
 
 TEST(Units, ParallaxWiderThanItselfKeepsAFiniteHalfWidth) {

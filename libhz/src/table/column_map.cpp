@@ -1,7 +1,7 @@
 #include <fmt/format.h>
 #include <toml++/toml.h>
 
-#include <array>
+#include <cmath>
 #include <string>
 
 #include "hz/error.hpp"
@@ -55,10 +55,35 @@ private:
       for (auto& [text, where] : texts(key, node)) map_.ignored.push_back({std::move(text), place(where)});
     } else if (key == "columns") {
       take_columns(key, node);
+    } else if (key == "missing_values") {
+      take_missing_numbers(key, node);
     } else {
-      fail(key.source(), fmt::format("{} is not a key of a column map; the keys are missing, ignore and [columns]",
+      fail(key.source(), fmt::format("{} is not a key of a column map; the keys are missing, ignore, [columns] and "
+                                     "[missing_values]",
                                      words::quoted(key.str())));
     }
+  }
+
+  void take_missing_numbers(const toml::key& key, const toml::node& node) {
+    const auto* const table = node.as_table();
+    if (table == nullptr) fail(key.source(), "missing_values must be a section [missing_values]");
+    for (const auto& [name, value] : *table) {
+      const auto quantity = quantity_named(name.str());
+      if (!quantity || !is_numeric(*quantity))
+        fail(name.source(), fmt::format("{} is not a quantity with a number; write it like parallax = [0, -1]",
+                                        words::quoted(name.str())));
+      if (const auto* const array = value.as_array()) {
+        for (const auto& item : *array) map_.missing_numbers.push_back({*quantity, number(item, name.str())});
+      } else {
+        map_.missing_numbers.push_back({*quantity, number(value, name.str())});
+      }
+    }
+  }
+
+  [[nodiscard]] double number(const toml::node& node, std::string_view what) const {
+    const auto value = node.value<double>();
+    if (value && std::isfinite(*value)) return *value;
+    fail(node.source(), fmt::format("{} must be a number or a list of numbers, as in {} = [0, -1]", what, what));
   }
 
   std::vector<std::pair<std::string, toml::source_region>> texts(const toml::key& key, const toml::node& node) const {
@@ -79,7 +104,22 @@ private:
   void take_columns(const toml::key& key, const toml::node& node) {
     const auto* const table = node.as_table();
     if (table == nullptr) fail(key.source(), "columns must be a section [columns]");
-    for (const auto& [name, value] : *table) map_.entries.push_back(entry(name, value));
+    for (const auto& [name, value] : *table) {
+      if (const auto* const columns = value.as_array()) {
+        take_alternatives(name, *columns);
+      } else {
+        map_.entries.push_back(entry(name, value));
+      }
+    }
+  }
+
+  // Half-widths could not be told apart, so that only text has alternatives.
+  void take_alternatives(const toml::key& key, const toml::array& columns) {
+    for (const auto& column : columns) {
+      map_.entries.push_back(entry(key, column));
+      if (!is_numeric(map_.entries.back().quantity)) continue;
+      fail(key.source(), fmt::format("{} takes one column; only text, such as star, takes a list of them", key.str()));
+    }
   }
 
   [[nodiscard]] ColumnMap::Entry entry(const toml::key& key, const toml::node& node) const {

@@ -29,19 +29,19 @@ std::string_view without_brackets(std::string_view header) {
 }
 
 ColumnCandidate candidate(std::size_t column, HeaderMatch match, KnownBy known_by) {
-  return {column,
-          match.quantity,
-          match.part,
-          std::move(match.unit),
-          match.unit_known,
-          known_by,
-          std::move(match.base),
-          std::move(match.meanings)};
+  return {column,     match.quantity,        match.named,
+          match.part, std::move(match.unit), match.unit_known,
+          known_by,   std::move(match.base), std::move(match.meanings)};
 }
 
 class Matching {
 public:
-  Matching(const TableHead& head, const ColumnMap& map) : head_(head), map_(map), descriptions_(descriptions(head)) {}
+  Matching(const TableHead& head, const ColumnMap& map) : head_(head), map_(map), descriptions_(descriptions(head)) {
+    for (std::size_t i = 0; i < head.columns.size(); ++i) {
+      by_header_.emplace(head.columns[i].name, i);
+      by_bare_header_.emplace(without_brackets(head.columns[i].name), i);
+    }
+  }
 
   std::vector<ColumnCandidate> all() {
     take_mapped();
@@ -56,9 +56,8 @@ public:
 
 private:
   std::size_t column_named(const std::string& column, const std::string& place) const {
-    for (std::size_t i = 0; i < head_.columns.size(); ++i) {
-      if (head_.columns[i].name == column) return i;
-    }
+    const auto found = by_header_.find(column);
+    if (found != by_header_.end()) return found->second;
     throw Error(Fault::input, fmt::format("{}: {} has no column named {}; write its header as the file spells it",
                                           place, head_.source, words::quoted(column)));
   }
@@ -71,23 +70,27 @@ private:
                     fmt::format("{}: column {} stands in the map twice", entry.place, words::quoted(entry.column)));
       }
       candidates_.push_back(mapped(entry, column));
-      if (entry.part == ColumnPart::value) words_.learn(entry.column, entry.quantity);
+      if (entry.part == ColumnPart::value) words_.learn(entry.column, candidates_.back().quantity);
     }
   }
 
   ColumnCandidate mapped(const ColumnMap::Entry& entry, std::size_t column) const {
-    ColumnCandidate out{column, entry.quantity, entry.part, entry.unit, true, KnownBy::map, words::folded(entry.column),
+    ColumnCandidate out{column,     entry.quantity, entry.quantity, entry.part,
+                        entry.unit, true,           KnownBy::map,   words::folded(entry.column),
                         {}};
-    if (!entry.unit.empty() || !is_numeric(entry.quantity)) return out;
+    if (!is_numeric(entry.quantity)) return out;
     // The file's own unit counts where the map says none; one that does not fit is an error as elsewhere.
-    out.unit = unit_in_file(column);
-    out.unit_known = conversion(entry.quantity, out.unit).has_value();
+    if (out.unit.empty()) out.unit = unit_in_file(column);
+    out.quantity = told_by_unit(entry.quantity, out.unit);
+    out.unit_known = conversion(out.quantity, out.unit).has_value();
     return out;
   }
 
   std::string unit_in_file(std::size_t column) const {
     if (!head_.columns[column].unit.empty()) return head_.columns[column].unit;
-    const auto in_header = bracketed_unit(head_.columns[column].name);
+    // "[Fe/H]" is a name, not a unit.
+    const auto& header = head_.columns[column].name;
+    const auto in_header = header.starts_with('[') ? std::string() : bracketed_unit(header);
     return in_header.empty() ? bracketed_unit(descriptions_[column]) : in_header;
   }
 
@@ -125,37 +128,37 @@ private:
 
   std::optional<HeaderMatch> prefixed(std::string_view header, std::string_view unit) const {
     if (!header.starts_with("e_") && !header.starts_with("E_") && !header.starts_with("l_")) return std::nullopt;
-    for (const auto& other : head_.columns) {
-      if (without_brackets(other.name) == header.substr(2))
-        return words_.match_prefixed(header.front(), other.name, unit);
-    }
-    return std::nullopt;
+    const auto value = by_bare_header_.find(header.substr(2));
+    if (value == by_bare_header_.end()) return std::nullopt;
+    return words_.match_prefixed(header.front(), head_.columns[value->second].name, unit);
   }
 
   const TableHead& head_;
   const ColumnMap& map_;
   std::vector<std::string> descriptions_;
+  std::map<std::string_view, std::size_t> by_header_;  // the first of each name
+  std::map<std::string_view, std::size_t> by_bare_header_;
   HeaderWords words_;
   std::set<std::size_t> taken_;
   std::vector<ColumnCandidate> candidates_;
 };
 
-// "COLUMN pl_rade:  Planet Radius [Earth Radius]" and "pl_rade: Planet Radius" both describe the column pl_rade.
-bool describes(std::string_view before_colon, std::string_view column) {
-  if (column.empty() || !before_colon.ends_with(column)) return false;
-  const auto rest = before_colon.substr(0, before_colon.size() - column.size());
-  return rest.empty() || rest.back() == ' ' || rest.back() == '\t';
-}
-
-std::string described_in_comments(const TableHead& head, std::string_view column) {
-  for (const auto& comment : head.comments) {
+// Comment lines "COLUMN pl_rade:  Planet Radius [Earth Radius]" and "pl_rade: Planet Radius" by the column they
+// describe; the first of each.
+std::map<std::string_view, std::string_view> described_in_comments(const TableHead& head) {
+  std::map<std::string_view, std::string_view> out;
+  for (const std::string_view comment : head.comments) {
     const auto colon = comment.find(':');
-    if (colon == std::string::npos) continue;
-    const auto text = std::string_view(comment);
-    if (describes(words::trimmed(text.substr(0, colon)), column))
-      return std::string(words::trimmed(text.substr(colon + 1)));
+    if (colon == std::string_view::npos) continue;
+    const auto words = words::trimmed(comment.substr(colon + 1));
+    // A header may hold blanks, so that every end of what stands before the colon may be one.
+    const auto before = words::trimmed(comment.substr(0, colon));
+    out.emplace(before, words);
+    for (std::size_t i = 0; i + 1 < before.size(); ++i) {
+      if (before[i] == ' ' || before[i] == '\t') out.emplace(before.substr(i + 1), words);
+    }
   }
-  return {};
+  return out;
 }
 
 }  // namespace
@@ -165,9 +168,12 @@ std::vector<ColumnCandidate> match_columns(const TableHead& head, const ColumnMa
 }
 
 std::vector<std::string> descriptions(const TableHead& head) {
+  const auto described = described_in_comments(head);
   std::vector<std::string> out;
   for (const auto& column : head.columns) {
-    out.push_back(column.description.empty() ? described_in_comments(head, column.name) : column.description);
+    const auto found = described.find(column.name);
+    const bool in_comment = column.description.empty() && !column.name.empty() && found != described.end();
+    out.push_back(in_comment ? std::string(found->second) : column.description);
   }
   return out;
 }

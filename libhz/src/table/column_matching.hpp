@@ -11,7 +11,8 @@ namespace hz {
 /// A column recognised, before the columns are compared with each other.
 struct ColumnCandidate {
   std::size_t column = 0;
-  Quantity quantity{};
+  Quantity quantity{};  // as its unit tells
+  Quantity named{};     // as its header or the map calls it
   ColumnPart part = ColumnPart::value;
   std::string unit;  // as stated; empty when nothing states it
   bool unit_known = true;

@@ -91,9 +91,15 @@ std::string line_of(const TableHead& head, const UnderstoodColumn& column) {
                   column.unit_assumed ? std::string() : column.unit);
 }
 
+bool is_doubted(const Understanding& understanding, std::size_t column) {
+  const auto& doubts = understanding.doubts();
+  return std::any_of(doubts.begin(), doubts.end(), [&](const Doubt& doubt) { return doubt.column == column; });
+}
+
 std::string understood_lines(const TableHead& head, const Understanding& understanding) {
   std::string out;
   for (const auto& column : understanding.columns()) {
+    if (is_doubted(understanding, column.column)) continue;
     const auto* const again = column.choice > 0 ? "(where the first is empty) " : "";
     out += fmt::format("# {}{}\n", again, line_of(head, column));
   }
@@ -147,7 +153,8 @@ std::string starter_map(const TableHead& head, const Understanding& understandin
       fmt::format("# Column map for {}. It changes nothing until you take comment signs away.\n\n", head.source);
   out +=
       "# Further spellings of \"no value\", and columns to leave alone:\n# missing = [\"-99\"]\n# ignore = "
-      "[\"…\"]\n\n[columns]\n";
+      "[\"…\"]\n\n# Numbers that stand for \"no value\" of one quantity:\n# [missing_values]\n# parallax = [0, "
+      "-1]\n\n[columns]\n";
   if (!understanding.columns().empty())
     out += "# Understood without this map:\n" + understood_lines(head, understanding);
   if (!understanding.doubts().empty()) out += "\n# To be decided, one line of each:\n" + doubt_lines(understanding);

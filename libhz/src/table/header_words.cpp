@@ -61,19 +61,11 @@ std::optional<HeaderMatch> match_bare(const std::string& folded, std::string_vie
   match.unit = unit;
   for (const Bare& bare : bare_words) {
     if (bare.word != folded) continue;
-    if (settles(bare, unit)) return HeaderMatch{bare.quantity, ColumnPart::value, match.unit, folded, true, {}};
+    if (settles(bare, unit)) return HeaderMatch{bare.quantity, ColumnPart::value, match.unit, folded, true, {}, {}};
     if (match.meanings.empty() || match.meanings.back() != bare.quantity) match.meanings.push_back(bare.quantity);
   }
   if (match.meanings.empty()) return std::nullopt;
   return match;
-}
-
-// "Lum [log(Lsun)]" is the logarithm, told by its unit.
-void tell_logarithm(HeaderMatch& match) {
-  if (match.quantity != Quantity::luminosity || match.unit.empty() || match.unit_known) return;
-  if (!conversion(Quantity::log_luminosity, match.unit)) return;
-  match.quantity = Quantity::log_luminosity;
-  match.unit_known = true;
 }
 
 struct Group {
@@ -119,12 +111,21 @@ std::optional<ColumnPart> pattern_part(std::string_view pattern) {
 bool has_unit(ColumnPart part) { return part != ColumnPart::limit_mark && part != ColumnPart::route; }
 
 void check_unit(HeaderMatch& match) {
+  match.named = match.quantity;
   if (!match.meanings.empty() || !is_numeric(match.quantity) || !has_unit(match.part)) return;
+  match.quantity = told_by_unit(match.quantity, match.unit);
   match.unit_known = conversion(match.quantity, match.unit).has_value();
-  tell_logarithm(match);
 }
 
 }  // namespace
+
+Quantity told_by_unit(Quantity quantity, std::string_view unit) {
+  const auto known = conversion(quantity, unit);
+  if (quantity == Quantity::luminosity && !known && conversion(Quantity::log_luminosity, unit))
+    return Quantity::log_luminosity;
+  if (known && known->kind == ConversionKind::reciprocal) return Quantity::parallax;
+  return quantity;
+}
 
 HeaderWords::HeaderWords() {
   for (std::size_t i = 0; i < column_catalog().quantity_index.size(); ++i) {
@@ -151,15 +152,15 @@ void HeaderWords::add_affix(std::string_view spelling, ColumnPart part) {
 }
 
 std::optional<HeaderMatch> HeaderWords::match(std::string_view text, std::string_view stated_unit) const {
-  std::optional<HeaderMatch> with_unknown_unit;
+  std::optional<HeaderMatch> with_doubt;
   for (const Group& group : bracket_groups(text)) {
     auto found = match_words(group.around, words::trimmed(group.inside));
-    if (found && found->unit_known) return found;
-    if (found && !with_unknown_unit) with_unknown_unit = std::move(found);
+    if (found && found->unit_known && found->meanings.empty()) return found;
+    if (found && !with_doubt) with_doubt = std::move(found);
   }
-  // A bracket that is no unit may be part of the words: "Mass*sin(i)", "V (Johnson) magnitude".
+  // A bracket that is no unit may be part of the words: "Mass*sin(i)", "E(B-V)", "V (Johnson) magnitude".
   if (auto found = match_words(text, stated_unit)) return found;
-  return with_unknown_unit;
+  return with_doubt;
 }
 
 std::optional<HeaderMatch> HeaderWords::match_canonical(std::string_view text, std::string_view stated_unit) const {
@@ -171,7 +172,7 @@ std::optional<HeaderMatch> HeaderWords::match_canonical(std::string_view text, s
     unit = words::trimmed(group.inside);
   }
   if (!named) return std::nullopt;
-  HeaderMatch match{named->quantity, named->part, unit, words::folded(name(named->quantity)), true, {}};
+  HeaderMatch match{named->quantity, named->part, unit, words::folded(name(named->quantity)), true, {}, {}};
   check_unit(match);
   return match;
 }
@@ -200,7 +201,7 @@ std::optional<HeaderMatch> HeaderWords::match_words(std::string_view words, std:
 
 std::optional<HeaderMatch> HeaderWords::match_value(const std::string& folded, std::string_view unit) const {
   if (const auto found = words_.find(folded); found != words_.end()) {
-    return HeaderMatch{found->second, ColumnPart::value, std::string(unit), folded, true, {}};
+    return HeaderMatch{found->second, ColumnPart::value, std::string(unit), folded, true, {}, {}};
   }
   return match_bare(folded, unit);
 }
@@ -213,7 +214,7 @@ std::optional<HeaderMatch> HeaderWords::match_part(const std::string& folded, st
         affix.in_front ? folded.substr(affix.letters.size()) : folded.substr(0, folded.size() - affix.letters.size());
     const auto found = words_.find(base);
     if (found == words_.end() || !is_numeric(found->second)) continue;
-    return HeaderMatch{found->second, affix.part, std::string(unit), base, true, {}};
+    return HeaderMatch{found->second, affix.part, std::string(unit), base, true, {}, {}};
   }
   return std::nullopt;
 }

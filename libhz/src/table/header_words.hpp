@@ -12,14 +12,19 @@ namespace hz {
 
 /// A text recognised.
 struct HeaderMatch {
-  Quantity quantity{};
+  Quantity quantity{};  // as told_by_unit()
   ColumnPart part = ColumnPart::value;
   std::string unit;  // as written; empty without one
   std::string base;  // the folded words of the quantity itself, without part and unit
   bool unit_known = true;
   std::vector<Quantity>
-      meanings;  // more than none: a bare letter or word that may mean any of these, `quantity` is unset
+      meanings;      // more than none: a bare letter or word that may mean any of these, `quantity` is unset
+  Quantity named{};  // by the words alone
 };
+
+/// The quantity that a column called `quantity` holds when its numbers are in `unit`: "Lum [log(Lsun)]" is a logarithm,
+/// and a distance in mas is a parallax, which need not even be above 0.
+[[nodiscard]] Quantity told_by_unit(Quantity quantity, std::string_view unit);
 
 /// The words of catalogs/columns.csv, and those a list adds for itself.
 class HeaderWords {

@@ -47,11 +47,11 @@ Problem problem(const std::string& column, const std::string& what, ProblemCode 
   return {code, column, column + ' ' + what};
 }
 
-// How many units of the value's column one unit of the half-width's is.
+// How many units of the value's column one unit of the half-width's is; both conversions are of one kind.
 double ratio(const Conversion& half_width, const Conversion& value) {
-  if (half_width.kind == ConversionKind::offset) return 1;
-  return half_width.kind == ConversionKind::reciprocal ? value.number / half_width.number
-                                                       : half_width.number / value.number;
+  const bool is_log = value.kind == ConversionKind::offset || value.kind == ConversionKind::antilog;
+  if (is_log) return 1;
+  return value.kind == ConversionKind::reciprocal ? value.number / half_width.number : half_width.number / value.number;
 }
 
 bool is_finite(const Measured& measured) {
@@ -68,10 +68,15 @@ struct ReadingPlan::Cell {
   [[nodiscard]] bool empty() const { return text.empty() && !number; }
 };
 
-ReadingPlan::ReadingPlan(const TableHead& head, const std::vector<UnderstoodColumn>& columns,
-                         const std::vector<std::string>& missing_values) {
+Result<MeasuredText> ReadingPlan::measured_in(const Cell& cell, const std::string& header) {
+  if (!cell.number) return parse_measured(cell.text, header);
+  return MeasuredText{Measured{*cell.number, {}, {}, LimitMark::none, false}, {}};
+}
+
+ReadingPlan::ReadingPlan(const TableHead& head, const std::vector<UnderstoodColumn>& columns, const ColumnMap& map)
+    : missing_numbers_(map.missing_numbers) {
   for (const auto& column : head.columns) headers_.push_back(column.name);
-  for (const auto& text : missing_values) missing_.push_back(words::lower_case(words::trimmed(text)));
+  for (const auto& text : map.missing_values) missing_.push_back(words::lower_case(words::trimmed(text)));
   for (const auto& column : columns) {
     if (column.part == ColumnPart::value) add(column);
   }
@@ -126,6 +131,29 @@ ReadingPlan::Cell ReadingPlan::cell(const Chunk& chunk, std::size_t row, std::si
   return whole ? Cell{{}, static_cast<double>(*whole)} : Cell{};
 }
 
+// A number with half-widths or a limit of its own is meant.
+bool ReadingPlan::is_missing_number(const Measured& measured, Quantity quantity) const {
+  if (measured.plus || measured.minus || measured.limit != LimitMark::none) return false;
+  return std::any_of(missing_numbers_.begin(), missing_numbers_.end(), [&](const auto& missing) {
+    return missing.quantity == quantity && missing.number == measured.value;
+  });
+}
+
+std::string ReadingPlan::shown(const Chunk& chunk, std::size_t row, std::size_t column) const {
+  return words::quoted(words::trimmed(chunk.text(column, row)));
+}
+
+std::optional<double> ReadingPlan::printed(const Chunk& chunk, std::size_t row, const UnderstoodColumn& column) const {
+  if (chunk.row_problems[row]) return std::nullopt;
+  const auto content = cell(chunk, row, column.column);
+  if (content.empty()) return std::nullopt;
+  const auto parsed = measured_in(content, headers_[column.column]);
+  const bool is_plain = parsed && parsed->unit.empty() && parsed->measured.limit == LimitMark::none;
+  if (!is_plain || !std::isfinite(parsed->measured.value)) return std::nullopt;
+  if (is_missing_number(parsed->measured, column.quantity)) return std::nullopt;
+  return parsed->measured.value;
+}
+
 std::string ReadingPlan::text(const Chunk& chunk, std::size_t row, Quantity quantity) const {
   for (const auto& choice : choices(quantity)) {
     if (!cell(chunk, row, choice.column).empty()) return std::string(words::trimmed(chunk.text(choice.column, row)));
@@ -150,10 +178,9 @@ std::optional<Field> ReadingPlan::chosen(const Chunk& chunk, std::size_t row, Qu
     const auto route = cell(chunk, row, *choice.route);
     if (!route.empty() && route.text != "stated") return Field{};
   }
-  const auto parsed =
-      value.number ? Result<MeasuredText>(MeasuredText{Measured{*value.number, {}, {}, LimitMark::none, false}, {}})
-                   : parse_measured(value.text, header);
+  const auto parsed = measured_in(value, header);
   if (!parsed) return Field{{}, parsed.error()};
+  if (is_missing_number(parsed->measured, quantity)) return std::nullopt;
   auto conversion = std::optional(choice.conversion);
   if (!parsed->unit.empty()) conversion = hz::conversion(quantity, parsed->unit);
   if (!conversion)
@@ -162,16 +189,17 @@ std::optional<Field> ReadingPlan::chosen(const Chunk& chunk, std::size_t row, Qu
                                              name(quantity)))};
   const auto measured = with_sides(chunk, row, parsed->measured, choice, *conversion);
   if (!measured) return Field{{}, measured.error()};
-  const auto shown = [&] { return words::quoted(chunk.text(choice.column, row)); };
   if (conversion->kind == ConversionKind::reciprocal && measured->value <= 0) {
     return Field{{},
-                 problem(header, fmt::format("holds {}, and a parallax that is not above 0 gives no distance", shown()),
+                 problem(header,
+                         fmt::format("holds {}, and a parallax that is not above 0 gives no distance",
+                                     shown(chunk, row, choice.column)),
                          ProblemCode::out_of_range)};
   }
   const auto converted = convert(*measured, *conversion);
-  if (!is_finite(converted))
-    return Field{{}, problem(header, fmt::format("holds {}, which is not a finite value", shown()))};
-  return Field{converted, {}};
+  if (is_finite(converted)) return Field{converted, {}};
+  return Field{{},
+               problem(header, fmt::format("holds {}, which is not a finite value", shown(chunk, row, choice.column)))};
 }
 
 // Half-widths written in the cell itself win over those of other columns.
@@ -183,36 +211,85 @@ Result<Measured> ReadingPlan::with_sides(const Chunk& chunk, std::size_t row, Me
     measured.limit = *mark;
   }
   if (measured.plus) return measured;
-  const auto both = side(chunk, row, choice.half_width, conversion);
-  const auto plus = side(chunk, row, choice.upper_half_width, conversion);
-  const auto minus = side(chunk, row, choice.lower_half_width, conversion);
-  const auto lower = side(chunk, row, choice.lower_bound, conversion);
-  const auto upper = side(chunk, row, choice.upper_bound, conversion);
-  for (const auto* const read : {&both, &plus, &minus, &lower, &upper}) {
+  const auto both = half_width(chunk, row, choice.half_width, conversion);
+  const auto plus = half_width(chunk, row, choice.upper_half_width, conversion);
+  // A lower half-width is often printed with its sign.
+  const auto minus = width(chunk, row, choice.lower_half_width, conversion);
+  for (const auto* const read : {&both, &plus, &minus}) {
     if (!*read) return read->error();
   }
   measured.plus = *plus ? *plus : *both;
-  // A lower half-width is often printed with its sign.
   measured.minus = *minus ? std::optional(std::abs(**minus)) : *both;
-  if (!measured.plus && *upper) measured.plus = **upper - measured.value;
-  if (!measured.minus && *lower) measured.minus = measured.value - **lower;
-  if (measured.plus.value_or(0) >= 0 && measured.minus.value_or(0) >= 0) return measured;
-  return problem(headers_[choice.column],
-                 fmt::format("holds {} with a half-width below 0, or a bound on the wrong side of it",
-                             words::quoted(chunk.text(choice.column, row))));
+  return with_bounds(chunk, row, measured, choice, conversion);
 }
 
-// The number of a half-width or bound column in the unit of its value; empty when there is none.
-Result<std::optional<double>> ReadingPlan::side(const Chunk& chunk, std::size_t row, const std::optional<Side>& side,
-                                                const Conversion& conversion) const {
+// Bounds are values: the ends of the interval. They give the half-widths that nothing else gives.
+Result<Measured> ReadingPlan::with_bounds(const Chunk& chunk, std::size_t row, Measured measured, const Choice& choice,
+                                          const Conversion& conversion) const {
+  const auto lower = bound(chunk, row, choice.lower_bound, conversion);
+  const auto upper = bound(chunk, row, choice.upper_bound, conversion);
+  for (const auto* const read : {&lower, &upper}) {
+    if (!*read) return read->error();
+  }
+  if (lower->value_or(measured.value) > measured.value || upper->value_or(measured.value) < measured.value)
+    return not_bracketed(chunk, row, choice);
+  if (!measured.minus && *lower) measured.minus = measured.value - **lower;
+  if (!measured.plus && *upper) measured.plus = **upper - measured.value;
+  return measured;
+}
+Problem ReadingPlan::not_bracketed(const Chunk& chunk, std::size_t row, const Choice& choice) const {
+  const auto bound_text = [&](const Side& side) {
+    return fmt::format("{} {}", headers_[side.column], shown(chunk, row, side.column));
+  };
+  const auto& lower = choice.lower_bound;
+  const auto& upper = choice.upper_bound;
+  const auto where = lower && upper ? fmt::format("not between {} and {}", bound_text(*lower), bound_text(*upper))
+                     : lower        ? fmt::format("below {}", bound_text(*lower))
+                                    : fmt::format("above {}", bound_text(*upper));
+  return problem(headers_[choice.column], fmt::format("holds {}, which lies {}; bounds are the ends of an interval "
+                                                      "around the value, not half-widths",
+                                                      shown(chunk, row, choice.column), where));
+}
+
+// As printed; empty when there is none.
+Result<std::optional<double>> ReadingPlan::number(const Chunk& chunk, std::size_t row,
+                                                  const std::optional<Side>& side) const {
   if (!side) return std::optional<double>();
   const auto content = cell(chunk, row, side->column);
   if (content.empty()) return std::optional<double>();
   const auto number = content.number ? content.number : parse_number(content.text);
-  if (!number || !std::isfinite(*number)) {
-    return problem(headers_[side->column], fmt::format("holds {}, which is not a number", words::quoted(content.text)));
-  }
-  return std::optional(*number * (side->own ? ratio(*side->own, conversion) : 1));
+  if (number && std::isfinite(*number)) return number;
+  return problem(headers_[side->column], fmt::format("holds {}, which is not a number{}",
+                                                     shown(chunk, row, side->column), comma_hint(content.text)));
+}
+
+// A half-width in the unit of its value, with its sign.
+Result<std::optional<double>> ReadingPlan::width(const Chunk& chunk, std::size_t row, const std::optional<Side>& side,
+                                                 const Conversion& conversion) const {
+  const auto printed = number(chunk, row, side);
+  if (!printed || !*printed || !side->own) return printed;
+  if (side->own->kind == conversion.kind) return std::optional(**printed * ratio(*side->own, conversion));
+  return problem(headers_[side->column],
+                 fmt::format("holds {} in a unit that does not go with that of the value: one is a logarithm or a "
+                             "parallax, the other is not",
+                             shown(chunk, row, side->column)));
+}
+
+Result<std::optional<double>> ReadingPlan::half_width(const Chunk& chunk, std::size_t row,
+                                                      const std::optional<Side>& side,
+                                                      const Conversion& conversion) const {
+  const auto read = width(chunk, row, side, conversion);
+  if (!read || read->value_or(0) >= 0) return read;
+  return problem(headers_[side->column],
+                 fmt::format("holds {}, and a half-width is never below 0", shown(chunk, row, side->column)));
+}
+
+// The end of an interval in the unit of its value.
+Result<std::optional<double>> ReadingPlan::bound(const Chunk& chunk, std::size_t row, const std::optional<Side>& side,
+                                                 const Conversion& conversion) const {
+  const auto printed = number(chunk, row, side);
+  if (!printed || !*printed || !side->own || *side->own == conversion) return printed;
+  return std::optional(convert_back(convert(**printed, *side->own), conversion));
 }
 
 Result<LimitMark> ReadingPlan::limit(const Chunk& chunk, std::size_t row, std::size_t column) const {

@@ -14,6 +14,7 @@
 #include "hz/units.hpp"
 #include "table/column_map_text.hpp"
 #include "table/column_matching.hpp"
+#include "table/plausibility.hpp"
 #include "table/reading_plan.hpp"
 #include "words.hpp"
 
@@ -103,16 +104,24 @@ private:
                        [&](const auto& column) { return column.quantity == quantity; });
   }
 
+  // "distance_err" beside "distance [mas]", which is a parallax, has no value of its own quantity.
+  std::vector<Group*> possible_owners(const ColumnCandidate& part) {
+    std::vector<Group*> same, same_name;
+    for (auto& group : groups_) {
+      if (group.value.quantity == part.quantity) same.push_back(&group);
+      if (group.value.named == part.quantity && conversion(group.value.quantity, part.unit))
+        same_name.push_back(&group);
+    }
+    return same.empty() ? same_name : same;
+  }
+
   // The value a half-width, bound or mark belongs to: that with the same words, unit and beginning of the header, the
   // nearest before it.
   Group* owner(const ColumnCandidate& part) {
-    std::vector<Group*> pool;
-    for (auto& group : groups_) {
-      if (group.value.quantity == part.quantity) pool.push_back(&group);
-    }
+    auto pool = possible_owners(part);
     if (pool.empty()) return nullptr;
     if (part.known_by == KnownBy::map) {
-      const auto best = best_level(part.quantity);
+      const auto best = best_level(pool.front()->value.quantity);
       narrow(pool, [&](const Group& group) { return group.value.known_by == best; });
     } else {
       narrow(pool, [&](const Group& group) { return group.value.base == part.base; });
@@ -127,9 +136,10 @@ private:
     return is_numeric(a.quantity) ? conversion(a.quantity, a.unit) == conversion(b.quantity, b.unit) : a.unit == b.unit;
   }
 
-  void attach(const ColumnCandidate& part) {
+  void attach(ColumnCandidate part) {
     auto* const group = owner(part);
     if (group == nullptr) return;
+    part.quantity = group->value.quantity;
     const auto [there, is_new] = group->parts.emplace(part.part, part);
     if (is_new || there->second.known_by < part.known_by) return;
     if (there->second.known_by == part.known_by) {
@@ -149,11 +159,13 @@ private:
   }
 
   void choose(Quantity quantity) {
+    const auto level = best_level(quantity);
     std::vector<const Group*> best;
     for (const auto& group : groups_) {
-      if (group.value.quantity == quantity && group.value.known_by == best_level(quantity)) best.push_back(&group);
+      if (group.value.quantity == quantity && group.value.known_by == level) best.push_back(&group);
     }
-    for (std::size_t i = 0; i < best.size(); ++i) {
+    const bool is_list_in_map = level == KnownBy::map && !is_numeric(quantity);
+    for (std::size_t i = 0; !is_list_in_map && i < best.size(); ++i) {
       for (std::size_t j = i + 1; j < best.size(); ++j) {
         if (!same_unit(best[i]->value, best[j]->value)) continue;
         compete(quantity, ColumnPart::value, {best[i]->value.column, best[j]->value.column});
@@ -263,18 +275,22 @@ void refuse_doubts(const TableHead& head, const std::vector<Doubt>& doubts) {
 std::span<const Quantity> star_inputs() { return std::span(all_inputs).first(star_input_count); }
 std::span<const Quantity> planet_inputs() { return all_inputs; }
 
-Understanding Understanding::draft(const TableHead& head, const ColumnMap& map, std::span<const Quantity> needed) {
+Understanding Understanding::draft(const TableHead& head, const ColumnMap& map, std::span<const Quantity> needed,
+                                   std::span<const Chunk> first) {
   Assembly assembly(head, map, needed);
   Understanding out;
   out.doubts_ = assembly.doubts();
   out.columns_ = assembly.columns();
   out.others_ = unused(head, out.columns_);
-  out.plan_ = std::make_shared<const ReadingPlan>(head, out.columns_, map.missing_values);
+  out.plan_ = std::make_shared<const ReadingPlan>(head, out.columns_, map);
+  auto implausible = implausible_columns({head, out.columns_, *out.plan_, map, needed}, first);
+  std::move(implausible.begin(), implausible.end(), std::back_inserter(out.doubts_));
   return out;
 }
 
-Understanding Understanding::of(const TableHead& head, const ColumnMap& map, std::span<const Quantity> needed) {
-  auto out = draft(head, map, needed);
+Understanding Understanding::of(const TableHead& head, const ColumnMap& map, std::span<const Quantity> needed,
+                                std::span<const Chunk> first) {
+  auto out = draft(head, map, needed, first);
   refuse_doubts(head, out.doubts());
   return out;
 }

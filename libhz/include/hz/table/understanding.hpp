@@ -63,11 +63,14 @@ struct Doubt {
 
 /// A user's column map, for `--columns MAP.toml`:
 ///
-///     missing = ["-99", "unknown"]    # further spellings of "no value"
+///     missing = ["-99", "unknown"]    # further spellings of "no value", in any column
 ///     ignore = ["K"]                  # columns to leave alone
 ///     [columns]                       # canonical name (with _err, _err_plus, ... behind it) = column of the file
 ///     teff = "T (phot)"
 ///     distance = { column = "d", unit = "pc" }
+///     star = ["Name", "HIP"]          # of text: the first that is filled
+///     [missing_values]                # numbers that stand for "no value" of one quantity
+///     parallax = [0, -1]
 struct ColumnMap {
   struct Entry {
     Quantity quantity{};
@@ -80,9 +83,16 @@ struct ColumnMap {
     std::string column;
     std::string place;
   };
+  /// A cell that holds nothing but this number, in whatever unit, states no value.
+  struct MissingNumber {
+    Quantity quantity{};
+    double number = 0;
+    friend bool operator==(const MissingNumber&, const MissingNumber&) = default;
+  };
   std::vector<Entry> entries;
   std::vector<Ignored> ignored;
   std::vector<std::string> missing_values;
+  std::vector<MissingNumber> missing_numbers;
   /// Throws hz::Error (input) as "file:line:column: …".
   [[nodiscard]] static ColumnMap parse(std::string_view toml_text, const std::string& file);
 };
@@ -96,15 +106,21 @@ class ReadingPlan;
 /// A head understood: which columns give which quantity, in which unit, and how to read a row.
 class Understanding {
 public:
-  /// Throws hz::Error (input) when two columns compete for one needed quantity or a needed column's unit is unknown or
-  /// its header ambiguous; the message prints the map line to write. Also when the map names a column that is not
-  /// there.
+  /// `first` holds the first rows, if they can be looked at (PeekedTable): they tell columns that are not in the unit
+  /// they seem to be in.
+  ///
+  /// Throws hz::Error (input) when two columns compete for one needed quantity, a needed column's unit is unknown, its
+  /// header ambiguous, or the median of a star's or planet's column implausible in its unit; the message prints the map
+  /// line to write. Also when the map names a column that is not there.
   [[nodiscard]] static Understanding of(const TableHead& head, const ColumnMap& map = {},
-                                        std::span<const Quantity> needed = planet_inputs());
+                                        std::span<const Quantity> needed = planet_inputs(),
+                                        std::span<const Chunk> first = {});
 
-  /// The same, with doubts() instead of an error about doubtful columns, which are then not used.
+  /// The same, with doubts() instead of an error. Columns with a doubtful meaning are not used; those with implausible
+  /// numbers are, and are doubted.
   [[nodiscard]] static Understanding draft(const TableHead& head, const ColumnMap& map = {},
-                                           std::span<const Quantity> needed = planet_inputs());
+                                           std::span<const Quantity> needed = planet_inputs(),
+                                           std::span<const Chunk> first = {});
 
   /// The columns used, in file order.
   [[nodiscard]] const std::vector<UnderstoodColumn>& columns() const { return columns_; }
