@@ -71,6 +71,11 @@ constexpr std::string_view verdict_note =
     "outside "
     "(at most 0.32), outside (0.05). P is given the limits of the set; it is not a probability of life or water.";
 
+constexpr std::string_view two_lists_note =
+    "With --planets each planet gets the values of its star, completed by what its own row says of it. A name that "
+    "several stars have, or a place with several stars about as near, is no match: the row says so, and which they "
+    "are.";
+
 Command bounds_command() {
   return {"bounds",
           "how far out water can stay liquid: one star, or a list of them",
@@ -100,7 +105,7 @@ Command check_command() {
 Command rank_command() {
   return {"rank",
           "put the planets of a list in order, the surest first",
-          {{"LIST", true, "a table of planets; - is standard input"}},
+          {{"LIST", true, "a table of planets (of their stars, with --planets); - is standard input"}},
           with_common({reading_options(), joining_options(), boundary_options(), placement_options(), rank_table,
                        preference_options(), writing_options()}),
           {{{"hzmap rank planets.csv -o ranked.csv", "the first 20 on the terminal, all of them in a file"},
@@ -110,7 +115,7 @@ Command rank_command() {
            "that the limits were fitted for follow in a section of their own. A row without any error never stands "
            "above an "
            "equal row that has some: its merit is cut to that row's, and its note says so.",
-           verdict_note},
+           two_lists_note, verdict_note},
           run_rank};
 }
 

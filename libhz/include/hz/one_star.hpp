@@ -36,8 +36,8 @@ struct StarsCompared {
 };
 
 /// Compares the rows of each star's planets and, if so chosen, gives all of them one whole star record; the names stay
-/// as each row spells them. One star is one name as folded_name() has it; rows without a star's name are left alone, and
-/// so are stars without planets. For rows that are not answered yet: answers are not looked at. O(n log n).
+/// as each row spells them. One star is one name as folded_name() has it; rows without a star's name are left alone,
+/// and so are stars without planets. For rows that are not answered yet: answers are not looked at. O(n log n).
 [[nodiscard]] StarsCompared compare_stars(std::vector<Candidate>& candidates, OneStar choice);
 
 }  // namespace hz
