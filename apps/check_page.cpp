@@ -143,10 +143,11 @@ std::string decides_line(const CheckReport& report) {
   std::string text = "Decided by (share of the variance of zone position): " + joined(parts, ", ");
   if (report.settling_factor) {
     text += fmt::format("; an error of {} {:.2g} times as large would make the verdict firm",
-                        input_words(report.shares.front()), *report.settling_factor);
-  } else if (report.answer.planet->conservative && *report.answer.planet->conservative != Verdict::inside &&
+                        input_words(*report.leading), *report.settling_factor);
+  } else if (report.leading && report.answer.planet->conservative &&
+             *report.answer.planet->conservative != Verdict::inside &&
              *report.answer.planet->conservative != Verdict::outside) {
-    text += fmt::format("; a better {} alone would not settle it", input_words(report.shares.front()));
+    text += fmt::format("; a better {} alone would not settle it", input_words(*report.leading));
   }
   return text + ".";
 }

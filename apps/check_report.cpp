@@ -44,11 +44,12 @@ Alternative compared(std::string what, const Probabilities& p, const Answer& mai
   Alternative alternative{std::move(what), std::nullopt, std::nullopt, false, false};
   if (p.conservative) alternative.conservative = verdict_of(*p.conservative, thresholds);
   if (p.optimistic) alternative.optimistic = verdict_of(*p.optimistic, thresholds);
-  const auto changes = [](const std::optional<Verdict>& here, const std::optional<Verdict>& there) {
-    return here && there && *here != *there;
+  // What a close companion takes off a verdict it takes off both.
+  const auto changes = [&](const std::optional<double>& here, const std::optional<Verdict>& there) {
+    return here && there && verdict_of(*here, thresholds) != *there;
   };
-  alternative.changes_conservative = changes(main.planet->conservative, alternative.conservative);
-  alternative.changes_optimistic = changes(main.planet->optimistic, alternative.optimistic);
+  alternative.changes_conservative = changes(main.planet->probabilities.conservative, alternative.conservative);
+  alternative.changes_optimistic = changes(main.planet->probabilities.optimistic, alternative.optimistic);
   return alternative;
 }
 
@@ -116,7 +117,7 @@ void try_other_masses(const Choices& choices, CheckReport& report) {
 }  // namespace
 
 CheckReport make_report(const ListRow& row, const Choices& choices, Answer answered) {
-  CheckReport report{row, choices.settings, std::move(answered), {}, {}, {}, std::nullopt};
+  CheckReport report{row, choices.settings, std::move(answered), {}, {}, {}, std::nullopt, std::nullopt};
   if (!report.answer.planet) {
     const std::string who = row.planet.name.empty() ? "this planet" : row.planet.name;
     throw Error(Fault::input,
@@ -128,8 +129,11 @@ CheckReport make_report(const ListRow& row, const Choices& choices, Answer answe
   try_other_asymmetry(row, choices, report);
   try_other_masses(choices, report);
   report.shares = variance_shares(*report.answer.input, choices.settings);
-  if (!report.shares.empty()) {
-    report.settling_factor = settling_factor(*report.answer.input, report.shares.front(), choices.settings);
+  const auto measured = std::find_if(report.shares.begin(), report.shares.end(),
+                                     [](const VarianceShare& share) { return share.scatter_of.empty(); });
+  if (measured != report.shares.end()) {
+    report.leading = *measured;
+    report.settling_factor = settling_factor(*report.answer.input, *measured, choices.settings);
   }
   return report;
 }

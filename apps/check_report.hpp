@@ -37,7 +37,8 @@ struct CheckReport {
   std::vector<LimitLine> limits;          // from the hottest to the coldest
   std::vector<Alternative> alternatives;  // every one that was tried
   std::vector<VarianceShare> shares;
-  std::optional<double> settling_factor;  // for the leading input
+  std::optional<VarianceShare> leading;   // the measured value with the largest share
+  std::optional<double> settling_factor;  // for it
 };
 
 /// Throws hz::Error (input) with the reason when the row has no answer.

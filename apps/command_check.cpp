@@ -1,6 +1,7 @@
 // hzmap check: where one planet lies, now.
 #include <fmt/format.h>
 
+#include "bounds_page.hpp"
 #include "check_page.hpp"
 #include "closest.hpp"
 #include "commands.hpp"
@@ -45,11 +46,22 @@ Candidate find_planet(const AnsweredList& list, const std::string& name) {
   return found.front();
 }
 
-int print_report(const CheckReport& report, const Arguments& arguments, Console& console) {
+bool wants_json(const Arguments& arguments) {
   constexpr auto words = std::to_array<OptionWord<bool>>({{"text", false}, {"json", true}});
   const std::optional<std::string> format = arguments.value("format");
-  const bool json = format && option_word<bool>("format", *format, words);
-  console.print(json ? check_json(report) : check_page(report, console, terminal_width()));
+  return format && option_word<bool>("format", *format, words);
+}
+
+int print_report(const CheckReport& report, const Arguments& arguments, Console& console) {
+  console.print(wants_json(arguments) ? check_json(report) : check_page(report, console, terminal_width()));
+  return exit_code::done;
+}
+
+/// A star without a planet: where its zone lies, and how that is known.
+int print_star(const ListRow& row, const Settings& settings, Console& console) {
+  const Answer answer = answer_star(row, settings);
+  if (answer.status == Status::set_aside) throw Error(Fault::input, "no answer for this star: " + answer.reason);
+  console.print(bounds_page(row, answer, settings, console, terminal_width()));
   return exit_code::done;
 }
 
@@ -67,6 +79,7 @@ int run_check(const Arguments& arguments, Console& console) {
   const Choices choices = read_choices(arguments);
   if (words.empty()) {
     const ListRow row = typed_row(arguments);
+    if (!is_planet(row) && !wants_json(arguments)) return print_star(row, choices.settings, console);
     return print_report(make_report(row, choices, answer(row, choices.settings)), arguments, console);
   }
   if (words.size() < 2)

@@ -42,7 +42,7 @@ struct ListRows {
 /// What a list speaks of, in the order of the canonical columns.
 [[nodiscard]] std::vector<Quantity> stated_quantities(const Understanding& understanding);
 
-/// Throws hz::Error (input) when a list states none of the `needed` quantities as a number or spectral type.
+/// Throws hz::Error (input) when a list states nothing that any route starts from.
 void refuse_unusable(std::span<const Quantity> stated, const std::string& file);
 
 /// What joining lists or comparing rows says of a row, on its way to the answer.

@@ -116,12 +116,13 @@ std::optional<Form> distance_from_parallax(Resolver& r) {
   const std::optional<Input> parallax = r.take(Quantity::parallax);
   if (!parallax) return std::nullopt;
   const double value = parallax->used.value;
+  if (!(value > 0) && parallax->assumed) return std::nullopt;  // neither a distance nor an error that says how far off
   const double half_width = (*parallax->used.minus + *parallax->used.plus) / 2;
   if (value > 0 && half_width < simple_parallax_error * value) {
     const std::size_t source = r.sources().of(Quantity::parallax, *parallax, true);
     return Form{std::log(1000 / value), {{source, -1}}, {}, {}, "parallax"};
   }
-  if (!(half_width > 0)) return std::nullopt;  // neither a distance nor an error that would say how far off
+  if (!(half_width > 0)) return std::nullopt;
   Input posterior = *parallax;
   posterior.used = log_distance_posterior(value, half_width, r.settings().length_scale);
   posterior.x = Distribution::two_piece(posterior.used.value, *posterior.used.minus, *posterior.used.plus,
