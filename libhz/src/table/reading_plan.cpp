@@ -258,7 +258,7 @@ Result<std::optional<double>> ReadingPlan::number(const Chunk& chunk, std::size_
 // A half-width in the unit of its value, with its sign.
 Result<std::optional<double>> ReadingPlan::width(const Chunk& chunk, std::size_t row, const std::optional<Side>& side,
                                                  const Conversion& conversion) const {
-  const auto printed = number(chunk, row, side);
+  auto printed = number(chunk, row, side);
   if (!printed || !*printed || !side->own) return printed;
   if (side->own->kind == conversion.kind) return std::optional(**printed * ratio(*side->own, conversion));
   return problem(headers_[side->column],
@@ -270,7 +270,7 @@ Result<std::optional<double>> ReadingPlan::width(const Chunk& chunk, std::size_t
 Result<std::optional<double>> ReadingPlan::half_width(const Chunk& chunk, std::size_t row,
                                                       const std::optional<Side>& side,
                                                       const Conversion& conversion) const {
-  const auto read = width(chunk, row, side, conversion);
+  auto read = width(chunk, row, side, conversion);
   if (!read || read->value_or(0) >= 0) return read;
   return problem(headers_[side->column],
                  fmt::format("holds {}, and a half-width is never below 0", shown(chunk, row, side->column)));
@@ -279,7 +279,7 @@ Result<std::optional<double>> ReadingPlan::half_width(const Chunk& chunk, std::s
 // The end of an interval in the unit of its value.
 Result<std::optional<double>> ReadingPlan::bound(const Chunk& chunk, std::size_t row, const std::optional<Side>& side,
                                                  const Conversion& conversion) const {
-  const auto printed = number(chunk, row, side);
+  auto printed = number(chunk, row, side);
   if (!printed || !*printed || !side->own || *side->own == conversion) return printed;
   return std::optional(convert_back(convert(**printed, *side->own), conversion));
 }
