@@ -124,7 +124,7 @@ const std::vector<Line>& lines() {
        "transit",
        planet_radius_from_depth},
       // What follows is walked by planet_mass_route.cpp and answer.cpp: a planet's mass has a scale of its own.
-      {{planet_radius, "planet_mass", chen_kipping, {}, "for show alone"}, "mass", nullptr},
+      {{planet_radius, "planet_mass", chen_kipping, {}, "nothing else is known; it moves no zone"}, "mass", nullptr},
 
       {{planet_mass, "planet_mass", as_it_stands, {}, ""}, "stated", nullptr},
       {{planet_mass, "min_mass and inclination", "M = M sin i / sin i", {}, ""}, "minimum", nullptr},
