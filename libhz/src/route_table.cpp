@@ -94,12 +94,7 @@ const std::vector<Line>& lines() {
       {{stellar_mass, "log_g and stellar_radius", gravity, {}, ""}, "gravity", mass_from_log_g},
 
       {{distance, "distance", as_it_stands, {}, ""}, "stated", stated_distance},
-      {{distance,
-        "parallax",
-        "1 / parallax; from a relative error of 0.1 on, and for parallaxes not above 0, the posterior under an "
-        "exponentially decreasing space density (Bailer-Jones 2015)",
-        {},
-        ""},
+      {{distance, "parallax", "1 / parallax; up to ten errors a posterior (Bailer-Jones 2015)", {}, ""},
        "parallax",
        distance_from_parallax},
 
