@@ -158,7 +158,7 @@ Command limits_command() {
 
 Command routes_command() {
   return {"routes",
-          "the ways to every quantity: what each needs, where it holds, how sure it is",
+          "the ways to every quantity, best first",
           {{"QUANTITY", false, "a quantity to show with the sources of its relations, such as luminosity"}},
           with_common({}),
           {{{"hzmap routes", "every quantity with its ways, in the order in which they are tried"},

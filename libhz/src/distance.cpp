@@ -2,6 +2,8 @@
 
 #include <algorithm>
 #include <cmath>
+#include <limits>
+#include <optional>
 #include <vector>
 
 #include "gauss_rules.hpp"
@@ -35,26 +37,30 @@ double turning_point(double low, double high, Rises rises) {
   return high;
 }
 
-/// Where the density of ln x peaks: one or two places, in rising order.
-///
-/// Bailer-Jones 2015, eq. 19, gives the mode in r; in ln r the power of r is one higher, so that
-/// x^3 - 3 x^2 + a x - b = 0 with a = parallax / sigma^2 and b = 1 / sigma^2. The cubic falls between its stationary
-/// points, so peaks lie below the first or above the second.
-std::vector<double> peaks(const Posterior& posterior) {
+/// The density's nearer peak, and the trough behind it where there is a second peak.
+struct Peak {
+  double at = 0;
+  std::optional<double> trough;
+};
+
+/// Bailer-Jones 2015, eq. 19: the density of r is level where x^3 - 2 x^2 + a x - b = 0 with a = parallax / sigma^2 and
+/// b = 1 / sigma^2. The cubic rises, falls between its stationary points and rises again: with three roots the first is
+/// the nearer peak, the second the trough.
+Peak nearer_peak(const Posterior& posterior) {
   const double b = 1 / (posterior.sigma * posterior.sigma);
   const double a = posterior.parallax * b;
-  const auto positive = [&](double x) { return ((x - 3) * x + a) * x - b >= 0; };
+  const auto positive = [&](double x) { return ((x - 2) * x + a) * x - b >= 0; };
+  const auto negative = [&](double x) { return !positive(x); };
   const double least = std::min(1.0, b / (1 + std::abs(a))) / 2;      // there x^3 + |a| x < b
-  const double greatest = 3 + std::sqrt(std::abs(a)) + std::cbrt(b);  // there x^2 (x - 3) > b + |a| x
-  if (a >= 3) return {turning_point(least, greatest, positive)};
-  const double root = std::sqrt(1 - a / 3);
-  const double first = a / 3 / (1 + root);  // 1 - root without its cancellation
-  const double second = 1 + root;
-  std::vector<double> found;
-  if (first > 0 && positive(first)) found.push_back(turning_point(least, first, positive));
-  if (!positive(second)) found.push_back(turning_point(second, greatest, positive));
-  if (found.empty()) found.push_back(turning_point(least, greatest, positive));  // the two points meet, to rounding
-  return found;
+  const double greatest = 3 + std::sqrt(std::abs(a)) + std::cbrt(b);  // there x^2 (x - 2) > b + |a| x
+  if (a < 4.0 / 3) {
+    const double root = std::sqrt(4 - 3 * a);
+    const double first = a / (2 + root);  // (2 - root) / 3 without its cancellation
+    const double second = (2 + root) / 3;
+    const bool two_peaks = first > 0 && positive(first) && negative(second);
+    if (two_peaks) return {turning_point(least, first, positive), turning_point(first, second, negative)};
+  }
+  return {turning_point(least, greatest, positive), std::nullopt};
 }
 
 /// The density of ln x, as a function of t = ln(x / reference). Differences from the reference are formed without
@@ -98,13 +104,12 @@ struct Panel {
 /// The posterior's distribution function in t, panel by panel.
 class Cumulative {
 public:
-  /// From below the reference (a peak) to above `last_peak`, as far as the density is not negligible beside `top`, the
-  /// logarithm of its greatest value.
-  Cumulative(const LogDensity& log_density, double last_peak, double top) : log_density_(log_density), top_(top) {
+  /// From below the reference (a peak in r) to `end`, as far as the density is not negligible beside that peak.
+  Cumulative(const LogDensity& log_density, double end) : log_density_(log_density) {
     double t = 0;
-    while (log_density_(t) > top_ + negligible) t -= panel_in_scales * log_density_.scale(t);
-    while (t < last_peak || log_density_(t) > top_ + negligible) {
-      const double length = panel_in_scales * log_density_.scale(t);
+    while (log_density_(t) > negligible) t -= panel_in_scales * log_density_.scale(t);
+    while (t < end && (t < 0 || log_density_(t) > negligible)) {
+      const double length = std::min(panel_in_scales * log_density_.scale(t), end - t);
       panels_.push_back({t, length, mass(t, length)});
       total_ += panels_.back().mass;
       t += length;
@@ -119,7 +124,7 @@ public:
   }
 
 private:
-  [[nodiscard]] double density(double t) const { return std::exp(log_density_(t) - top_); }
+  [[nodiscard]] double density(double t) const { return std::exp(log_density_(t)); }
   [[nodiscard]] double mass(double start, double length) const {
     double sum = 0;
     for (const Node& node : rule_) sum += node.weight * density(start + length / 2 * (1 + node.x));
@@ -143,7 +148,6 @@ private:
 
   const Rule& rule_ = gauss_legendre(order);
   LogDensity log_density_;
-  double top_;
   std::vector<Panel> panels_;
   double total_ = 0;
 };
@@ -160,17 +164,13 @@ Measured log_distance_posterior(double parallax, double half_width, double lengt
 
   const double in_length_scales = scale / 1000;  // mas to 1 / length_scale
   const Posterior posterior{held_parallax * in_length_scales, sigma * in_length_scales};
-  const std::vector<double> modes = peaks(posterior);
-  const double reference = modes.front();
-  const LogDensity log_density(posterior, reference);
-  const double last = std::log(modes.back() / reference);
-  const double height = log_density(last);
-  const double top = std::max(0.0, height);
-  const Cumulative cumulative(log_density, height > top + negligible ? last : 0, top);
+  const Peak peak = nearer_peak(posterior);
+  const double end = peak.trough ? std::log(*peak.trough / peak.at) : std::numeric_limits<double>::infinity();
+  const Cumulative cumulative(LogDensity(posterior, peak.at), end);
 
   const double median = cumulative.quantile(0.5);
   Measured result;
-  result.value = (std::log(reference * scale) + median) / ln10;
+  result.value = (std::log(peak.at * scale) + median) / ln10;
   result.minus = (median - cumulative.quantile(low_tail)) / ln10;
   result.plus = (cumulative.quantile(1 - low_tail) - median) / ln10;
   return result;

@@ -19,10 +19,11 @@ struct Marks {
   bool main_sequence = false;       // a relation of main-sequence stars was used
   bool extinction_ignored = false;  // photometry without an extinction
   bool distance_prior = false;      // a parallax that needed a prior
+  bool rough = false;               // a luminosity by nothing but the spectral type or the mass
 
   friend Marks operator|(const Marks& a, const Marks& b) {
     return {a.main_sequence || b.main_sequence, a.extinction_ignored || b.extinction_ignored,
-            a.distance_prior || b.distance_prior};
+            a.distance_prior || b.distance_prior, a.rough || b.rough};
   }
 };
 

@@ -199,8 +199,10 @@ std::string commas_made(std::string_view text, std::string_view to) {
   return out;
 }
 
-// "5,772" and "1,234,567": three digits behind each comma.
+// "5,772" and "1,234,567", not "0,165": three digits behind each comma.
 bool groups_thousands(std::string_view text) {
+  const auto first = text.find_first_of("0123456789");
+  if (first == std::string_view::npos || text[first] == '0') return false;
   for (auto at = text.find(','); at != std::string_view::npos; at = text.find(',', at + 1)) {
     const auto group = text.substr(at + 1);
     const auto digits = std::min(group.find_first_not_of("0123456789"), group.size());

@@ -13,6 +13,35 @@ namespace {
 constexpr double one_sigma_tail = 0.15865525393145705;  // Phi(-1)
 constexpr double ln10 = 2.302585092994045684;
 
+std::size_t most_points(Effort effort) { return effort == Effort::coarse ? 48 : 256; }
+
+/// The terms from `first` on, with the constant, as one measure. `inner_width` is that of what is taken in closed form.
+Rule measure_of(const TermSum& sum, std::size_t first, double inner_width, bool corners, Effort effort) {
+  Rule measure{{sum.constant, 1}};
+  for (std::size_t i = first; i < sum.terms.size(); ++i) {
+    const Smoothness smoothness{sum.terms[i].width() / inner_width, corners};
+    measure = sum_of(measure, sum.terms[i].points(smoothness, effort), most_points(effort));
+  }
+  return measure;
+}
+
+/// All terms but the widest as one measure, made at its first use: every limit of a planet shares it.
+class NarrowTerms {
+public:
+  NarrowTerms(const TermSum& sum, Effort effort) : sum_(sum), effort_(effort) {}
+
+  [[nodiscard]] const Rule& points() {
+    const SumTerm& widest = sum_.terms.front();
+    if (points_.empty()) points_ = measure_of(sum_, 1, widest.width(), widest.has_corners(), effort_);
+    return points_;
+  }
+
+private:
+  const TermSum& sum_;
+  Effort effort_;
+  Rule points_;
+};
+
 /// P(answered, ln S - ln S_limit >= shift) for one limit.
 ///
 /// The widest of the inputs is taken in closed form through its own distribution function; all others are summed into
@@ -20,23 +49,20 @@ constexpr double ln10 = 2.302585092994045684;
 /// points.
 class HotSide {
 public:
-  HotSide(const PlacementInput& input, const TermSum& sum, const FluxLimit& limit, const AnsweredRange& range,
-          Effort effort)
+  HotSide(const PlacementInput& input, const TermSum& sum, NarrowTerms& narrow, const FluxLimit& limit,
+          const AnsweredRange& range, Effort effort)
       : sum_(sum), threshold_(input, limit, range, effort), answered_(share_in(input.teff, range.answered)) {
-    const std::size_t most = effort == Effort::coarse ? 48 : 256;
     through_threshold_ = sum.terms.empty() || threshold_.width() > sum.terms.front().width();
     if (is_certain(0) && effort == Effort::full) return;
-    if (through_threshold_) threshold_.make_tracks();
-    const double inner = through_threshold_ ? threshold_.width() : sum.terms.front().width();
-    const bool corners = through_threshold_ || sum.terms.front().has_corners();
-    rest_ = {{sum.constant, 1}};
-    for (std::size_t i = through_threshold_ ? 0 : 1; i < sum.terms.size(); ++i) {
-      rest_ = sum_of(rest_, sum.terms[i].points({sum.terms[i].width() / inner, corners}, effort), most);
+    if (through_threshold_) {
+      threshold_.make_tracks();
+      rest_ = measure_of(sum, 0, threshold_.width(), true, effort);
+      return;
     }
-    if (through_threshold_) return;
-    Rule lowered = threshold_.points({threshold_.width() / inner, corners});
+    const SumTerm& widest = sum.terms.front();
+    Rule lowered = threshold_.points({threshold_.width() / widest.width(), widest.has_corners()});
     for (Node& node : lowered) node.x = -node.x;
-    rest_ = lowered.empty() ? lowered : sum_of(rest_, lowered, most);
+    rest_ = lowered.empty() ? lowered : sum_of(narrow.points(), lowered, most_points(effort));
   }
 
   [[nodiscard]] double probability(double shift) const {
@@ -123,10 +149,11 @@ Probabilities place(const PlacementInput& input, const LimitSet& set, BeyondRang
   HZ_REQUIRE(set.bounds_a_zone());
   const AnsweredRange range = answered_range(set.teff_range(), beyond);
   const TermSum sum(input);
+  NarrowTerms narrow(sum, Effort::full);
   const double answered = share_in(input.teff, range.answered);
   const auto hot = [&](std::size_t limit) {
     if (answered == 0) return 0.0;
-    return HotSide(input, sum, set.limits[limit], range, Effort::full).probability(0);
+    return HotSide(input, sum, narrow, set.limits[limit], range, Effort::full).probability(0);
   };
 
   Probabilities p;
@@ -157,7 +184,8 @@ double log_margin_width(const PlacementInput& input, const FluxLimit& limit, Bey
   const double answered = share_in(input.teff, range.answered);
   if (answered == 0) return 0;
   const TermSum sum(input);
-  const HotSide side(input, sum, limit, range, Effort::coarse);
+  NarrowTerms narrow(sum, Effort::coarse);
+  const HotSide side(input, sum, narrow, limit, range, Effort::coarse);
   const double mass =
       input.planet_mass_decadic ? std::pow(10, input.planet_mass.central()) : input.planet_mass.central();
   const double central = std::log(central_insolation(input) / limit.clamped_insolation(input.teff.central(), mass));

@@ -161,6 +161,16 @@ Getter stated_part(Quantity quantity, std::function<CellValue(const Measured&)> 
   };
 }
 
+/// The value, or the cell as it stands where it could not be read: a second reading meets the same trouble.
+Getter stated_value(Quantity quantity) {
+  return [quantity](const RankedRow& row) {
+    const Field* field = stated_field(row.candidate.row, quantity);
+    if (field == nullptr) return CellValue();
+    if (field->problem) return text(field->problem->cell);
+    return field->stated ? CellValue(field->stated->value) : CellValue();
+  };
+}
+
 CellValue exact_number(const std::optional<double>& x) { return x ? CellValue(*x) : CellValue(); }
 
 /// The stated value comes back digit for digit, so that the file is itself a list.
@@ -174,12 +184,11 @@ void add_stated(std::vector<OutputColumn>& columns, Quantity quantity) {
   const auto part = [&](const std::string& suffix, const std::string& words,
                         std::function<CellValue(const Measured&)> of) {
     const bool number_like = suffix != "_limit";
-    columns.push_back(
-        {{about.name + suffix, number_like ? about.unit : "",
-          suffix.empty() ? about.ucd : (number_like ? "stat.error;" : "meta.code.error;") + about.ucd, words},
-         stated_part(quantity, std::move(of))});
+    columns.push_back({{about.name + suffix, number_like ? about.unit : "",
+                        (number_like ? "stat.error;" : "meta.code.error;") + about.ucd, words},
+                       stated_part(quantity, std::move(of))});
   };
-  part("", about.description, [](const Measured& m) { return exact_number(m.value); });
+  columns.push_back({about, stated_value(quantity)});
   part("_err_minus", "lower half-width of " + about.name, [](const Measured& m) { return exact_number(m.minus); });
   part("_err_plus", "upper half-width of " + about.name, [](const Measured& m) { return exact_number(m.plus); });
   part("_limit", "< or > where " + about.name + " is only a limit", [](const Measured& m) {
@@ -222,6 +231,8 @@ Cells cells_of(const OutputColumn& column, const std::vector<RankedRow>& rows, C
   }
   std::vector<std::string_view> cells;
   for (CellValue& value : values) {
+    if (const double* x = std::get_if<double>(&value))
+      value = fmt::format("{}", *x);  // beside cells that are no numbers
     std::string* words = std::get_if<std::string>(&value);
     if (words == nullptr || words->empty()) {
       cells.emplace_back();

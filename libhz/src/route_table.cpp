@@ -38,10 +38,10 @@ const std::vector<Line>& lines() {
        "color",
        teff_from_vj},
       {{teff, "color_bp_rp, or magnitude_bp and magnitude_rp", "", {"teff_bprp_pm13"}, ""}, "color", teff_from_bp_rp},
+      {{teff, "spectral_type", "", {"teff_subtype_pm13"}, ""}, "spectral_type", teff_from_type},
       {{teff, "color_bv, or magnitude_b and magnitude_v", "", {"teff_bv_torres10", "teff_bv_boyajian13"}, ""},
        "color",
        teff_from_bv},
-      {{teff, "spectral_type", "", {"teff_subtype_pm13"}, ""}, "spectral_type", teff_from_type},
       {{teff, "magnitude_k and distance", "", {"teff_mk_pm13"}, ""}, "photometry", teff_from_absolute_k},
       {{teff, "stellar_mass", "", {"teff_mass_pm13"}, ""}, "mass", teff_from_mass},
 
@@ -94,12 +94,7 @@ const std::vector<Line>& lines() {
       {{stellar_mass, "log_g and stellar_radius", gravity, {}, ""}, "gravity", mass_from_log_g},
 
       {{distance, "distance", as_it_stands, {}, ""}, "stated", stated_distance},
-      {{distance,
-        "parallax",
-        "1 / parallax; from a relative error of 0.1 on, and for parallaxes not above 0, the posterior under an "
-        "exponentially decreasing space density (Bailer-Jones 2015)",
-        {},
-        ""},
+      {{distance, "parallax", "1 / parallax; up to ten errors a posterior (Bailer-Jones 2015)", {}, ""},
        "parallax",
        distance_from_parallax},
 
@@ -110,11 +105,24 @@ const std::vector<Line>& lines() {
        axis_from_period_and_derived_mass},
       {{semi_major_axis, "scaled_semi_major_axis and stellar_radius", "a = a/R R", {}, ""}, "scaled", axis_from_scaled},
 
-      {{insolation, "luminosity and semi_major_axis", "S = L / a^2", {}, ""}, "computed", insolation_from_luminosity},
+      {{insolation,
+        "luminosity and semi_major_axis",
+        "S = L / a^2",
+        {},
+        "the luminosity not by spectral_type or stellar_mass alone"},
+       "computed",
+       insolation_from_luminosity},
       {{insolation, "scaled_semi_major_axis and teff", "S = Teff^4 / (a/R)^2", {}, ""},
        "computed",
        insolation_from_scaled},
       {{insolation, "insolation", as_it_stands, {}, ""}, "stated", stated_insolation},
+      {{insolation,
+        "luminosity and semi_major_axis",
+        "S = L / a^2",
+        {},
+        "the luminosity by spectral_type or stellar_mass alone"},
+       "rough",
+       insolation_from_rough_luminosity},
 
       {{planet_radius, "planet_radius", as_it_stands, {}, ""}, "stated", stated_planet_radius},
       {{planet_radius, "radius_ratio and stellar_radius", "R_p = (R_p/R) R", {}, ""},
@@ -124,7 +132,7 @@ const std::vector<Line>& lines() {
        "transit",
        planet_radius_from_depth},
       // What follows is walked by planet_mass_route.cpp and answer.cpp: a planet's mass has a scale of its own.
-      {{planet_radius, "planet_mass", chen_kipping, {}, "for show alone"}, "mass", nullptr},
+      {{planet_radius, "planet_mass", chen_kipping, {}, "nothing else is known; it moves no zone"}, "mass", nullptr},
 
       {{planet_mass, "planet_mass", as_it_stands, {}, ""}, "stated", nullptr},
       {{planet_mass, "min_mass and inclination", "M = M sin i / sin i", {}, ""}, "minimum", nullptr},

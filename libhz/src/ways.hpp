@@ -60,6 +60,7 @@ std::optional<Form> axis_from_scaled_and_stated_radius(Resolver& r);
 std::optional<Form> insolation_from_luminosity(Resolver& r);
 std::optional<Form> insolation_from_scaled(Resolver& r);
 std::optional<Form> stated_insolation(Resolver& r);
+std::optional<Form> insolation_from_rough_luminosity(Resolver& r);
 std::optional<Form> stated_planet_radius(Resolver& r);
 std::optional<Form> planet_radius_from_ratio(Resolver& r);
 std::optional<Form> planet_radius_from_depth(Resolver& r);

@@ -53,6 +53,14 @@ std::optional<Form> by_color(Resolver& r, Quantity magnitude, Quantity color, st
   return form;
 }
 
+/// A luminosity that nothing of this very star but its type or mass speaks for.
+std::optional<Form> rough(const std::optional<Form>& decadic) {
+  if (!decadic) return std::nullopt;
+  Form form = ln10 * *decadic;
+  form.marks.rough = true;
+  return form;
+}
+
 std::optional<Form> from_radius(Resolver& r, const std::optional<Form>& radius) {
   if (!radius) return std::nullopt;
   const TeffInput* teff = r.teff();
@@ -113,8 +121,7 @@ std::optional<Form> luminosity_from_derived_radius(Resolver& r) {
 }
 
 std::optional<Form> luminosity_from_type(Resolver& r) {
-  const std::optional<Form> decadic = r.apply("log_luminosity_subtype_pm13", r.subtype(), Quantity::luminosity);
-  return decadic ? std::optional(ln10 * *decadic) : std::nullopt;
+  return rough(r.apply("log_luminosity_subtype_pm13", r.subtype(), Quantity::luminosity));
 }
 
 std::optional<Form> luminosity_from_mass(Resolver& r) {
@@ -122,8 +129,7 @@ std::optional<Form> luminosity_from_mass(Resolver& r) {
   if (!mass) return std::nullopt;
   Form decadic_mass = 1 / ln10 * *mass;
   decadic_mass.route = "stellar_mass";
-  const std::optional<Form> decadic = r.apply("log_luminosity_mass_eker18", decadic_mass, Quantity::luminosity);
-  return decadic ? std::optional(ln10 * *decadic) : std::nullopt;
+  return rough(r.apply("log_luminosity_mass_eker18", decadic_mass, Quantity::luminosity));
 }
 
 std::optional<Form> luminosity_from_photometry(Resolver& r) {

@@ -26,6 +26,20 @@ bool uses(Resolver& r, const Form& form, Quantity quantity) {
   return false;
 }
 
+/// L / a^2.
+std::optional<Form> light_over_axis(Resolver& r) {
+  const std::optional<Form> light = r.find(Quantity::luminosity);
+  if (!light) return std::nullopt;
+  const std::optional<Form> axis = r.find(Quantity::semi_major_axis);
+  if (!axis) return std::nullopt;
+  // With L from the radius and a from a/R the radius cancels: a/R and Teff say the same.
+  const bool scaled = uses(r, *axis, Quantity::scaled_semi_major_axis);
+  if (scaled && light->curve.power > 0 && uses(r, *light, Quantity::stellar_radius)) return std::nullopt;
+  Form insolation = *light - 2 * *axis;
+  insolation.route = "luminosity and semi_major_axis";
+  return insolation;
+}
+
 }  // namespace
 
 std::optional<Form> axis_from_period(Resolver& r) {
@@ -58,17 +72,11 @@ std::optional<Form> axis_from_scaled_and_stated_radius(Resolver& r) {
 }
 
 std::optional<Form> insolation_from_luminosity(Resolver& r) {
-  const std::optional<Form> light = r.find(Quantity::luminosity);
-  if (!light) return std::nullopt;
-  const std::optional<Form> axis = r.find(Quantity::semi_major_axis);
-  if (!axis) return std::nullopt;
-  // With L from the radius and a from a/R the radius cancels: the next route says the same.
-  const bool scaled = uses(r, *axis, Quantity::scaled_semi_major_axis);
-  if (scaled && light->curve.power > 0 && uses(r, *light, Quantity::stellar_radius)) return std::nullopt;
-  Form insolation = *light - 2 * *axis;
-  insolation.route = "luminosity and semi_major_axis";
-  return insolation;
+  const std::optional<Form> insolation = light_over_axis(r);
+  return insolation && !insolation->marks.rough ? insolation : std::nullopt;
 }
+
+std::optional<Form> insolation_from_rough_luminosity(Resolver& r) { return light_over_axis(r); }
 
 std::optional<Form> insolation_from_scaled(Resolver& r) {
   const TeffInput* teff = r.teff();

@@ -16,7 +16,8 @@ inline Field exactly(double x) { return {Measured{x, {}, {}, LimitMark::none, tr
 inline Field below(double x) { return {Measured{x, {}, {}, LimitMark::upper, false}, {}}; }
 inline Field above(double x) { return {Measured{x, {}, {}, LimitMark::lower, false}, {}}; }
 inline Field unreadable(const std::string& column) {
-  return {{}, Problem{ProblemCode::unreadable, column, column + " holds \"4553+15-\", which is not a value"}};
+  const Problem problem{ProblemCode::unreadable, column, column + " holds \"4553+15-\", which is not a value"};
+  return {{}, std::make_shared<const Unread>(Unread{problem, "4553+15-"})};
 }
 
 inline const LimitSet& set_named(std::string_view key) { return *LimitCatalog::published().find(key); }

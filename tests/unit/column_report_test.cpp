@@ -9,9 +9,11 @@
 namespace hz {
 namespace {
 
+using ::testing::Contains;
 using ::testing::ElementsAre;
 using ::testing::HasSubstr;
 using ::testing::IsEmpty;
+using ::testing::SizeIs;
 
 struct Understood {
   TableHead head;
@@ -46,11 +48,18 @@ TEST(ColumnReport, SaysWhatIsMissing) {
     return report_columns(list.head, list.understanding, list.first);
   };
   EXPECT_THAT(missing("star,teff,stellar_radius\n").missing_for_stars, IsEmpty());
-  EXPECT_THAT(missing("star,teff\n").missing_for_stars, ElementsAre("luminosity, log_luminosity or stellar_radius"));
+  EXPECT_THAT(missing("star,teff\n").missing_for_stars,
+              ElementsAre("luminosity, log_luminosity, stellar_radius, a magnitude with distance or parallax, "
+                          "spectral_type or stellar_mass"));
+  EXPECT_THAT(missing("star,log_g\n").missing_for_stars, Contains("teff, a colour, spectral_type or stellar_mass"));
+  EXPECT_THAT(missing("star,V mag,B-V,parallax\n").missing_for_stars, IsEmpty());
+  EXPECT_THAT(missing("star,Ks mag,parallax\n").missing_for_stars, IsEmpty());
+  EXPECT_THAT(missing("star,V mag,B-V\n").missing_for_stars, SizeIs(1));
+  EXPECT_THAT(missing("star,spectral type\n").missing_for_stars, IsEmpty());
   EXPECT_THAT(missing("planet,teff,insolation\n").missing_for_planets, IsEmpty());
   EXPECT_THAT(missing("planet,teff,luminosity,orbital_period,stellar_mass\n").missing_for_planets, IsEmpty());
   EXPECT_THAT(
-      missing("teff,luminosity,orbital_period\n").missing_for_planets,
+      missing("teff,luminosity\n").missing_for_planets,
       ElementsAre("planet", "semi_major_axis, orbital_period with stellar_mass, scaled_semi_major_axis or insolation"));
 }
 

@@ -317,7 +317,8 @@ TEST(CompletedStar, TakesOnlyWhatTheStarListDoesNotSay) {
   StarRecord star;
   star.name = "Lantern 4";
   star.teff = stated(5000);
-  star.stellar_radius.problem = Problem{ProblemCode::unreadable, "R", "R holds x"};
+  star.stellar_radius.problem =
+      std::make_shared<const Unread>(Unread{{ProblemCode::unreadable, "R", "R holds x"}, "x"});
   StarRecord other;
   other.name = "LTN 4";
   other.spectral_type = "K2V";

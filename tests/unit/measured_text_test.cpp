@@ -96,7 +96,7 @@ TEST(CommaHint, SaysWhatToWrite) {
   EXPECT_EQ(comma_hint("4,62 ± 0,03"), "; a decimal comma? write 4.62 ± 0.03");
   EXPECT_EQ(comma_hint("4,62 (+0,1/-0,2) RJ"), "; a decimal comma? write 4.62 (+0.1/-0.2) RJ");
   EXPECT_EQ(comma_hint("<0,3"), "; a decimal comma? write <0.3");
-  EXPECT_EQ(comma_hint("0,123"), "; a comma in a number? write 0.123 or 0123");
+  EXPECT_EQ(comma_hint("0,123"), "; a decimal comma? write 0.123");
 }
 
 TEST(CommaHint, ThreeDigitsMayBeThousands) {
@@ -106,7 +106,7 @@ TEST(CommaHint, ThreeDigitsMayBeThousands) {
 }
 
 TEST(CommaHint, IsSilentWhereCommasAreNotTheTrouble) {
-  for (const auto* const text : {"", "4.62", "hot", "1,2,3", "a,b", ",5", "5,", "4,62+5", "4410+80,-60"})
+  for (const auto* const text : {"", "4.62", "hot", ",", "a,123", "1,2,3", "a,b", ",5", "5,", "4,62+5", "4410+80,-60"})
     EXPECT_EQ(comma_hint(text), "") << text;
 }
 

@@ -63,20 +63,20 @@ TEST(RowReading, MissingIsNeitherValueNorProblem) {
   for (const auto* const nothing : {"", "nan", "NULL", "N/A", "-", "--", "...", " "}) {
     const auto row = row_of(std::string("star,teff\nx,") + nothing + "\n");
     EXPECT_FALSE(row.star.teff.stated.has_value()) << nothing;
-    EXPECT_FALSE(row.star.teff.problem.has_value()) << nothing;
+    EXPECT_EQ(row.star.teff.problem, nullptr) << nothing;
   }
 }
 
 TEST(RowReading, FurtherSpellingsOfMissingComeFromTheMap) {
   EXPECT_FALSE(row_of("star,teff\nx,-99\n", "missing = [\"-99\"]").star.teff.stated.has_value());
-  EXPECT_FALSE(row_of("star,teff\nx,Unknown\n", "missing = [\"unknown \"]").star.teff.problem.has_value());
+  EXPECT_EQ(row_of("star,teff\nx,Unknown\n", "missing = [\"unknown \"]").star.teff.problem, nullptr);
   EXPECT_EQ(row_of("star,teff\nx,-99\n").star.teff.stated, measured(-99));
 }
 
 TEST(RowReading, UnreadableIsAProblemThatQuotes) {
   for (const auto* const text : {"hot", "inf", "4553+15-", "1e999"}) {
     const auto field = row_of(std::string("star,Teff [K]\nx,") + text + "\n").star.teff;
-    ASSERT_TRUE(field.problem.has_value()) << text;
+    ASSERT_NE(field.problem, nullptr) << text;
     EXPECT_FALSE(field.stated.has_value());
     EXPECT_EQ(field.problem->code, ProblemCode::unreadable);
     EXPECT_EQ(field.problem->column, "Teff [K]");
@@ -189,7 +189,7 @@ TEST(RowReading, LimitMarks) {
   EXPECT_THAT(limit_of("2").problem->what,
               HasSubstr("eccentricity_limit holds \"2\", which is not one of 1, 0, -1, < and >"));
   EXPECT_FALSE(row_of("star,eccentricity,eccentricity_limit\nx,,1\n").planet.eccentricity.stated.has_value());
-  EXPECT_FALSE(row_of("star,eccentricity,eccentricity_limit\nx,,1\n").planet.eccentricity.problem.has_value());
+  EXPECT_EQ(row_of("star,eccentricity,eccentricity_limit\nx,,1\n").planet.eccentricity.problem, nullptr);
 }
 
 TEST(RowReading, UnitsOfColumnsAndCells) {
@@ -225,7 +225,7 @@ TEST(RowReading, ParallaxInACellOfDistancesMustBePositive) {
   EXPECT_DOUBLE_EQ(row_of("star,distance\nx,50 mas\n").star.distance.stated->value, 20);
   for (const auto* const text : {"0 mas", "-3 mas"}) {
     const auto field = row_of(std::string("star,distance\nx,") + text + "\n").star.distance;
-    ASSERT_TRUE(field.problem.has_value()) << text;
+    ASSERT_NE(field.problem, nullptr) << text;
     EXPECT_EQ(field.problem->code, ProblemCode::out_of_range);
   }
 }
@@ -306,7 +306,7 @@ TEST(RowReading, AfterAMissingNumberTheNextChoiceCounts) {
 }
 
 TEST(RowReading, OverflowInTheConversionIsNoValue) {
-  EXPECT_TRUE(row_of("star,planet_mass [MJ]\nx,1e308\n").planet.planet_mass.problem.has_value());
+  EXPECT_NE(row_of("star,planet_mass [MJ]\nx,1e308\n").planet.planet_mass.problem, nullptr);
 }
 
 TEST(RowReading, FirstFilledChoiceCountsWithItsOwnHalfWidths) {
@@ -316,14 +316,6 @@ TEST(RowReading, FirstFilledChoiceCountsWithItsOwnHalfWidths) {
   EXPECT_EQ(rows[0].planet.planet_radius.stated, measured(2, 0.1, 0.1));
   EXPECT_DOUBLE_EQ(rows[1].planet.planet_radius.stated->value, 7.1492e7 / 6.3781e6);
   EXPECT_DOUBLE_EQ(*rows[1].planet.planet_radius.stated->plus, 0.2 * 7.1492e7 / 6.3781e6);
-}
-
-TEST(RowReading, DerivedValuesOfAnEarlierRunAreLeftOut) {
-  const auto rows = rows_of("planet,luminosity,luminosity_route\na,0.2,stated\nb,0.2,radius and teff\nc,0.2,\n");
-  EXPECT_TRUE(rows[0].star.luminosity.stated.has_value());
-  EXPECT_FALSE(rows[1].star.luminosity.stated.has_value());
-  EXPECT_FALSE(rows[1].star.luminosity.problem.has_value());
-  EXPECT_TRUE(rows[2].star.luminosity.stated.has_value());
 }
 
 // A ranked list states what its own list stated, whatever route was taken.
@@ -377,7 +369,7 @@ TEST(RowReading, ColumnsOfNumbersAsBinaryFormatsHoldThem) {
   const auto first = understanding.row(chunk, 0);
   EXPECT_EQ(first.star.teff.stated, measured(4410, 70, 70));
   EXPECT_EQ(first.star.number_of_stars, 2);
-  EXPECT_TRUE(first.planet.planet_mass.problem.has_value());
+  EXPECT_NE(first.planet.planet_mass.problem, nullptr);
   EXPECT_FALSE(understanding.row(chunk, 1).star.teff.stated.has_value());
 }
 

@@ -1,6 +1,7 @@
 // What a list says of a star and a planet, row by row, before anything follows from it.
 #pragma once
 #include <cstddef>
+#include <memory>
 #include <optional>
 #include <string>
 #include <vector>
@@ -11,10 +12,15 @@
 
 namespace hz {
 
+/// A cell that could not be read, as it stands in the list. Rare, so that fields only point to it.
+struct Unread : Problem {
+  std::string cell;
+};
+
 /// One quantity of one row: stated, absent, or present but unreadable. Canonical units (hz/quantity.hpp).
 struct Field {
   std::optional<Measured> stated;
-  std::optional<Problem> problem;  // the cell holds something that is not a value; `stated` is then empty
+  std::shared_ptr<const Unread> problem;  // the cell holds something that is not a value; `stated` is then empty
 };
 
 /// How a list's planet mass came about.

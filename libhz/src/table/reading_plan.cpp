@@ -102,15 +102,8 @@ void ReadingPlan::add(const UnderstoodColumn& column) {
     case ColumnPart::lower_bound: choice.lower_bound = side; break;
     case ColumnPart::upper_bound: choice.upper_bound = side; break;
     case ColumnPart::limit_mark: choice.limit_mark = column.column; break;
-    case ColumnPart::route:
-      // Beside an X_used the route tells of that, and X is what the list stated.
-      if (!has_header(std::string(name(column.quantity)) + "_used")) choice.route = column.column;
-      break;
+    case ColumnPart::route: break;  // how an earlier run of ours came by a value, which stands in a column of its own
   }
-}
-
-bool ReadingPlan::has_header(const std::string& name) const {
-  return std::find(headers_.begin(), headers_.end(), name) != headers_.end();
 }
 
 bool ReadingPlan::is_no_value(std::string_view text) const {
@@ -163,43 +156,42 @@ std::string ReadingPlan::text(const Chunk& chunk, std::size_t row, Quantity quan
 
 Field ReadingPlan::field(const Chunk& chunk, std::size_t row, Quantity quantity) const {
   for (const auto& choice : choices(quantity)) {
-    if (auto found = chosen(chunk, row, quantity, choice)) return *std::move(found);
+    const auto found = chosen(chunk, row, quantity, choice);
+    if (!found) {
+      std::string cell(words::trimmed(chunk.text(choice.column, row)));
+      // Trouble beside the value stays with it, or a second reading would take the value for sound.
+      if (found.error().column != headers_[choice.column]) cell += fmt::format(" [{}]", found.error().what);
+      return {{}, std::make_shared<const Unread>(Unread{found.error(), std::move(cell)})};
+    }
+    if (*found) return {**found, nullptr};
   }
   return {};
 }
 
-// nullopt when this choice says nothing in this row.
-std::optional<Field> ReadingPlan::chosen(const Chunk& chunk, std::size_t row, Quantity quantity,
-                                         const Choice& choice) const {
+// Empty when this choice says nothing in this row.
+Result<std::optional<Measured>> ReadingPlan::chosen(const Chunk& chunk, std::size_t row, Quantity quantity,
+                                                    const Choice& choice) const {
   const auto value = cell(chunk, row, choice.column);
-  if (value.empty()) return std::nullopt;
+  if (value.empty()) return std::optional<Measured>();
   const auto& header = headers_[choice.column];
-  if (choice.route) {
-    const auto route = cell(chunk, row, *choice.route);
-    if (!route.empty() && route.text != "stated") return Field{};
-  }
   const auto parsed = measured_in(value, header);
-  if (!parsed) return Field{{}, parsed.error()};
-  if (is_missing_number(parsed->measured, quantity)) return std::nullopt;
+  if (!parsed) return parsed.error();
+  if (is_missing_number(parsed->measured, quantity)) return std::optional<Measured>();
   auto conversion = std::optional(choice.conversion);
   if (!parsed->unit.empty()) conversion = hz::conversion(quantity, parsed->unit);
   if (!conversion)
-    return Field{{},
-                 problem(header, fmt::format("holds {}, whose unit is not one of {}", words::quoted(value.text),
-                                             name(quantity)))};
+    return problem(header,
+                   fmt::format("holds {}, whose unit is not one of {}", words::quoted(value.text), name(quantity)));
   const auto measured = with_sides(chunk, row, parsed->measured, choice, *conversion);
-  if (!measured) return Field{{}, measured.error()};
+  if (!measured) return measured.error();
+  const auto shown = this->shown(chunk, row, choice.column);
   if (conversion->kind == ConversionKind::reciprocal && measured->value <= 0) {
-    return Field{{},
-                 problem(header,
-                         fmt::format("holds {}, and a parallax that is not above 0 gives no distance",
-                                     shown(chunk, row, choice.column)),
-                         ProblemCode::out_of_range)};
+    return problem(header, fmt::format("holds {}, and a parallax that is not above 0 gives no distance", shown),
+                   ProblemCode::out_of_range);
   }
   const auto converted = convert(*measured, *conversion);
-  if (is_finite(converted)) return Field{converted, {}};
-  return Field{{},
-               problem(header, fmt::format("holds {}, which is not a finite value", shown(chunk, row, choice.column)))};
+  if (is_finite(converted)) return std::optional(converted);
+  return problem(header, fmt::format("holds {}, which is not a finite value", shown));
 }
 
 // Half-widths written in the cell itself win over those of other columns.
@@ -266,7 +258,7 @@ Result<std::optional<double>> ReadingPlan::number(const Chunk& chunk, std::size_
 // A half-width in the unit of its value, with its sign.
 Result<std::optional<double>> ReadingPlan::width(const Chunk& chunk, std::size_t row, const std::optional<Side>& side,
                                                  const Conversion& conversion) const {
-  const auto printed = number(chunk, row, side);
+  auto printed = number(chunk, row, side);
   if (!printed || !*printed || !side->own) return printed;
   if (side->own->kind == conversion.kind) return std::optional(**printed * ratio(*side->own, conversion));
   return problem(headers_[side->column],
@@ -278,7 +270,7 @@ Result<std::optional<double>> ReadingPlan::width(const Chunk& chunk, std::size_t
 Result<std::optional<double>> ReadingPlan::half_width(const Chunk& chunk, std::size_t row,
                                                       const std::optional<Side>& side,
                                                       const Conversion& conversion) const {
-  const auto read = width(chunk, row, side, conversion);
+  auto read = width(chunk, row, side, conversion);
   if (!read || read->value_or(0) >= 0) return read;
   return problem(headers_[side->column],
                  fmt::format("holds {}, and a half-width is never below 0", shown(chunk, row, side->column)));
@@ -287,7 +279,7 @@ Result<std::optional<double>> ReadingPlan::half_width(const Chunk& chunk, std::s
 // The end of an interval in the unit of its value.
 Result<std::optional<double>> ReadingPlan::bound(const Chunk& chunk, std::size_t row, const std::optional<Side>& side,
                                                  const Conversion& conversion) const {
-  const auto printed = number(chunk, row, side);
+  auto printed = number(chunk, row, side);
   if (!printed || !*printed || !side->own || *side->own == conversion) return printed;
   return std::optional(convert_back(convert(**printed, *side->own), conversion));
 }

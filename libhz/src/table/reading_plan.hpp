@@ -35,7 +35,7 @@ private:
     std::size_t column = 0;
     Conversion conversion;
     std::optional<Side> half_width, upper_half_width, lower_half_width, lower_bound, upper_bound;
-    std::optional<std::size_t> limit_mark, route;
+    std::optional<std::size_t> limit_mark;
   };
   struct Cell;
 
@@ -48,8 +48,8 @@ private:
   [[nodiscard]] Cell cell(const Chunk& chunk, std::size_t row, std::size_t column) const;
   [[nodiscard]] std::string text(const Chunk& chunk, std::size_t row, Quantity quantity) const;
   [[nodiscard]] Field field(const Chunk& chunk, std::size_t row, Quantity quantity) const;
-  [[nodiscard]] std::optional<Field> chosen(const Chunk& chunk, std::size_t row, Quantity quantity,
-                                            const Choice& choice) const;
+  [[nodiscard]] Result<std::optional<Measured>> chosen(const Chunk& chunk, std::size_t row, Quantity quantity,
+                                                       const Choice& choice) const;
   [[nodiscard]] Result<Measured> with_sides(const Chunk& chunk, std::size_t row, Measured measured,
                                             const Choice& choice, const Conversion& conversion) const;
   [[nodiscard]] Result<std::optional<double>> number(const Chunk& chunk, std::size_t row,
@@ -67,7 +67,6 @@ private:
                                              const Choice& choice, const Conversion& conversion) const;
   [[nodiscard]] Problem not_bracketed(const Chunk& chunk, std::size_t row, const Choice& choice) const;
   [[nodiscard]] Result<LimitMark> limit(const Chunk& chunk, std::size_t row, std::size_t column) const;
-  [[nodiscard]] bool has_header(const std::string& name) const;
   [[nodiscard]] bool is_missing_number(const Measured& measured, Quantity quantity) const;
   [[nodiscard]] std::string shown(const Chunk& chunk, std::size_t row, std::size_t column) const;
   [[nodiscard]] bool is_no_value(std::string_view text) const;

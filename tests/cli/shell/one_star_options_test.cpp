@@ -3,6 +3,8 @@
 #include <gmock/gmock.h>
 #include <gtest/gtest.h>
 
+#include <algorithm>
+
 #include "commands.hpp"
 #include "hz/constants.hpp"
 #include "hz/error.hpp"
@@ -58,25 +60,32 @@ TEST(TypedRow, ANamelessPlanetIsStillAPlanet) {
 
 TEST(TypedRow, EveryOptionReachesAFieldOfItsOwn) {
   std::vector<std::string> words;
-  int value = 1;
+  std::vector<Quantity> quantities;
   for (const auto table : {star_value_options(), planet_value_options()}) {
     for (const Option& option : table) {
-      if (option.name == "name") continue;
+      std::string name(option.name == "period" ? "orbital-period" : option.name);
+      std::replace(name.begin(), name.end(), '-', '_');
+      const auto quantity = quantity_named(name);
+      if (!quantity || stated_field(ListRow{}, *quantity) == nullptr) continue;
+      quantities.push_back(*quantity);
       words.push_back("--" + std::string(option.name));
-      words.push_back(std::to_string(value++));
+      words.push_back("0." + std::to_string(100 + quantities.size()));
     }
   }
+  EXPECT_EQ(quantities.size(), 35U);  // 24 of the star, 11 of the planet
   const ListRow row = typed_row(arguments(words));
-  const StarRecord& s = row.star;
-  const PlanetRecord& p = row.planet;
-  double expected = 1;
-  for (const Field* const field :
-       {&s.teff, &s.luminosity, &s.log_luminosity, &s.stellar_radius, &s.stellar_mass, &s.log_g, &s.distance,
-        &p.orbital_period, &p.semi_major_axis, &p.scaled_semi_major_axis, &p.eccentricity, &p.insolation,
-        &p.planet_radius, &p.planet_mass, &p.min_mass}) {
-    ASSERT_TRUE(field->stated);
-    EXPECT_EQ(field->stated->value, expected++);
+  for (std::size_t i = 0; i < quantities.size(); ++i) {
+    const Field* const field = stated_field(row, quantities[i]);
+    ASSERT_TRUE(field->stated) << name(quantities[i]);
+    EXPECT_EQ(field->stated->value, std::stod("0." + std::to_string(101 + i))) << name(quantities[i]);
   }
+}
+
+TEST(TypedRow, TextAndCountsToo) {
+  const ListRow row = typed_row(arguments({"--spectral-type", "M4.5V", "--number-of-stars", "2"}));
+  EXPECT_EQ(row.star.spectral_type, "M4.5V");
+  EXPECT_EQ(row.star.number_of_stars, 2);
+  EXPECT_THROW((void)typed_row(arguments({"--spectral-type", "8"})), Error);
 }
 
 TEST(HasTypedValues, ANameAloneDoesNotCount) {
