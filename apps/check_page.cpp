@@ -134,6 +134,14 @@ std::string input_words(const VarianceShare& share) {
   return "scatter of " + relation(share.scatter_of).label;
 }
 
+/// Whether the probability itself leaves the conservative zone unsettled, companions apart.
+bool is_unsettled(const CheckReport& report) {
+  const std::optional<double>& p = report.answer.planet->probabilities.conservative;
+  if (!p) return false;
+  const Verdict verdict = verdict_of(*p, report.settings.thresholds);
+  return verdict != Verdict::inside && verdict != Verdict::outside;
+}
+
 std::string decides_line(const CheckReport& report) {
   if (report.shares.empty()) return "";
   std::vector<std::string> parts;
@@ -144,9 +152,7 @@ std::string decides_line(const CheckReport& report) {
   if (report.settling_factor) {
     text += fmt::format("; an error of {} {:.2g} times as large would make the verdict firm",
                         input_words(*report.leading), *report.settling_factor);
-  } else if (report.leading && report.answer.planet->conservative &&
-             *report.answer.planet->conservative != Verdict::inside &&
-             *report.answer.planet->conservative != Verdict::outside) {
+  } else if (report.leading && is_unsettled(report)) {
     text += fmt::format("; a better {} alone would not settle it", input_words(*report.leading));
   }
   return text + ".";

@@ -8,6 +8,7 @@
 #include "closest.hpp"
 #include "commands.hpp"
 #include "hz/error.hpp"
+#include "hz/extinction.hpp"
 #include "hz/relation.hpp"
 #include "hz/routes.hpp"
 #include "numbers.hpp"
@@ -97,6 +98,14 @@ std::string sources_of(Quantity quantity, std::size_t width) {
   return text;
 }
 
+std::string extinction_sentence() {
+  return fmt::format(
+      "Extinction is taken off magnitudes and colours where it is stated, as A_V or as E(B-V) with R_V = 3.1: "
+      "A_G = {} A_V, A_J = {} A_V, A_Ks = {} A_V, E(BP-RP) = {} A_V.",
+      extinction_ratio(Quantity::magnitude_g), extinction_ratio(Quantity::magnitude_j),
+      extinction_ratio(Quantity::magnitude_k), color_excess_ratio(Quantity::color_bp_rp));
+}
+
 Quantity asked_for(const std::string& word) {
   std::vector<std::string> names;
   for (const Quantity quantity : quantities()) {
@@ -118,6 +127,7 @@ int run_routes(const Arguments& arguments, Console& console) {
     return exit_code::done;
   }
   for (const Quantity quantity : quantities()) console.print(in_brief(quantity, console) + "\n");
+  console.print(wrapped(extinction_sentence(), width) + "\n");
   console.print(
       wrapped("The first that leads anywhere is taken; what each owes to its inputs and to the scatter of its "
               "relation goes into every answer. `hzmap routes QUANTITY` shows the sources.",

@@ -3,6 +3,7 @@
 #include <fmt/format.h>
 
 #include <algorithm>
+#include <array>
 
 #include "numbers.hpp"
 
@@ -33,16 +34,19 @@ std::string value_text(const Measured& measured) {
   return exact ? short_number(rounded(measured.value, digits)) : measured_text(measured);
 }
 
-void add_derived(std::string& text, const char* symbol, const std::optional<Derived>& derived, const char* unit) {
-  if (!derived || derived->route.starts_with("stated")) return;
-  text += fmt::format("{}{} from {}: {}{}", text.empty() ? "" : "; ", symbol, route_words(derived->route),
-                      value_text(derived->measured), unit);
-}
+/// What a page shows of a star, in this order.
+struct Shown {
+  const char* symbol;
+  std::optional<Derived> StarAnswer::*value;
+  const char* unit;
+};
+constexpr auto shown_values = std::to_array<Shown>({{"Teff", &StarAnswer::teff, "K"},
+                                                    {"L", &StarAnswer::luminosity, "L☉"},
+                                                    {"radius", &StarAnswer::stellar_radius, "R☉"},
+                                                    {"mass", &StarAnswer::stellar_mass, "M☉"},
+                                                    {"distance", &StarAnswer::distance, "pc"}});
 
-void add_stated(std::string& text, const char* symbol, const std::optional<Derived>& derived, const char* unit) {
-  if (!derived || !derived->route.starts_with("stated")) return;
-  text += fmt::format("{}{} {}{}", text.empty() ? "" : ", ", symbol, measured_text(derived->measured), unit);
-}
+bool is_stated(const Derived& derived) { return derived.route.starts_with("stated"); }
 
 }  // namespace
 
@@ -59,21 +63,22 @@ std::string route_words(std::string_view route) {
 
 std::string stated_values(const StarAnswer& star) {
   std::string text;
-  add_stated(text, "Teff", star.teff, " K");
-  add_stated(text, "L", star.luminosity, " L☉");
-  add_stated(text, "radius", star.stellar_radius, " R☉");
-  add_stated(text, "mass", star.stellar_mass, " M☉");
-  add_stated(text, "distance", star.distance, " pc");
+  for (const auto& [symbol, value, unit] : shown_values) {
+    const std::optional<Derived>& derived = star.*value;
+    if (!derived || !is_stated(*derived)) continue;
+    text += fmt::format("{}{} {} {}", text.empty() ? "" : ", ", symbol, measured_text(derived->measured), unit);
+  }
   return text;
 }
 
 std::string derivation_sentence(const StarAnswer& star) {
   std::string text;
-  add_derived(text, "Teff", star.teff, " K");
-  add_derived(text, "L", star.luminosity, " L☉");
-  add_derived(text, "radius", star.stellar_radius, " R☉");
-  add_derived(text, "mass", star.stellar_mass, " M☉");
-  add_derived(text, "distance", star.distance, " pc");
+  for (const auto& [symbol, value, unit] : shown_values) {
+    const std::optional<Derived>& derived = star.*value;
+    if (!derived || is_stated(*derived)) continue;
+    text += fmt::format("{}{} from {}: {} {}", text.empty() ? "" : "; ", symbol, route_words(derived->route),
+                        value_text(derived->measured), unit);
+  }
   return text.empty() ? text : "Derived: " + text + ".";
 }
 

@@ -228,7 +228,7 @@ std::optional<Problem> below_main_sequence(const Work& work, const Answer& answe
   return Problem{
       ProblemCode::out_of_range, "luminosity",
       fmt::format("luminosity by {} makes the star {:.2g} times the size of a main-sequence star of {:.0f} K "
-                  "({}): a white dwarf, or a wrong colour or parallax",
+                  "({}): a white dwarf, or a wrong colour, type, magnitude or distance",
                   answer.star.luminosity ? answer.star.luminosity->route : "", *ratio, work.teff->used.value,
                   work.teff->form.route)};
 }

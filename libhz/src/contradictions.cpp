@@ -92,6 +92,7 @@ std::string contradictions(Resolver& resolver, const Measured* insolation) {
   comparison.compare(Quantity::luminosity, stated_light, {luminosity_from_radius});
   comparison.compare(Quantity::luminosity, light_without_magnitudes, {luminosity_from_photometry});
   comparison.compare(Quantity::teff, stated_teff, {teff_from_vk, teff_from_bp_rp});
+  comparison.compare(Quantity::teff, teff_from_type, {teff_from_bv});
   comparison.compare(Quantity::log_g, stated_gravity, {gravity});
   comparison.compare(Quantity::distance, stated_distance, {distance_from_parallax});
   comparison.compare(Quantity::semi_major_axis, stated_axis, {axis_from_period, axis_from_scaled_and_stated_radius});

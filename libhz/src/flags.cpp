@@ -12,7 +12,7 @@ constexpr FlagInfo infos[] = {
     {flag::evolved,
      "the host is not on the main sequence (log g below 4.0 or radius above twice the main sequence's); the fits are "
      "for dwarfs"},
-    {flag::min_mass_used, "the minimum mass stands for the planet's mass"},
+    {flag::min_mass_used, "the planet's mass follows from its minimum mass, the inclination being isotropic"},
     {flag::mass_from_radius, "the planet's mass follows from its radius (Chen & Kipping 2017, with its scatter)"},
     {flag::planet_mass_assumed, "no usable mass or radius: 1 Earth mass assumed"},
     {flag::circular_assumed, "no eccentricity given: a circular orbit assumed"},

@@ -33,7 +33,7 @@ std::string_view preferred_family(Quantity quantity, const Settings& settings) {
 std::optional<Form> walk(Resolver& resolver, Quantity quantity, std::string_view family, bool in_family) {
   for (const RouteEntry& entry : route_entries()) {
     if (entry.gives != quantity || entry.way == nullptr || (entry.family == family) != in_family) continue;
-    const std::optional<Form> found = entry.way(resolver);
+    std::optional<Form> found = entry.way(resolver);
     if (found || resolver.problem()) return found;
   }
   return std::nullopt;
@@ -69,20 +69,17 @@ std::optional<Form> Resolver::find(Quantity quantity) {
   return problem_ ? std::nullopt : found;
 }
 
+/// A stated Teff keeps the distribution it was stated with; a derived one has that of its first-order half-widths.
 TeffInput Resolver::input_of(const Form& teff) const {
-  TeffInput input;
-  input.form = teff;
-  const Source& first = sources_[teff.terms.empty() ? 0 : teff.terms.front().source];
-  if (teff.terms.size() == 1 && first.quantity == Quantity::teff && first.scatter_of.empty()) {
-    input.x = first.input.x;
-    input.used = first.input.used;
-    return input;
+  if (teff.route == "stated") {
+    const Input& stated = sources_[teff.terms.front().source].input;
+    return {teff, stated.x, stated.used};
   }
-  input.used = plain(teff, sources_);
-  input.x = *input.used.minus + *input.used.plus > 0
-                ? Distribution::two_piece(teff.value, *input.used.minus, *input.used.plus, settings_.asymmetry,
-                                          domain_of(Quantity::teff))
-                : Distribution::exact(teff.value);
+  TeffInput input{teff, Distribution::exact(teff.value), plain(teff, sources_)};
+  if (*input.used.minus + *input.used.plus > 0) {
+    input.x = Distribution::two_piece(teff.value, *input.used.minus, *input.used.plus, settings_.asymmetry,
+                                      domain_of(Quantity::teff));
+  }
   return input;
 }
 

@@ -38,10 +38,10 @@ const std::vector<Line>& lines() {
        "color",
        teff_from_vj},
       {{teff, "color_bp_rp, or magnitude_bp and magnitude_rp", "", {"teff_bprp_pm13"}, ""}, "color", teff_from_bp_rp},
+      {{teff, "spectral_type", "", {"teff_subtype_pm13"}, ""}, "spectral_type", teff_from_type},
       {{teff, "color_bv, or magnitude_b and magnitude_v", "", {"teff_bv_torres10", "teff_bv_boyajian13"}, ""},
        "color",
        teff_from_bv},
-      {{teff, "spectral_type", "", {"teff_subtype_pm13"}, ""}, "spectral_type", teff_from_type},
       {{teff, "magnitude_k and distance", "", {"teff_mk_pm13"}, ""}, "photometry", teff_from_absolute_k},
       {{teff, "stellar_mass", "", {"teff_mass_pm13"}, ""}, "mass", teff_from_mass},
 
@@ -94,12 +94,7 @@ const std::vector<Line>& lines() {
       {{stellar_mass, "log_g and stellar_radius", gravity, {}, ""}, "gravity", mass_from_log_g},
 
       {{distance, "distance", as_it_stands, {}, ""}, "stated", stated_distance},
-      {{distance,
-        "parallax",
-        "1 / parallax; from a relative error of 0.1 on, and for parallaxes not above 0, the posterior under an "
-        "exponentially decreasing space density (Bailer-Jones 2015)",
-        {},
-        ""},
+      {{distance, "parallax", "1 / parallax; up to ten errors a posterior (Bailer-Jones 2015)", {}, ""},
        "parallax",
        distance_from_parallax},
 

@@ -132,7 +132,7 @@ PlacementInput placement_input(const Form& log_insolation, const Form* teff, con
     const double x = made.x.central();
     input.offset -= made.power * (made.decadic ? ln10 * x : std::log(x));
     if (teff != nullptr && slope_of(*teff, term.source) != 0) made.x = made.x.scaled(shared.factor);
-    input.terms.push_back(std::move(made));
+    input.terms.push_back(made);
   }
   return input;
 }

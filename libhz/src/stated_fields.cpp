@@ -4,7 +4,11 @@
 
 namespace hz {
 
-const Field* stated_field(const ListRow& row, Quantity quantity) {
+namespace {
+
+/// A pointer to a field of a row, const where the row is.
+template <class Row>
+auto field_of(Row& row, Quantity quantity) -> decltype(&row.star.teff) {
   for (const auto& [held, field] : star_fields) {
     if (held == quantity) return &(row.star.*field);
   }
@@ -14,9 +18,10 @@ const Field* stated_field(const ListRow& row, Quantity quantity) {
   return nullptr;
 }
 
-Field* stated_field(ListRow& row, Quantity quantity) {
-  return const_cast<Field*>(stated_field(static_cast<const ListRow&>(row), quantity));
-}
+}  // namespace
+
+const Field* stated_field(const ListRow& row, Quantity quantity) { return field_of(row, quantity); }
+Field* stated_field(ListRow& row, Quantity quantity) { return field_of(row, quantity); }
 
 bool has_stated_field(Quantity quantity) { return stated_field(ListRow{}, quantity) != nullptr; }
 
