@@ -1,6 +1,7 @@
 #include "form.hpp"
 
 #include <algorithm>
+#include <cmath>
 
 #include "hz/require.hpp"
 
@@ -49,10 +50,27 @@ Form operator+(Form form, double constant) {
   return form;
 }
 
-double slope_at(const TeffCurve& curve, double teff) {
-  double slope = curve.power / teff;
-  if (curve.weight != 0) slope += curve.weight * curve.correction->slope(teff);
-  return slope;
+Form raised(const Form& log_form) {
+  HZ_REQUIRE(log_form.curve.is_flat());
+  const double value = std::exp(log_form.value);
+  Form form = value * log_form;
+  form.value = value;
+  return form;
+}
+
+Form logarithm(const Form& form) {
+  HZ_REQUIRE(form.curve.is_flat() && form.value > 0);
+  Form log_form = 1 / form.value * form;
+  log_form.value = std::log(form.value);
+  return log_form;
+}
+
+double slope_between(const TeffCurve& curve, double low, double teff, double high) {
+  const double power_law = curve.power / teff;
+  if (curve.weight == 0) return power_law;
+  const Relation& correction = *curve.correction;
+  const double bend = high > low ? (correction(high) - correction(low)) / (high - low) : correction.slope(teff);
+  return power_law + curve.weight * bend;
 }
 
 }  // namespace hz

@@ -43,7 +43,12 @@ struct Form {
 [[nodiscard]] Form operator*(double factor, Form form);
 [[nodiscard]] Form operator+(Form form, double constant);
 
-/// The derivative of a curve at a Teff.
-[[nodiscard]] double slope_at(const TeffCurve& curve, double teff);
+/// exp of the form of a logarithm, and back, to first order in the terms. A curve is that of a logarithm: neither takes
+/// one.
+[[nodiscard]] Form raised(const Form& log_form);
+[[nodiscard]] Form logarithm(const Form& form);
+
+/// The slope of a curve at a Teff above 0, its correction's as the mean from `low` to `high`: tables have kinks.
+[[nodiscard]] double slope_between(const TeffCurve& curve, double low, double teff, double high);
 
 }  // namespace hz

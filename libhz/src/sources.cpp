@@ -5,6 +5,7 @@
 #include <limits>
 
 #include "hz/constants.hpp"
+#include "hz/require.hpp"
 
 namespace hz {
 namespace {
@@ -57,7 +58,9 @@ Shared shared_with(const Form& teff, const Form& form, const Sources& sources) {
 
 std::size_t Sources::of(Quantity quantity, const Input& input, bool logarithmic) {
   for (std::size_t i = 0; i < all_.size(); ++i) {
-    if (all_[i].quantity == quantity && all_[i].scatter_of.empty()) return i;
+    if (all_[i].quantity != quantity || !all_[i].scatter_of.empty()) continue;
+    HZ_REQUIRE(all_[i].logarithmic == logarithmic);  // slopes in ln x and in x must not meet
+    return i;
   }
   all_.push_back({quantity, {}, input, logarithmic});
   return all_.size() - 1;
@@ -91,7 +94,11 @@ double Sources::plus(std::size_t index) const {
 HalfWidths half_widths(const Form& form, const Form* teff, const Sources& sources) {
   Form whole = form;
   whole.curve = {};
-  if (teff != nullptr) whole = whole + slope_at(form.curve, teff->value) * *teff;
+  if (teff != nullptr) {
+    const HalfWidths range = half_widths(*teff, nullptr, sources);
+    const double t = teff->value;
+    whole = whole + slope_between(form.curve, t - range.minus, t, t + range.plus) * *teff;
+  }
   HalfWidths sides;
   for (const FormTerm& term : whole.terms) {
     const double down =

@@ -42,6 +42,7 @@ std::optional<Form> radius_from_light(Resolver& r);
 std::optional<Form> radius_from_log_g(Resolver& r);
 std::optional<Form> radius_from_mass(Resolver& r);
 std::optional<Form> stated_mass(Resolver& r);
+std::optional<Form> plain_mass(Resolver& r);  // the stated mass itself, in solar masses
 std::optional<Form> mass_from_absolute_k(Resolver& r);
 std::optional<Form> mass_from_density(Resolver& r);
 std::optional<Form> mass_from_transit(Resolver& r);

@@ -14,12 +14,9 @@ constexpr double ln10 = 2.302585092994045684;
 /// Mean density of the Sun, g cm^-3; nominal GM with G of CODATA 2018.
 constexpr double solar_density = 1.4097798;
 
-/// ln of a linear form.
-std::optional<Form> logarithm(const std::optional<Form>& linear) {
-  if (!linear || !(linear->value > 0)) return std::nullopt;
-  Form form = 1 / linear->value * *linear;
-  form.value = std::log(linear->value);
-  return form;
+/// A radius by a relation, which is that of a star and so above 0.
+std::optional<Form> log_of(const std::optional<Form>& radius) {
+  return radius ? std::optional(logarithm(*radius)) : std::nullopt;
 }
 
 std::optional<Form> named(std::optional<Form> form, std::string route) {
@@ -36,7 +33,7 @@ double solar_log_g() {
 std::optional<Form> stated_radius(Resolver& r) { return r.log_of(Quantity::stellar_radius); }
 
 std::optional<Form> radius_from_absolute_k(Resolver& r) {
-  return logarithm(r.apply("stellar_radius_mk_mann15", r.absolute_k(), Quantity::stellar_radius));
+  return log_of(r.apply("stellar_radius_mk_mann15", r.absolute_k(), Quantity::stellar_radius));
 }
 
 std::optional<Form> radius_from_light(Resolver& r) {
@@ -58,14 +55,21 @@ std::optional<Form> radius_from_log_g(Resolver& r) {
 }
 
 std::optional<Form> radius_from_mass(Resolver& r) {
-  std::optional<Form> mass = r.stated(Quantity::stellar_mass);
-  if (!mass) return std::nullopt;
-  mass->route = "stellar_mass";
+  const std::optional<Form> mass = plain_mass(r);
   const std::optional<Form> sunlike = r.apply("stellar_radius_mass_eker18", mass, Quantity::stellar_radius);
-  return logarithm(sunlike ? sunlike : r.apply("radius_mass_pm13", mass, Quantity::stellar_radius));
+  return log_of(sunlike ? sunlike : r.apply("radius_mass_pm13", mass, Quantity::stellar_radius));
 }
 
 std::optional<Form> stated_mass(Resolver& r) { return r.log_of(Quantity::stellar_mass); }
+
+// By way of its logarithm, so that every route takes the same source alike.
+std::optional<Form> plain_mass(Resolver& r) {
+  const std::optional<Form> mass = stated_mass(r);
+  if (!mass) return std::nullopt;
+  Form plain = raised(*mass);
+  plain.route = "stellar_mass";
+  return plain;
+}
 
 std::optional<Form> mass_from_absolute_k(Resolver& r) {
   const std::optional<Form> decadic = r.apply("log_stellar_mass_mk_mann19", r.absolute_k(), Quantity::stellar_mass);

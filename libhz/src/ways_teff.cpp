@@ -5,17 +5,6 @@
 #include "ways.hpp"
 
 namespace hz::ways {
-namespace {
-
-/// exp of a logarithmic form.
-Form raised(const Form& log_form) {
-  Form form = std::exp(log_form.value) * log_form;
-  form.value = std::exp(log_form.value);
-  return form;
-}
-
-}  // namespace
-
 std::optional<Form> stated_teff(Resolver& r) { return r.stated(Quantity::teff); }
 
 std::optional<Form> teff_from_luminosity_and_radius(Resolver& r) {
@@ -60,10 +49,7 @@ std::optional<Form> teff_from_absolute_k(Resolver& r) {
 }
 
 std::optional<Form> teff_from_mass(Resolver& r) {
-  std::optional<Form> mass = r.stated(Quantity::stellar_mass);
-  if (!mass) return std::nullopt;
-  mass->route = "stellar_mass";
-  return r.apply("teff_mass_pm13", mass, Quantity::teff);
+  return r.apply("teff_mass_pm13", plain_mass(r), Quantity::teff);
 }
 
 }  // namespace hz::ways

@@ -22,7 +22,7 @@ struct Star {
   double mass = 0, radius = 0, teff = 0, log_luminosity = 0;
   // M dwarfs only
   double m_bol = 0, distance_modulus = 0, subtype = 0;  // m_bol: apparent, on the scale of IAU 2015 B2
-  double v = 0, j = 0, ks = 0;
+  double b = 0, v = 0, j = 0, ks = 0;
 };
 
 double log_luminosity(double radius, double teff) { return 2 * std::log10(radius) + 4 * std::log10(teff / solar_teff); }
@@ -41,6 +41,7 @@ std::vector<Star> m_dwarfs() {
     star.m_bol = -2.5 * std::log10(cell("f_bol") * 1e-11 / 2.518021002e-8);
     star.distance_modulus = star.m_bol - (4.74 - 2.5 * star.log_luminosity);
     star.subtype = subtype(row.at("spectral_type"));
+    star.b = cell("b");
     star.v = cell("v");
     star.j = cell("j");
     star.ks = cell("ks");
@@ -116,6 +117,7 @@ void expect_two_thirds(const std::vector<Star>& stars, const std::vector<Compari
   }
 }
 
+double b_v(const Star& star) { return star.b - star.v; }
 double v_j(const Star& star) { return star.v - star.j; }
 double v_ks(const Star& star) { return star.v - star.ks; }
 double m_ks(const Star& star) { return star.ks - star.distance_modulus; }
@@ -136,6 +138,7 @@ TEST(MDwarfStars, ScattersHoldTwoThirdsOfThem) {
                         {"bc_v_pm13_teff", teff, bc_v, 60},  // K, half-width of the stars' Teff
                         {"bc_j_mann15", v_j, bc_j},
                         {"teff_vk_pm13", v_ks, teff},
+                        {"teff_bv_boyajian13", b_v, teff},
                         {"teff_vj_mann15", v_j, teff},
                         {"teff_vj_boyajian13", v_j, teff},
                         {"teff_vk_boyajian13", v_ks, teff},
