@@ -45,6 +45,13 @@ std::optional<Form> gravity(Resolver& r) {
   return form;
 }
 
+/// Of a type that Teff is taken from; where a better colour gives Teff, a contradiction of poorer values is no news.
+std::optional<Form> used_type(Resolver& r) {
+  const TeffInput* used = r.teff();
+  const std::optional<Form> by_type = ways::teff_from_type(r);
+  return used != nullptr && by_type && used->form.route == by_type->route ? by_type : std::nullopt;
+}
+
 class Comparison {
 public:
   explicit Comparison(Resolver& resolver) : r_(resolver) {}
@@ -110,7 +117,7 @@ std::string contradictions(Resolver& resolver, const Measured* insolation) {
   comparison.compare(Quantity::luminosity, stated_light, {luminosity_from_radius});
   comparison.compare(Quantity::luminosity, light_without_magnitudes, {luminosity_from_photometry});
   comparison.compare(Quantity::teff, stated_teff, {teff_from_vk, teff_from_bp_rp});
-  comparison.compare(Quantity::teff, teff_from_type, {teff_from_bv});
+  comparison.compare(Quantity::teff, used_type, {teff_from_bv});
   comparison.compare(Quantity::log_g, stated_gravity, {gravity});
   comparison.compare(Quantity::distance, stated_distance, {distance_from_parallax});
   comparison.compare(Quantity::semi_major_axis, stated_axis, {axis_from_period, axis_from_scaled_and_stated_radius});

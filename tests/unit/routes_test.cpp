@@ -282,5 +282,18 @@ TEST(Inconsistent, TeffOfBothLuminositiesCountsInTheirDifference) {
   EXPECT_TRUE(has_flag(answer_star(row, settings_of()), "inconsistent:luminosity"));
 }
 
+// Source: nearest_10pc.csv (HO Lib): M3V with B-V 1.20 in its list.
+TEST(Inconsistent, TypeAndBlueColorWhereTeffIsTakenFromTheType) {
+  ListRow row = bare_earth();
+  row.star.teff = {};
+  row.star.spectral_type = "M3V";
+  row.star.magnitude_v = value(10.56);
+  row.star.magnitude_b = value(11.76);
+  row.star.distance = value(6.3);
+  EXPECT_TRUE(has_flag(answer_star(row, settings_of()), "inconsistent:teff"));
+  row.star.magnitude_k = value(5.84);  // Teff by V-Ks: nothing hangs on the others
+  EXPECT_FALSE(has_flag(answer_star(row, settings_of()), "inconsistent:teff"));
+}
+
 }  // namespace
 }  // namespace hz
