@@ -11,13 +11,16 @@
 namespace hz {
 namespace {
 
-/// Beyond 3 sigma (each value's half-width on the side that faces the other) and 10 per cent of the stated value.
-bool differ(const Measured& stated, const Measured& other) {
-  const double gap = std::abs(stated.value - other.value);
-  const bool stated_is_lower = stated.value < other.value;
-  const double sigma = std::hypot(stated_is_lower ? stated.plus.value_or(0) : stated.minus.value_or(0),
-                                  stated_is_lower ? other.minus.value_or(0) : other.plus.value_or(0));
-  return gap > 0.1 * stated.value && gap > 3 * sigma;
+/// Beyond 3 sigma (that of the gap on the side where it closes) and 10 per cent of what is said.
+bool is_wide(double gap, const HalfWidths& sides, double said) {
+  return std::abs(gap) > 0.1 * said && std::abs(gap) > 3 * (gap < 0 ? sides.plus : sides.minus);
+}
+
+/// Two values that share no input.
+bool differ(const Measured& said, const Measured& other) {
+  const HalfWidths sides{std::hypot(said.minus.value_or(0), other.plus.value_or(0)),
+                         std::hypot(said.plus.value_or(0), other.minus.value_or(0))};
+  return is_wide(said.value - other.value, sides, said.value);
 }
 
 std::optional<Form> stated_light(Resolver& r) {
@@ -42,6 +45,13 @@ std::optional<Form> gravity(Resolver& r) {
   return form;
 }
 
+/// Of a type that Teff is taken from; where a better colour gives Teff, a contradiction of poorer values is no news.
+std::optional<Form> used_type(Resolver& r) {
+  const TeffInput* used = r.teff();
+  const std::optional<Form> by_type = ways::teff_from_type(r);
+  return used != nullptr && by_type && used->form.route == by_type->route ? by_type : std::nullopt;
+}
+
 class Comparison {
 public:
   explicit Comparison(Resolver& resolver) : r_(resolver) {}
@@ -53,13 +63,13 @@ public:
     for (const Way way : others) {
       const std::optional<Form> other = way(r_);
       if (!other || (other->marks.extinction_ignored && !r_.is_nearby())) continue;
-      judge(quantity, value_of(quantity, *said), said->route, value_of(quantity, *other), other->route);
+      if (!differ(quantity, *said, *other)) continue;
+      report(quantity, value_of(quantity, *said), said->route, value_of(quantity, *other), other->route);
     }
   }
 
-  void judge(Quantity quantity, const Measured& said, std::string_view said_route, const Measured& other,
-             std::string_view other_route) {
-    if (!differ(said, other)) return;
+  void report(Quantity quantity, const Measured& said, std::string_view said_route, const Measured& other,
+              std::string_view other_route) {
     r_.inputs().flags().raise(flag::inconsistent, quantity);
     if (!words_.empty()) words_ += "; ";
     const bool is_stated = said_route.starts_with("stated");
@@ -70,10 +80,25 @@ public:
   [[nodiscard]] const std::string& words() const { return words_; }
 
 private:
+  [[nodiscard]] const Form* teff_form() {
+    const TeffInput* teff = r_.teff();
+    return teff != nullptr ? &teff->form : nullptr;
+  }
+  /// On the scale on which the value is quoted: what is said in dex is compared there. An input of both, such as the
+  /// Teff of R^2 Teff^4 and of a bolometric correction, moves both.
+  [[nodiscard]] bool differ(Quantity quantity, const Form& said, const Form& other) {
+    const bool as_they_are = quantity == Quantity::teff;
+    if (quantity == Quantity::log_g || said.route == "stated logarithm") {
+      return is_wide(said.value - other.value, half_widths(said - other, teff_form(), r_.sources()), 1);
+    }
+    const double said_value = as_they_are ? said.value : std::exp(said.value);
+    const double other_value = as_they_are ? other.value : std::exp(other.value);
+    const Form gap = as_they_are ? said - other : said_value * said - other_value * other;  // for its widths
+    return is_wide(said_value - other_value, half_widths(gap, teff_form(), r_.sources()), said_value);
+  }
   [[nodiscard]] Measured value_of(Quantity quantity, const Form& form) {
     if (quantity == Quantity::teff) return plain(form, r_.sources());
-    const TeffInput* teff = r_.teff();
-    return exponential(form, teff != nullptr ? &teff->form : nullptr, r_.sources());
+    return exponential(form, teff_form(), r_.sources());
   }
   static double shown(Quantity quantity, double value) {
     return quantity == Quantity::log_g ? std::log10(value) : value;
@@ -92,15 +117,16 @@ std::string contradictions(Resolver& resolver, const Measured* insolation) {
   comparison.compare(Quantity::luminosity, stated_light, {luminosity_from_radius});
   comparison.compare(Quantity::luminosity, light_without_magnitudes, {luminosity_from_photometry});
   comparison.compare(Quantity::teff, stated_teff, {teff_from_vk, teff_from_bp_rp});
-  comparison.compare(Quantity::teff, teff_from_type, {teff_from_bv});
+  comparison.compare(Quantity::teff, used_type, {teff_from_bv});
   comparison.compare(Quantity::log_g, stated_gravity, {gravity});
   comparison.compare(Quantity::distance, stated_distance, {distance_from_parallax});
   comparison.compare(Quantity::semi_major_axis, stated_axis, {axis_from_period, axis_from_scaled_and_stated_radius});
   comparison.compare(Quantity::planet_radius, stated_planet_radius,
                      {planet_radius_from_ratio, planet_radius_from_depth});
   if (insolation != nullptr) {
-    if (const auto stated = resolver.take(Quantity::insolation)) {
-      comparison.judge(Quantity::insolation, stated->used, "stated", *insolation, "the route used");
+    const auto stated = resolver.take(Quantity::insolation);
+    if (stated && differ(stated->used, *insolation)) {
+      comparison.report(Quantity::insolation, stated->used, "stated", *insolation, "the route used");
     }
   }
   return comparison.words();

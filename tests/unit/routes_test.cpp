@@ -256,5 +256,44 @@ TEST(Inconsistent, SayingOneThingTwiceIsNoTrouble) {
   EXPECT_TRUE(a.note.empty()) << a.note;
 }
 
+// Source: the composite list's row of HD 113538 b: log g 3.79 +- 0.53 is 1.8 half-widths from M / R^2, in dex.
+TEST(Inconsistent, WideSurfaceGravityIsComparedInDex) {
+  ListRow row = bare_earth();
+  row.star.teff = value(4462, 145, 145);
+  row.star.stellar_radius = value(0.53, 0.02, 0.02);
+  row.star.stellar_mass = value(0.58, 0.05, 0.05);
+  row.star.log_g = value(3.79, 0.53, 0.53);
+  EXPECT_FALSE(has_flag(answer_star(row, settings_of()), "inconsistent:log_g"));
+  row.star.log_g = value(3.79, 0.1, 0.1);
+  EXPECT_TRUE(has_flag(answer_star(row, settings_of()), "inconsistent:log_g"));
+}
+
+// A Teff that is too low makes R^2 Teff^4 too small and the light from V, by its bolometric correction, too large: its
+// half-width counts for more in their difference than in the two apart.
+// Source: the composite list's row of HAT-P-11 b.
+TEST(Inconsistent, TeffOfBothLuminositiesCountsInTheirDifference) {
+  ListRow row = bare_earth();
+  row.star.teff = value(4780, 50, 50);
+  row.star.stellar_radius = value(0.68, 0.01, 0.01);
+  row.star.distance = value(37.7647, 0.0337, 0.0337);
+  row.star.magnitude_v = value(9.46, 0.03, 0.03);
+  EXPECT_FALSE(has_flag(answer_star(row, settings_of()), "inconsistent:luminosity"));
+  row.star.teff = value(4780, 30, 30);
+  EXPECT_TRUE(has_flag(answer_star(row, settings_of()), "inconsistent:luminosity"));
+}
+
+// Source: nearest_10pc.csv (HO Lib): M3V with B-V 1.20 in its list.
+TEST(Inconsistent, TypeAndBlueColorWhereTeffIsTakenFromTheType) {
+  ListRow row = bare_earth();
+  row.star.teff = {};
+  row.star.spectral_type = "M3V";
+  row.star.magnitude_v = value(10.56);
+  row.star.magnitude_b = value(11.76);
+  row.star.distance = value(6.3);
+  EXPECT_TRUE(has_flag(answer_star(row, settings_of()), "inconsistent:teff"));
+  row.star.magnitude_k = value(5.84);  // Teff by V-Ks: nothing hangs on the others
+  EXPECT_FALSE(has_flag(answer_star(row, settings_of()), "inconsistent:teff"));
+}
+
 }  // namespace
 }  // namespace hz
