@@ -222,7 +222,8 @@ std::optional<double> radius_ratio(const Work& work, const Answer& answer) {
 
 /// Colours and magnitudes of a white dwarf read like those of a faint dwarf star; its size gives it away.
 std::optional<Problem> below_main_sequence(const Work& work, const Answer& answer) {
-  const bool by_relation = work.teff != nullptr && work.teff->form.marks.main_sequence;
+  const bool by_relation =
+      (work.teff != nullptr && work.teff->form.marks.main_sequence) || (work.light && work.light->marks.main_sequence);
   const std::optional<double> ratio = radius_ratio(work, answer);
   if (!by_relation || !ratio || *ratio > too_small) return std::nullopt;
   return Problem{

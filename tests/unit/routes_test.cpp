@@ -295,5 +295,19 @@ TEST(Inconsistent, TypeAndBlueColorWhereTeffIsTakenFromTheType) {
   EXPECT_FALSE(has_flag(answer_star(row, settings_of()), "inconsistent:teff"));
 }
 
+// 16 mag and 3900 K at 10 pc: by a correction of main-sequence stars 8.6e-5 solar luminosities, so 0.020 solar radii; a
+// main-sequence star of 3900 K has 0.60 (Pecaut & Mamajek 2013, between K9V and M0V).
+TEST(BelowMainSequence, StatedTeffDoesNotHideAWhiteDwarf) {
+  ListRow row;
+  row.star.teff = value(3900, 50, 50);
+  row.star.distance = value(10, 0.1, 0.1);
+  row.star.magnitude_v = value(16);
+  const Answer answer = answer_star(row, settings_of());
+  EXPECT_EQ(answer.status, Status::set_aside);
+  EXPECT_THAT(answer.reason, HasSubstr("0.034 times the size of a main-sequence star of 3900 K (stated)"));
+  row.star.magnitude_v = value(9);
+  EXPECT_EQ(answer_star(row, settings_of()).status, Status::answered);
+}
+
 }  // namespace
 }  // namespace hz
