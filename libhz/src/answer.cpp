@@ -53,7 +53,8 @@ Problem no_teff(const Resolver& resolver) {
             "teff is only a limit, and nothing else leads to it" + because(resolver)};
   }
   return {ProblemCode::missing, "teff",
-          "no effective temperature (teff), and no colour, spectral_type or other value that leads to it" +
+          "no effective temperature (teff), and no colour, spectral_type or other value within the range of a relation "
+          "that leads to it" +
               because(resolver)};
 }
 

@@ -181,7 +181,8 @@ TEST(RankedTable, MissingIsMissing) {
   const auto found = cells(candidate, settings);
   EXPECT_EQ(std::get<std::string>(found.at("status")), "set aside");
   EXPECT_EQ(std::get<std::string>(found.at("reason")),
-            "no effective temperature (teff), and no colour, spectral_type or other value that leads to it");
+            "no effective temperature (teff), and no colour, spectral_type or other value within the range of a "
+            "relation that leads to it");
   for (const auto& [name, value] : found) {
     const bool said =
         name == "planet" || name == "status" || name == "reason" || name == "limit_set" || name == "asymmetry";

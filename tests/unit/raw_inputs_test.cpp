@@ -110,7 +110,7 @@ TEST(RawInputs, JointPropagationAgreesWithBruteForce) {
     ASSERT_EQ(answered.status, Status::answered) << lantern.name << ": " << answered.reason;
     const Shares ours = shares_of(answered.planet->probabilities);
     const Shares drawn = brute_force(lantern);
-EXPECT_LT(excess(ours, drawn), lantern.kind->allowed)
+    EXPECT_LT(excess(ours, drawn), lantern.kind->allowed)
         << lantern.name << ": P " << ours[1] << " and " << ours[4] << ", drawn " << drawn[1] << " and " << drawn[4];
     if (excess(ours, drawn) < 0.01) ++close;
     sum_of_squares += std::pow(greatest_difference(ours, drawn), 2);

@@ -201,7 +201,7 @@ TEST(Understanding, TwoColumnsForOneQuantityAreAnError) {
             "list.csv: columns \"Teff\" and \"T_eff\" both look like teff; say which in a column map (--columns "
             "MAP.toml): teff = \"Teff\"  or  teff = \"T_eff\"");
   EXPECT_THAT(refusal({"Teff", "Teff err", "Teff sigma"}), HasSubstr("both look like teff_err"));
-  EXPECT_EQ(refusal({"J mag", "mag J"}), "");  // not needed
+  EXPECT_THAT(refusal({"J mag", "mag J"}), HasSubstr("both look like magnitude_j"));
 }
 
 TEST(Understanding, TwoColumnsAreSettledByTheMap) {

@@ -199,7 +199,8 @@ private:
                 fmt::format("columns {} and {} both look like {}", words::quoted(header(columns[0])),
                             words::quoted(header(columns[1])), key),
                 {},
-                needs(quantity)};
+                // Whatever a row may state can decide its answer: two columns for it are never passed over.
+                needs(quantity) || stated_field(ListRow{}, quantity) != nullptr};
     for (const auto column : columns) doubt.map_lines.push_back(map_line(key, header(column), {}));
     doubts_.push_back(std::move(doubt));
   }
