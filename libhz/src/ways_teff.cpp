@@ -48,8 +48,6 @@ std::optional<Form> teff_from_absolute_k(Resolver& r) {
   return r.apply("teff_mk_pm13", r.absolute_k(), Quantity::teff);
 }
 
-std::optional<Form> teff_from_mass(Resolver& r) {
-  return r.apply("teff_mass_pm13", plain_mass(r), Quantity::teff);
-}
+std::optional<Form> teff_from_mass(Resolver& r) { return r.apply("teff_mass_pm13", plain_mass(r), Quantity::teff); }
 
 }  // namespace hz::ways

@@ -133,8 +133,8 @@ public:
   /// One row as records in canonical units; unreadable cells become problems in their fields. A row with a problem of
   /// its own has empty records. `kept` stays empty: what travels along is the caller's choice.
   ///
-  /// A unit in a cell ("1.2 RJ") wins over the column's. A ranked file is itself a list: what was derived stands there in
-  /// X_used, and X is what the list stated.
+  /// A unit in a cell ("1.2 RJ") wins over the column's. A ranked file is itself a list: what was derived stands there
+  /// in X_used, and X is what the list stated.
   [[nodiscard]] ListRow row(const Chunk& chunk, std::size_t index) const;
 
 private:
