@@ -45,6 +45,21 @@ std::optional<SpectralType> type_of(const StarRecord& star) {
   return read ? std::optional(*read) : std::nullopt;
 }
 
+/// What a relation makes of an error of its x: the slope between its ends, and half of how much farther y lies above
+/// its centre at the upper end than the slope says. Tables have kinks, and types and masses reach over several of them.
+struct Chord {
+  double slope = 0;
+  double skew = 0;
+};
+
+Chord chord_of(const Relation& y, double x, const HalfWidths& sides) {
+  if (!(sides.minus + sides.plus > 0)) return {y.slope(x), 0};
+  const double down = y(x) - y(x - sides.minus);
+  const double up = y(x + sides.plus) - y(x);
+  const double slope = (down + up) / (sides.minus + sides.plus);
+  return {slope, ((up - slope * sides.plus) - (down - slope * sides.minus)) / 2};
+}
+
 /// Two magnitudes whose difference a colour is.
 std::pair<Quantity, Quantity> magnitudes_of(Quantity color) {
   switch (color) {
@@ -76,9 +91,10 @@ TeffInput Resolver::input_of(const Form& teff) const {
     return {teff, stated.x, stated.used};
   }
   TeffInput input{teff, Distribution::exact(teff.value), plain(teff, sources_)};
-  if (*input.used.minus + *input.used.plus > 0) {
-    input.x = Distribution::two_piece(teff.value, *input.used.minus, *input.used.plus, settings_.asymmetry,
-                                      domain_of(Quantity::teff));
+  const HalfWidths sides = skewed_half_widths(teff, sources_);
+  if (sides.minus + sides.plus > 0) {
+    input.x =
+        Distribution::two_piece(teff.value, sides.minus, sides.plus, settings_.asymmetry, domain_of(Quantity::teff));
   }
   return input;
 }
@@ -198,9 +214,11 @@ std::optional<Form> Resolver::apply(std::string_view key, const std::optional<Fo
   if (!x) return std::nullopt;
   const Relation& known = relation(key);
   if (!known.range().contains(x->value) || !holds(known)) return std::nullopt;
-  Form y = known.slope(x->value) * *x;
+  const TeffInput* const followed = x->curve.is_flat() ? nullptr : teff();
+  const Chord chord = chord_of(known, x->value, half_widths(*x, followed ? &followed->form : nullptr, sources_));
+  Form y = chord.slope * *x;
   y.value = known(x->value);
-  y.terms.push_back({sources_.scatter(quantity, known, known.scatter(x->value)), 1});
+  y.terms.push_back({sources_.scatter(quantity, known, known.scatter(x->value), chord.skew), 1});
   y.marks.main_sequence = y.marks.main_sequence || known.main_sequence;
   y.route = fmt::format("{} by {}", x->route, known.label);
   return y;

@@ -59,7 +59,8 @@ public:
   [[nodiscard]] std::optional<Form> color(Quantity quantity);           // without reddening
   [[nodiscard]] std::optional<Form> absolute_k();
   [[nodiscard]] std::optional<Form> subtype();
-  /// y(x) with the relation's scatter; empty outside its range and where it does not hold. `quantity` is what for.
+  /// y(x) with the relation's scatter, which also carries the skewness that the relation's bend gives to y; empty
+  /// outside its range and where it does not hold. `quantity` is what for.
   [[nodiscard]] std::optional<Form> apply(std::string_view key, const std::optional<Form>& x, Quantity quantity);
   /// Whether a relation may be used for this star.
   [[nodiscard]] bool holds(const Relation& relation) const;

@@ -19,7 +19,29 @@ double slope_of(const Form& form, std::size_t source) {
   return found == form.terms.end() ? 0 : found->slope;
 }
 
-double width(const Sources& sources, std::size_t source) { return (sources.minus(source) + sources.plus(source)) / 2; }
+/// A source's half-widths as they are on the scale of its slopes: cut where its domain ends, and skewed by a logarithm.
+HalfWidths ends(const Source& source) {
+  const Distribution& x = source.input.x;
+  if (!source.logarithmic) return {x.minus(), x.plus()};
+  return {-std::log1p(-x.minus() / x.central()), std::log1p(x.plus() / x.central())};
+}
+
+double width(const Sources& sources, std::size_t source) {
+  const HalfWidths sides = ends(sources[source]);
+  return (sides.minus + sides.plus) / 2;
+}
+
+/// Half the difference of a source's half-widths.
+double skew(const Sources& sources, std::size_t source) {
+  const HalfWidths sides = ends(sources[source]);
+  return (sides.plus - sides.minus) / 2;
+}
+
+HalfWidths sides_of(double width, double skew) {
+  constexpr double most = 0.9;  // neither side may vanish
+  const double held = std::clamp(skew, -most * width, most * width);
+  return {width - held, width + held};
+}
 
 double variance(const Form& form, const Sources& sources) {
   double sum = 0;
@@ -34,8 +56,10 @@ InsolationTerm insolation_term(const FormTerm& term, const Source& source) {
 
 /// What the sources shared with Teff do to ln S beyond it.
 struct Shared {
-  double slope = 0;   // per K, through Teff
-  double factor = 1;  // what is left of their widths
+  double slope = 0;     // per K, through Teff
+  double variance = 0;  // of ln S, from them
+  double factor = 1;    // what is left of their widths
+  double skew = 0;      // of what is left, from all sources of Teff
 };
 
 Shared shared_with(const Form& teff, const Form& form, const Sources& sources) {
@@ -51,7 +75,23 @@ Shared shared_with(const Form& teff, const Form& form, const Sources& sources) {
     common += term.slope * through_teff * square;
   }
   if (!(own > 0)) return {};
-  return {common / total, std::sqrt(std::max(0.0, 1 - common * common / (total * own)))};
+  Shared shared{common / total, own, std::sqrt(std::max(0.0, 1 - common * common / (total * own))), 0};
+  for (const FormTerm& term : teff.terms) {
+    shared.skew += (slope_of(form, term.source) - shared.slope * term.slope) * skew(sources, term.source);
+  }
+  return shared;
+}
+
+/// A shared source with what is left of its width, and its part of the skewness that is left.
+Distribution rest_of(const FormTerm& term, const Shared& shared, const Sources& sources) {
+  const Source& source = sources[term.source];
+  const double part = std::pow(term.slope * width(sources, term.source), 2) / shared.variance;
+  const HalfWidths sides = sides_of(shared.factor * width(sources, term.source), part * shared.skew / term.slope);
+  if (!(sides.minus + sides.plus > 0)) return Distribution::exact(source.input.x.central());
+  const double x = source.input.x.central();
+  const double minus = source.logarithmic ? -x * std::expm1(-sides.minus) : sides.minus;
+  const double plus = source.logarithmic ? x * std::expm1(sides.plus) : sides.plus;
+  return Distribution::two_piece(x, minus, plus, Asymmetry::median, {source.logarithmic ? 0 : -infinity, infinity});
 }
 
 }  // namespace
@@ -66,14 +106,15 @@ std::size_t Sources::of(Quantity quantity, const Input& input, bool logarithmic)
   return all_.size() - 1;
 }
 
-std::size_t Sources::scatter(Quantity quantity, const Relation& relation, double half_width) {
+std::size_t Sources::scatter(Quantity quantity, const Relation& relation, double half_width, double skew) {
   for (std::size_t i = 0; i < all_.size(); ++i) {
     if (all_[i].scatter_of == relation.key) return i;
   }
   Source source{quantity, relation.key, {}, false};
-  source.input.used = {0, half_width, half_width, LimitMark::none, false};
+  const HalfWidths sides = sides_of(half_width, skew);
+  source.input.used = {0, sides.minus, sides.plus, LimitMark::none, false};
   if (half_width > 0) {
-    source.input.x = Distribution::two_piece(0, half_width, half_width, Asymmetry::median, {-infinity, infinity});
+    source.input.x = Distribution::two_piece(0, sides.minus, sides.plus, Asymmetry::median, {-infinity, infinity});
   }
   all_.push_back(source);
   return all_.size() - 1;
@@ -110,6 +151,12 @@ HalfWidths half_widths(const Form& form, const Form* teff, const Sources& source
   return sides;
 }
 
+HalfWidths skewed_half_widths(const Form& form, const Sources& sources) {
+  double skewness = 0;
+  for (const FormTerm& term : form.terms) skewness += term.slope * skew(sources, term.source);
+  return sides_of(std::sqrt(variance(form, sources)), skewness);
+}
+
 Measured exponential(const Form& form, const Form* teff, const Sources& sources) {
   if (form.terms.size() == 1 && form.terms.front().slope == 1 && form.curve.is_flat()) {
     const Source& only = sources[form.terms.front().source];
@@ -138,7 +185,7 @@ PlacementInput placement_input(const Form& log_insolation, const Form* teff, con
     InsolationTerm made = insolation_term(term, sources[term.source]);
     const double x = made.x.central();
     input.offset -= made.power * (made.decadic ? ln10 * x : std::log(x));
-    if (teff != nullptr && slope_of(*teff, term.source) != 0) made.x = made.x.scaled(shared.factor);
+    if (teff != nullptr && slope_of(*teff, term.source) != 0) made.x = rest_of(term, shared, sources);
     input.terms.push_back(made);
   }
   return input;

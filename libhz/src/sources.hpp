@@ -20,8 +20,9 @@ class Sources {
 public:
   /// Index of the source of a stated field, made at its first use.
   [[nodiscard]] std::size_t of(Quantity quantity, const Input& input, bool logarithmic);
-  /// A relation's scatter about it, in the unit of its y; `quantity` is what the relation served for.
-  [[nodiscard]] std::size_t scatter(Quantity quantity, const Relation& relation, double half_width);
+  /// A relation's scatter about it, in the unit of its y, with half-widths half_width - skew and half_width + skew;
+  /// `quantity` is what the relation served for.
+  [[nodiscard]] std::size_t scatter(Quantity quantity, const Relation& relation, double half_width, double skew);
   [[nodiscard]] const Source& operator[](std::size_t index) const { return all_[index]; }
 
   /// 68 per cent half-widths of u.
@@ -40,13 +41,17 @@ struct HalfWidths {
 };
 [[nodiscard]] HalfWidths half_widths(const Form& form, const Form* teff, const Sources& sources);
 
+/// Those of the distribution that a form without curve stands for: widths add in quadrature, and half the differences
+/// of the sides as they are, because the medians of skewed terms move their sum's.
+[[nodiscard]] HalfWidths skewed_half_widths(const Form& form, const Sources& sources);
+
 /// A form of a logarithm as the quantity itself.
 [[nodiscard]] Measured exponential(const Form& form, const Form* teff, const Sources& sources);
 /// A plain form (a Teff, a magnitude) as it is.
 [[nodiscard]] Measured plain(const Form& form, const Sources& sources);
 
 /// ln S and Teff as the placement takes them. A source that moves both goes into the curve by its regression on Teff,
-/// and keeps the width that Teff does not explain.
+/// and keeps the width and the skewness that Teff does not explain.
 [[nodiscard]] PlacementInput placement_input(const Form& log_insolation, const Form* teff, const Distribution& teff_x,
                                              const Sources& sources);
 

@@ -31,7 +31,7 @@ std::optional<Form> by_teff(Resolver& r, Quantity magnitude, std::string_view ke
   const double at_centre = correction(teff->form.value);
   Form bolometric = *apparent + at_centre;
   bolometric.terms.push_back(
-      {r.sources().scatter(Quantity::luminosity, correction, correction.scatter(teff->form.value)), 1});
+      {r.sources().scatter(Quantity::luminosity, correction, correction.scatter(teff->form.value), 0), 1});
   Form form = light(bolometric, *distance, *correction.solar_bolometric_magnitude);
   form.curve.weight = per_magnitude;
   form.curve.correction = &correction;

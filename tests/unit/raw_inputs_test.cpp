@@ -116,8 +116,8 @@ TEST(RawInputs, JointPropagationAgreesWithBruteForce) {
     sum_of_squares += std::pow(greatest_difference(ours, drawn), 2);
   }
   const auto count = static_cast<double>(rows.size());
-  EXPECT_GE(close, 0.8 * count);
-  EXPECT_LT(std::sqrt(sum_of_squares / count), 0.014);
+  EXPECT_GE(close, 0.85 * count);
+  EXPECT_LT(std::sqrt(sum_of_squares / count), 0.01);  // 0.002 of it is the draws'
 }
 
 /// A planet far inside or far outside would agree whatever were done to the errors.

@@ -124,13 +124,13 @@ TEST(Extinction, ComesOffColours) {
 
 TEST(Extinction, ItsErrorCountsOnceInMagnitudeAndColour) {
   StarRecord star;
-  star.magnitude_v = exactly(10.3);
+  star.magnitude_v = exactly(11.2);
   star.magnitude_k = exactly(6.05);
   star.parallax = exactly(100);
   star.extinction_v = value(0.4, 0.1, 0.1);
   const Measured light = star_answer(star).star.luminosity->measured;
-  // V-Ks 4.25 less 0.886 A_V is 3.896. Source: Pecaut & Mamajek 2013: 3.84 has BC_V -1.29, 4.00 -1.42.
-  const double per_color = -0.13 / 0.16;
+  // V-Ks 5.15 less 0.886 A_V is 4.80. Source: Pecaut & Mamajek 2013: 4.60 has BC_V -1.93, 5.00 -2.28.
+  const double per_color = -0.35 / 0.40;
   const double by_extinction = 0.4 * ln10 * std::abs(-1 - 0.886 * per_color) * 0.1;
   EXPECT_NEAR(*light.plus / light.value, std::hypot(by_extinction, 0.4 * ln10 * 0.03), 1e-4);
 }
