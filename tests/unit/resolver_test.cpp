@@ -13,7 +13,6 @@ using testing::above;
 using testing::below;
 using testing::exactly;
 using testing::has_flag;
-using testing::has_flag_like;
 using ::testing::HasSubstr;
 using testing::settings_of;
 using testing::unreadable;
